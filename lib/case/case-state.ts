@@ -1,0 +1,138 @@
+import type { Location, FindingKind, NotComparedReason, PathChange, SegmentJudgement, Finding } from '@/lib/alert/judgement';
+import type { Condition, Phase } from '@/lib/case/entry-bodies';
+import type { BaselineFamily, CasePlan } from '@/lib/case/plan';
+import type { RunBody } from '@/lib/case/run-body';
+import type { Reading } from '@/lib/response/reading';
+
+/** A logged run as the state keeps it: the newest few of each path. */
+export interface KeptRun {
+  readonly seq: number;
+  readonly at: string;
+  readonly run: RunBody;
+  readonly isBeforeTimeout: boolean;
+}
+
+/** What one path showed last, and against what. */
+export interface PathRecord {
+  readonly pathId: string;
+  /** Newest run of any kind on this path. */
+  readonly lastSeq: number;
+  readonly lastAt: string;
+  readonly lastReading: Reading;
+  readonly lastIntensityMa: number;
+  readonly lastNotCompared: NotComparedReason | null;
+  /** Newest comparable run, null before the first. */
+  readonly compared: ComparedRecord | null;
+  /** The comparable run before it, for "two runs inside the limit". */
+  readonly previous: ComparedRecord | null;
+  /** Newest comparable run without a finding of notice or more. */
+  readonly lastGoodAt: string | null;
+}
+
+/** A comparable run of a path. */
+export interface ComparedRecord {
+  readonly seq: number;
+  readonly at: string;
+  readonly reading: Reading;
+  readonly change: PathChange;
+  readonly findings: readonly Finding[];
+}
+
+/** Baseline of one path, electrode and family: mean of the accepted runs. */
+export interface Baseline {
+  readonly key: string;
+  readonly pathId: string;
+  readonly electrodeId: string;
+  readonly family: BaselineFamily;
+  readonly seq: number;
+  readonly at: string;
+  readonly runSeqs: readonly number[];
+  readonly onsetMs: number | null;
+  readonly amplitudeUv: number | null;
+  readonly durationMs: number | null;
+  readonly amplitudeScatter: number;
+  readonly isScatterAssumed: boolean;
+  readonly intensityMa: number;
+  readonly pulseWidthUs: number;
+  readonly isSupramaximal: boolean;
+  readonly maximalResponseMa: number | null;
+  readonly setAfterPercent: number | null;
+  readonly isMarkedByCorrection: boolean;
+}
+
+/** An open notice or alert of one nerve. */
+export interface Incident {
+  readonly alertId: string;
+  readonly nerveId: string;
+  readonly level: 'notice' | 'alert';
+  readonly isRepeated: boolean;
+  readonly finding: FindingKind;
+  readonly firstSeq: number;
+  readonly firstBadAt: string;
+  readonly raisedAt: string;
+  readonly repeatDueAt: string | null;
+  readonly pathIds: readonly string[];
+  readonly worstPercentOfBaseline: number | null;
+  readonly isLost: boolean;
+  readonly location: Location;
+  readonly lastGoodAt: string | null;
+  readonly stepsBetween: readonly string[];
+  readonly toldAt: string | null;
+  readonly toldPercentOfBaseline: number | null;
+  readonly readBackAt: string | null;
+  readonly actedAt: string | null;
+  readonly action: string | null;
+  readonly recoveredAt: string | null;
+}
+
+/** A surgical step as the state keeps it. */
+export interface KeptStep {
+  readonly seq: number;
+  readonly at: string;
+  readonly since: string;
+  readonly isRisk: boolean;
+}
+
+/** A condition as the state keeps it: the newest of each kind. */
+export interface KeptCondition {
+  readonly seq: number;
+  readonly at: string;
+  readonly condition: Condition;
+}
+
+/** An alert that was taken back because its entry was corrected. */
+export interface WithdrawnAlert {
+  readonly alertId: string;
+  readonly nerveId: string;
+  readonly at: string;
+}
+
+/** The state of a case: a bounded fold over its entries. */
+export interface CaseState {
+  readonly caseId: string;
+  readonly seq: number;
+  readonly hash: string;
+  readonly status: 'planned' | 'open' | 'closed';
+  readonly reference: string;
+  readonly plan: CasePlan;
+  readonly phase: Phase;
+  readonly phaseReason: string | null;
+  readonly phaseAt: string;
+  readonly timeoutAt: string | null;
+  readonly closedAt: string | null;
+  readonly distancesVoidSince: Readonly<Record<string, string>>;
+  /** Newest kept runs, newest last, at most 40. */
+  readonly runs: readonly KeptRun[];
+  readonly paths: Readonly<Record<string, PathRecord>>;
+  /** Newest segment of each nerve, channel and pair of sites. */
+  readonly segments: Readonly<Record<string, SegmentJudgement>>;
+  readonly baselineSegments: Readonly<Record<string, SegmentJudgement>>;
+  readonly baselines: Readonly<Record<string, Baseline>>;
+  readonly openingBaselines: Readonly<Record<string, Baseline>>;
+  readonly conditions: Readonly<Record<string, KeptCondition>>;
+  readonly steps: readonly KeptStep[];
+  readonly incidents: Readonly<Record<string, Incident>>;
+  readonly alertCounts: Readonly<Record<string, number>>;
+  readonly withdrawn: readonly WithdrawnAlert[];
+  readonly runCount: number;
+}
