@@ -1,0 +1,6 @@
+/**
+ * Version of everything on the wire, HTTP and channel. A test holds a hash of all schemas beside it:
+ * who changes a message raises the version and adds a line here.
+ * 1: first.
+ */
+export const contractVersion = 1;

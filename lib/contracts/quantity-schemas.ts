@@ -1,0 +1,10 @@
+import { z } from 'zod';
+
+import { bounds, type BoundedQuantity } from '@/lib/units/bounds';
+
+/** A number inside the bounds of its quantity; the message says the value's limits and why they are there. */
+export const quantity = (name: BoundedQuantity) => {
+  const { min, max, unit, reason } = bounds[name];
+  const message = `Out of range: ${min} to ${max} ${unit} is allowed. ${reason}`;
+  return z.number({ error: 'Not a number' }).min(min, message).max(max, message);
+};
