@@ -1,0 +1,19 @@
+/** Everything that anyone can ask of the product; what is not in this list cannot be asked. */
+export const actions = [
+  'list-cases',
+  'plan-case',
+  'see-case',
+  'see-identity',
+  'write-case',
+  'send-message',
+  'pair-screen',
+  'see-screens',
+  'revoke-screen',
+  'confirm-paint',
+  'run-timer',
+  'see-account',
+  'reauthenticate',
+] as const;
+
+/** Name of an action. */
+export type Action = (typeof actions)[number];
