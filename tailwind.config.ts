@@ -1,0 +1,48 @@
+import type { Config } from 'tailwindcss';
+
+const color = (name: string) => `var(--${name})`;
+
+/** Every colour is a token of globals.css, so that both themes and the priority bands work without a second class. */
+const config: Config = {
+  content: ['./app/**/*.{ts,tsx}'],
+  theme: {
+    colors: {
+      transparent: 'transparent',
+      current: 'currentColor',
+      ground: color('ground'),
+      raised: color('raised'),
+      'raised-more': color('raised-more'),
+      rule: color('rule'),
+      edge: color('edge'),
+      ink: color('ink'),
+      second: color('second'),
+      third: color('third'),
+      stain: color('stain'),
+      'on-stain': color('on-stain'),
+      high: color('high'),
+      'high-text': color('high-text'),
+      'on-high': color('on-high'),
+      medium: color('medium'),
+      'medium-text': color('medium-text'),
+      'on-medium': color('on-medium'),
+      low: color('low'),
+    },
+    fontFamily: {
+      sans: ['var(--font-hyper)', 'var(--font-hyper-ext)', 'system-ui', 'DejaVu Sans', 'sans-serif'],
+      mono: ['var(--font-hyper-mono)', 'var(--font-hyper-mono-ext)', 'ui-monospace', 'DejaVu Sans Mono', 'monospace'],
+    },
+    fontSize: {
+      xs: ['12px', '16px'],
+      sm: ['13.5px', '18px'],
+      base: ['15px', '22px'],
+      lg: ['18px', '26px'],
+      xl: ['22px', '28px'],
+      '2xl': ['28px', '34px'],
+      '3xl': ['36px', '42px'],
+    },
+    borderRadius: { none: '0', sm: '2px', DEFAULT: '3px', md: '4px', full: '9999px' },
+    boxShadow: { none: 'none' },
+  },
+};
+
+export default config;
