@@ -1,0 +1,5 @@
+import type { DemoSignIn } from './print-welcome';
+
+export async function listDemoPeople(): Promise<readonly DemoSignIn[]> {
+  return [];
+}
