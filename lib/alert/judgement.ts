@@ -30,6 +30,7 @@ export type NotComparedReason =
   | 'pulse-width-differs'
   | 'convention-differs'
   | 'current-lower'
+  | 'current-not-supramaximal'
   | 'current-raised'
   | 'path-unknown';
 

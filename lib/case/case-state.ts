@@ -1,5 +1,5 @@
 import type { Location, FindingKind, NotComparedReason, PathChange, SegmentJudgement, Finding } from '@/lib/alert/judgement';
-import type { Condition, Phase } from '@/lib/case/entry-bodies';
+import type { BaselineValues, Condition, Phase } from '@/lib/case/entry-bodies';
 import type { BaselineFamily, CasePlan } from '@/lib/case/plan';
 import type { RunBody } from '@/lib/case/run-body';
 import type { Reading } from '@/lib/response/reading';
@@ -39,23 +39,11 @@ export interface ComparedRecord {
 }
 
 /** Baseline of one path, electrode and family: mean of the accepted runs. */
-export interface Baseline {
+export interface Baseline extends BaselineValues {
   readonly key: string;
-  readonly pathId: string;
   readonly electrodeId: string;
   readonly family: BaselineFamily;
   readonly seq: number;
-  readonly at: string;
-  readonly runSeqs: readonly number[];
-  readonly onsetMs: number | null;
-  readonly amplitudeUv: number | null;
-  readonly durationMs: number | null;
-  readonly amplitudeScatter: number;
-  readonly isScatterAssumed: boolean;
-  readonly intensityMa: number;
-  readonly pulseWidthUs: number;
-  readonly isSupramaximal: boolean;
-  readonly maximalResponseMa: number | null;
   readonly setAfterPercent: number | null;
   readonly isMarkedByCorrection: boolean;
 }
@@ -68,6 +56,8 @@ export interface Incident {
   readonly isRepeated: boolean;
   readonly finding: FindingKind;
   readonly firstSeq: number;
+  /** Numbers of the runs that were past a limit since the first, at most 50. */
+  readonly badSeqs: readonly number[];
   readonly firstBadAt: string;
   readonly raisedAt: string;
   readonly repeatDueAt: string | null;
@@ -121,12 +111,11 @@ export interface CaseState {
   readonly timeoutAt: string | null;
   readonly closedAt: string | null;
   readonly distancesVoidSince: Readonly<Record<string, string>>;
-  /** Newest kept runs, newest last, at most 40. */
+  /** Kept runs in the order they were logged: the newest six of each site. */
   readonly runs: readonly KeptRun[];
   readonly paths: Readonly<Record<string, PathRecord>>;
   /** Newest segment of each nerve, channel and pair of sites. */
   readonly segments: Readonly<Record<string, SegmentJudgement>>;
-  readonly baselineSegments: Readonly<Record<string, SegmentJudgement>>;
   readonly baselines: Readonly<Record<string, Baseline>>;
   readonly openingBaselines: Readonly<Record<string, Baseline>>;
   readonly conditions: Readonly<Record<string, KeptCondition>>;

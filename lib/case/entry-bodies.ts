@@ -23,6 +23,22 @@ export type AlertCause =
 /** Which way an alert got worse. */
 export type Worsening = 'lost' | 'twenty-points' | 'another-muscle' | 'another-segment' | 'returned';
 
+/** Means and scatter of the accepted runs of one path, with the stimulus of the newest of them. */
+export interface BaselineValues {
+  readonly pathId: string;
+  readonly runSeqs: readonly number[];
+  readonly at: string;
+  readonly onsetMs: number | null;
+  readonly amplitudeUv: number | null;
+  readonly durationMs: number | null;
+  readonly amplitudeScatter: number;
+  readonly isScatterAssumed: boolean;
+  readonly intensityMa: number;
+  readonly pulseWidthUs: number;
+  readonly isSupramaximal: boolean;
+  readonly maximalResponseMa: number | null;
+}
+
 /** The evidence a notice or an alert is raised with. */
 export interface AlertEvidence {
   readonly alertId: string;
@@ -62,6 +78,7 @@ export interface EntryBodies {
     readonly isProvisional: boolean;
     readonly reason: string | null;
     readonly setAfterPercent: number | null;
+    readonly values: readonly BaselineValues[];
   };
   'condition.logged': { readonly condition: Condition; readonly reportedBy: string | null };
   'step.logged': {
@@ -76,7 +93,7 @@ export interface EntryBodies {
     readonly positions: readonly { readonly siteId: string; readonly positionMm: number }[];
     readonly reason: string | null;
   };
-  'notice.raised': AlertEvidence;
+  'notice.raised': AlertEvidence & { readonly repeatDueAt: string | null };
   'notice.settled': { readonly alertId: string; readonly runSeq: number };
   'alert.raised': AlertEvidence & { readonly isRepeated: boolean };
   'alert.worsened': AlertEvidence & { readonly worsening: readonly Worsening[] };

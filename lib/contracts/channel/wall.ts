@@ -11,7 +11,7 @@ const wallFields: { readonly [K in EntryKind]?: readonly string[] } = {
   'run.logged': ['siteId', 'electrodeId', 'family', 'purpose', 'intensityMa', 'pulseWidthUs', 'isSupramaximal', 'maximalResponseMa', 'readings'],
   'run.judged': ['runSeq', 'judgeVersion', 'paths', 'segments'],
   'run.corrected': ['runSeq', 'run'],
-  'baseline.accepted': ['family', 'electrodeId', 'runSeqs', 'pathIds', 'isOpening', 'isProvisional', 'setAfterPercent'],
+  'baseline.accepted': ['family', 'electrodeId', 'runSeqs', 'pathIds', 'isOpening', 'isProvisional', 'setAfterPercent', 'values'],
   'condition.logged': ['condition'],
   'step.logged': ['stepId', 'label', 'since', 'isRisk', 'voidsDistances'],
   'distances.measured': ['nerveId', 'positions'],

@@ -1,0 +1,51 @@
+import type { CaseState } from '@/lib/case/case-state';
+import type { CaseCommand, Refusal } from '@/lib/case/commands';
+import { alertDrafts } from '@/lib/case/decide/alert-drafts';
+import type { DecideContext } from '@/lib/case/decide/decide-context';
+import { draft } from '@/lib/case/decide/draft';
+import { evolveDraft } from '@/lib/case/decide/evolve-draft';
+import { judgedDraft } from '@/lib/case/decide/judged-draft';
+import { roundRun } from '@/lib/case/decide/round-run';
+import type { EntryDraft } from '@/lib/case/entry-bodies';
+
+/**
+ * Corrects or withdraws a run and judges its paths again.
+ *
+ * Method: an alert whose every abnormal run is gone is withdrawn and says so; an alert with other evidence stays.
+ * A correction that shows a change the typing had hidden raises it with the run's own time.
+ *
+ * @returns drafts: run.corrected, run.judged, then alert entries; or a refusal
+ * @source product rule: a correction judges its path again; nothing ends by itself
+ */
+export function decideCorrection(
+  state: CaseState,
+  command: CaseCommand & { name: 'correct-run' },
+  context: DecideContext,
+): readonly EntryDraft[] | Refusal {
+  const kept = state.runs.find((run) => run.seq === command.runSeq);
+  if (kept === undefined) {
+    return { code: 'run-unknown', message: `Run not correctable: entry ${command.runSeq} is no run among the newest six of a site` };
+  }
+  if (command.run !== null && command.run.siteId !== kept.run.siteId) {
+    return {
+      code: 'site-differs',
+      message: `Site differs: entry ${command.runSeq} was made at ${kept.run.siteId}. Withdraw it and log the run again at ${command.run.siteId}`,
+    };
+  }
+  const run = command.run === null ? null : roundRun(command.run);
+  const corrected = draft('run.corrected', { runSeq: command.runSeq, run, reason: command.reason });
+  const drafts: EntryDraft[] = [corrected];
+  let after = evolveDraft(state, corrected, context);
+  const judged = run === null ? null : judgedDraft(after, command.runSeq);
+  if (judged !== null) {
+    drafts.push(judged);
+    after = evolveDraft(after, judged, context);
+  }
+  const withdrawn = Object.values(state.incidents).filter(
+    (incident) => incident.badSeqs.includes(command.runSeq) && after.incidents[incident.nerveId]?.badSeqs.length === 0,
+  );
+  for (const incident of withdrawn) {
+    drafts.push(draft('alert.withdrawn', { alertId: incident.alertId, runSeq: command.runSeq }));
+  }
+  return withdrawn.length > 0 || judged === null ? drafts : [...drafts, ...alertDrafts(state, after, command.runSeq)];
+}

@@ -1,0 +1,75 @@
+import { evolveAlert } from '@/lib/case/evolve/evolve-alert';
+import { evolveBaseline } from '@/lib/case/evolve/evolve-baseline';
+import { evolveCorrection } from '@/lib/case/evolve/evolve-correction';
+import { evolveJudgement } from '@/lib/case/evolve/evolve-judgement';
+import { evolvePlan } from '@/lib/case/evolve/evolve-plan';
+import { evolveRun } from '@/lib/case/evolve/evolve-run';
+import type { CaseState, KeptCondition, KeptStep } from '@/lib/case/case-state';
+import type { CaseEntry } from '@/lib/case/entry-bodies';
+
+/** Steps the state remembers: enough for every onset bracket, since older ones lie before the last good run. */
+const keptStepCount = 40;
+
+/**
+ * The state of a case after one more entry.
+ *
+ * Method: a pure copy of what the entry says; nothing is computed here that a limit is held against. The number
+ * and the hash are set by the caller, which knows them also for entries whose body it may not read.
+ *
+ * @param state state before the entry; not modified
+ * @param entry a committed entry of a known kind and version
+ * @returns the state after it
+ * @source house rule: a case is a fold over its entries
+ * @accuracy exact; tests/lib/case/evolve.test.ts
+ * @example
+ * evolve(state, entry).seq === entry.seq
+ */
+export function evolve(state: CaseState, entry: CaseEntry): CaseState {
+  return { ...evolveBody(state, entry), seq: entry.seq };
+}
+
+function evolveBody(state: CaseState, entry: CaseEntry): CaseState {
+  switch (entry.kind) {
+    case 'case.planned':
+    case 'plan.revised':
+    case 'distances.measured':
+      return evolvePlan(state, entry);
+    case 'case.opened':
+      return { ...state, status: 'open', phaseAt: entry.eventAt };
+    case 'timeout.confirmed':
+      return { ...state, timeoutAt: state.timeoutAt ?? entry.eventAt };
+    case 'phase.changed':
+      return { ...state, phase: entry.body.phase, phaseReason: entry.body.reason, phaseAt: entry.eventAt };
+    case 'run.logged':
+      return evolveRun(state, entry);
+    case 'run.judged':
+      return evolveJudgement(state, entry);
+    case 'run.corrected':
+      return evolveCorrection(state, entry);
+    case 'baseline.accepted':
+      return evolveBaseline(state, entry);
+    case 'condition.logged':
+      return { ...state, conditions: { ...state.conditions, [entry.body.condition.kind]: keptCondition(entry) } };
+    case 'step.logged':
+      return evolveStep(state, entry);
+    case 'case.closed':
+      return { ...state, status: 'closed', closedAt: entry.eventAt };
+    case 'message.sent':
+      return state;
+    default:
+      return evolveAlert(state, entry);
+  }
+}
+
+function keptCondition(entry: CaseEntry & { kind: 'condition.logged' }): KeptCondition {
+  return { seq: entry.seq, at: entry.eventAt, condition: entry.body.condition };
+}
+
+function evolveStep(state: CaseState, entry: CaseEntry & { kind: 'step.logged' }): CaseState {
+  const step: KeptStep = { seq: entry.seq, at: entry.eventAt, since: entry.body.since, isRisk: entry.body.isRisk };
+  const steps = [...state.steps, step].slice(-keptStepCount);
+  if (!entry.body.voidsDistances) return { ...state, steps };
+  const nerveIds = state.plan.nerves.filter((nerve) => nerve.role === 'at-risk').map((nerve) => nerve.id);
+  const voided = Object.fromEntries(nerveIds.map((id) => [id, entry.eventAt]));
+  return { ...state, steps, distancesVoidSince: { ...state.distancesVoidSince, ...voided } };
+}

@@ -1,0 +1,114 @@
+import type { CaseState, Incident } from '@/lib/case/case-state';
+import type { AlertEvidence, CaseEntry } from '@/lib/case/entry-bodies';
+
+type AlertEntry = CaseEntry & {
+  kind:
+    | 'notice.raised' | 'notice.settled' | 'alert.raised' | 'alert.worsened' | 'alert.located' | 'alert.recovered'
+    | 'alert.withdrawn' | 'alert.told' | 'alert.read-back' | 'alert.acted' | 'alert.ended';
+};
+
+/** Withdrawn alerts the state remembers; a wall names them for a minute. */
+const keptWithdrawn = 5;
+
+/** Opens, updates and ends the one incident of a nerve. @returns the state after it @source house rule: one alert per nerve */
+export function evolveAlert(state: CaseState, entry: AlertEntry): CaseState {
+  if (entry.kind === 'notice.raised') {
+    const count = (state.alertCounts[entry.body.nerveId] ?? 0) + 1;
+    return withIncident({ ...state, alertCounts: { ...state.alertCounts, [entry.body.nerveId]: count } }, opened(entry));
+  }
+  const incident = Object.values(state.incidents).find((open) => open.alertId === entry.body.alertId);
+  if (incident === undefined) return state;
+  switch (entry.kind) {
+    case 'notice.settled':
+    case 'alert.ended':
+      return withoutIncident(state, incident.nerveId);
+    case 'alert.withdrawn': {
+      const withdrawn = { alertId: incident.alertId, nerveId: incident.nerveId, at: entry.recordedAt };
+      return { ...withoutIncident(state, incident.nerveId), withdrawn: [...state.withdrawn, withdrawn].slice(-keptWithdrawn) };
+    }
+    default:
+      return withIncident(state, updated(incident, entry));
+  }
+}
+
+function opened(entry: CaseEntry & { kind: 'notice.raised' }): Incident {
+  return {
+    ...evidenceFields(entry.body),
+    alertId: entry.body.alertId,
+    nerveId: entry.body.nerveId,
+    level: 'notice',
+    isRepeated: false,
+    firstSeq: entry.body.runSeq,
+    badSeqs: [entry.body.runSeq],
+    firstBadAt: entry.body.firstBadAt,
+    raisedAt: entry.recordedAt,
+    repeatDueAt: entry.body.repeatDueAt,
+    toldAt: null,
+    toldPercentOfBaseline: null,
+    readBackAt: null,
+    actedAt: null,
+    action: null,
+    recoveredAt: null,
+  };
+}
+
+function evidenceFields(body: AlertEvidence) {
+  return {
+    finding: body.finding,
+    pathIds: body.pathIds,
+    worstPercentOfBaseline: body.worstPercentOfBaseline,
+    isLost: body.finding === 'response-lost',
+    location: body.location,
+    lastGoodAt: body.lastGoodAt,
+    stepsBetween: body.stepsBetween,
+  };
+}
+
+function updated(
+  incident: Incident,
+  entry: Exclude<AlertEntry, { kind: 'notice.raised' | 'notice.settled' | 'alert.ended' | 'alert.withdrawn' }>,
+): Incident {
+  switch (entry.kind) {
+    case 'alert.raised':
+      return {
+        ...incident,
+        ...evidenceFields(entry.body),
+        level: 'alert',
+        isRepeated: entry.body.isRepeated,
+        raisedAt: incident.level === 'alert' ? incident.raisedAt : entry.recordedAt,
+        repeatDueAt: null,
+        // What was told of the notice was not yet told of the alert.
+        toldAt: incident.level === 'alert' ? incident.toldAt : null,
+      };
+    case 'alert.worsened':
+      return {
+        ...incident,
+        ...evidenceFields(entry.body),
+        isLost: incident.isLost || entry.body.finding === 'response-lost',
+        toldAt: null,
+        readBackAt: null,
+        actedAt: null,
+        action: null,
+        recoveredAt: null,
+      };
+    case 'alert.located':
+      return { ...incident, location: entry.body.location };
+    case 'alert.recovered':
+      return { ...incident, recoveredAt: entry.eventAt };
+    case 'alert.told':
+      return { ...incident, toldAt: entry.eventAt, toldPercentOfBaseline: incident.worstPercentOfBaseline };
+    case 'alert.read-back':
+      return { ...incident, readBackAt: entry.eventAt };
+    case 'alert.acted':
+      return { ...incident, actedAt: entry.eventAt, action: entry.body.action };
+  }
+}
+
+function withIncident(state: CaseState, incident: Incident): CaseState {
+  return { ...state, incidents: { ...state.incidents, [incident.nerveId]: incident } };
+}
+
+function withoutIncident(state: CaseState, nerveId: string): CaseState {
+  const { [nerveId]: _ended, ...incidents } = state.incidents;
+  return { ...state, incidents };
+}

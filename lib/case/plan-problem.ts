@@ -1,0 +1,89 @@
+import type { Nerve } from '@/lib/alert/nerve-plan';
+import type { CasePlan } from '@/lib/case/plan';
+import { pathIdOf } from '@/lib/case/keys';
+
+/**
+ * What does not fit together in a plan, as a sentence.
+ * @param plan each field inside its bounds
+ * @returns the first problem found; null when the plan can be monitored
+ * @source house rule; a control path outside the operation is common practice and is asked for on the screen, not here
+ * @accuracy tests/lib/case/plan-problem.test.ts
+ * @example
+ * planProblem(plan) // => null
+ */
+export function planProblem(plan: CasePlan): string | null {
+  return idProblem(plan) ?? siteProblem(plan) ?? pathProblem(plan) ?? keyProblem(plan);
+}
+
+function twice(values: readonly string[]): string | null {
+  return values.find((value, index) => values.indexOf(value) !== index) ?? null;
+}
+
+function idProblem(plan: CasePlan): string | null {
+  const sites = plan.nerves.flatMap((nerve) => nerve.sites);
+  const lists: readonly (readonly [string, readonly string[]])[] = [
+    ['Nerve', plan.nerves.map((nerve) => nerve.id)],
+    ['Site', sites.map((site) => site.id)],
+    ['Channel', plan.channels.map((channel) => channel.id)],
+    ['Step', plan.steps.map((step) => step.id)],
+    ['Electrode', plan.electrodes.map((electrode) => electrode.id)],
+    ['Path', plan.paths.map((path) => path.id)],
+    ['Site name', plan.nerves.flatMap((nerve) => nerve.sites.map((site) => `${nerve.name} ${site.name}`))],
+  ];
+  for (const [noun, ids] of lists) {
+    const id = twice(ids);
+    if (id !== null) return `${noun} twice: ${id}. Each needs a name of its own`;
+  }
+  return null;
+}
+
+function siteProblem(plan: CasePlan): string | null {
+  for (const nerve of plan.nerves) {
+    const isRising = nerve.sites.every((site, index) => index === 0 || site.positionMm > (nerve.sites[index - 1]?.positionMm ?? 0));
+    if (!isRising) return `Sites of ${nerve.name} out of order: positions must rise from proximal to distal, in mm`;
+    const behind = plan.channels.find((channel) => channel.nerveId === nerve.id && channel.positionMm <= lastPosition(nerve));
+    if (behind !== undefined && behind.kind === 'muscle') {
+      return `Channel ${behind.name} at ${behind.positionMm} mm lies before the last site of ${nerve.name}: a muscle lies distal to every site`;
+    }
+  }
+  if (!plan.nerves.some((nerve) => nerve.role === 'at-risk')) return 'No nerve at risk: at least one nerve must be monitored';
+  return null;
+}
+
+function lastPosition(nerve: Nerve): number {
+  return nerve.sites.at(-1)?.positionMm ?? 0;
+}
+
+function pathProblem(plan: CasePlan): string | null {
+  for (const path of plan.paths) {
+    const nerve = plan.nerves.find((candidate) => candidate.id === path.nerveId);
+    if (nerve === undefined) return `Path ${path.id} names no nerve of the plan: ${path.nerveId}`;
+    if (!nerve.sites.some((site) => site.id === path.siteId)) return `Path ${path.id} names no site of ${nerve.name}: ${path.siteId}`;
+    if (!plan.channels.some((channel) => channel.id === path.channelId)) return `Path ${path.id} names no channel of the plan: ${path.channelId}`;
+    if (path.id !== pathIdOf(path.siteId, path.channelId)) return `Path ${path.id} must be called ${pathIdOf(path.siteId, path.channelId)}`;
+  }
+  for (const nerve of plan.nerves.filter((candidate) => candidate.role === 'at-risk')) {
+    if (!plan.paths.some((path) => path.nerveId === nerve.id && path.isRequired)) {
+      return `No required path on ${nerve.name}: without one nothing could ever be called stable`;
+    }
+  }
+  if (!plan.nerves.some((nerve) => nerve.sites.some((site) => site.id === plan.closingSiteId))) {
+    return `Closing site unknown: ${plan.closingSiteId} is no site of the plan`;
+  }
+  return null;
+}
+
+function keyProblem(plan: CasePlan): string | null {
+  const siteKeys = plan.nerves.flatMap((nerve) => nerve.sites.map((site) => site.hotkey)).filter((key) => key !== null);
+  const stepKeys = plan.steps.map((step) => step.hotkey).filter((key) => key !== null);
+  const key = twice(siteKeys) ?? twice(stepKeys);
+  if (key !== null) return `Key twice: ${key}. Each site and each step needs a key of its own, or none`;
+  const notDigit = siteKeys.find((siteKey) => !/^[0-9]$/.test(siteKey));
+  if (notDigit !== undefined) return `Key of a site must be a digit: ${notDigit}`;
+  const reserved = stepKeys.find((stepKey) => /^[0-9]$/.test(stepKey) || consoleKeys.includes(stepKey));
+  if (reserved !== undefined) return `Key of a step taken: ${reserved}. The console needs ${consoleKeys.join(', ')} and the digits`;
+  return null;
+}
+
+/** Letters of the console's own actions: no response, same settings, told, action, read back, end, conditions, messages. */
+export const consoleKeys: readonly string[] = ['n', 'r', 't', 'a', 'b', 'e', 'c', 'm', 'u', 's', 'p'];
