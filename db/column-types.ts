@@ -17,9 +17,10 @@ function readWhole(text: string): number {
 
 /** How PostgreSQL's types arrive in the program; bytea stays a Buffer and jsonb an object, as pg reads them. */
 export const columnTypes = {
-  getTypeParser(oid: number, format: 'text' | 'binary' = 'text'): (value: string) => unknown {
-    if (format === 'text' && oid === TIMESTAMPTZ) return readMoment;
-    if (format === 'text' && oid === INT8) return readWhole;
-    return pg.types.getTypeParser(oid, format) as (value: string) => unknown;
+  getTypeParser(oid: number, format: string = 'text'): (value: string) => unknown {
+    if (format === 'binary') return pg.types.getTypeParser(oid, 'binary');
+    if (oid === TIMESTAMPTZ) return readMoment;
+    if (oid === INT8) return readWhole;
+    return pg.types.getTypeParser(oid, 'text');
   },
 };
