@@ -5,7 +5,7 @@ import type { Readable } from 'node:stream';
 const largestBytes = 20_000_000;
 const warnLevel = 40;
 
-export type ServerLog = Readonly<{ follow: (output: Readable) => void }>;
+export type ServerLog = Readonly<{ follow: (output: Readable, isErrorOutput: boolean) => void }>;
 
 /** Keeps what the server says in a file of bounded size and repeats warnings and worse at the terminal. */
 export function openServerLog(file: string, terminal: (line: string) => void): ServerLog {
@@ -22,10 +22,10 @@ export function openServerLog(file: string, terminal: (line: string) => void): S
     stream.write(`${line}\n`);
   };
   return {
-    follow: (output) => {
+    follow: (output, isErrorOutput) => {
       createInterface({ input: output }).on('line', (line) => {
         write(line);
-        if (isWorthSaying(line)) terminal(line);
+        if (isWorthSaying(line, isErrorOutput)) terminal(line);
       });
     },
   };
@@ -35,8 +35,8 @@ function append(file: string): WriteStream {
   return createWriteStream(file, { flags: 'a', mode: 0o600 });
 }
 
-/** Anything that is not one of the logger's lines comes from outside it (a crash, a library) and is shown. */
-function isWorthSaying(line: string): boolean {
+/** Error output that is not one of the logger's lines comes from outside it (a crash, a library) and is shown. */
+function isWorthSaying(line: string, isErrorOutput: boolean): boolean {
   const level = /^\{"level":(\d+),/.exec(line)?.[1];
-  return line.trim() !== '' && (level === undefined || Number(level) >= warnLevel);
+  return level === undefined ? isErrorOutput && line.trim() !== '' : Number(level) >= warnLevel;
 }

@@ -16,7 +16,7 @@ export function startServing(order: ServingOrder): Promise<ServingProgram> {
   const lastLines: string[] = [];
   for (const output of [child.stdout, child.stderr]) {
     if (output === null) continue;
-    order.log.follow(output);
+    order.log.follow(output, output === child.stderr);
     output.on('data', (chunk: Buffer) => lastLines.push(...chunk.toString().split('\n').filter(Boolean)) > 20 && lastLines.splice(0, lastLines.length - 20));
   }
   return new Promise((resolve, reject) => {

@@ -24,7 +24,7 @@ export function reportFailure(error) {
   const known = error instanceof SetupFailure || (error instanceof Error && 'kind' in error && error.kind === 'settings');
   const message = error instanceof Error ? error.message : String(error);
   const sentence = known ? message : `Something unexpected went wrong: ${message || 'no reason was given'}`;
-  process.stderr.write(`\nFascicle: ${sentence.replace(/\s*\n\s*/g, ' ')}\n`);
+  process.stderr.write(`\n${sentence.replace(/\s*\n\s*/g, ' ')}\n`);
   if (['debug', 'trace'].includes(process.env.LOG_LEVEL ?? '') && error instanceof Error) process.stderr.write(`${error.stack ?? ''}\n`);
   if (error instanceof SetupFailure) return error.status;
   return known ? exitStatuses.wrongSetting : exitStatuses.unexpected;

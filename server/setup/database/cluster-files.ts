@@ -5,6 +5,7 @@ import { chooseFreePort } from '../free-port';
 import { runProgram, tellingLine } from '../run-program.mjs';
 import { SetupFailure } from '../setup-failure.mjs';
 import type { PostgresAccount } from './postgres-account';
+import { postgresEnvironment } from './postgres-environment';
 
 /** A private cluster on disk: its own port, chosen once, and its administrator's password. */
 export type ClusterFiles = Readonly<{ folder: string; clusterFolder: string; logFile: string; port: number; password: string }>;
@@ -46,7 +47,7 @@ async function initialise(files: ClusterFiles, programs: string, account: Postgr
   writeFileSync(passwordFile, files.password, { mode: 0o600 });
   for (const made of account === null ? [] : [unfinished, passwordFile]) chownSync(made, account?.uid ?? 0, account?.gid ?? 0);
   const words = ['-D', unfinished, '-U', 'postgres', `--pwfile=${passwordFile}`, '--auth=scram-sha-256', '--data-checksums', '--encoding=UTF8', '--locale=C.UTF-8'];
-  const { status, output } = await runProgram(path.join(programs, 'initdb'), words, { cwd: '/', env: { PATH: '/usr/bin:/bin', LC_ALL: 'C.UTF-8' }, ...account });
+  const { status, output } = await runProgram(path.join(programs, 'initdb'), words, { cwd: '/', env: postgresEnvironment, ...account });
   rmSync(passwordFile, { force: true });
   if (status !== 0) throw new SetupFailure('database', `The private database could not be created in ${files.folder}: ${tellingLine(output)}.`);
   chmodSync(unfinished, 0o700);

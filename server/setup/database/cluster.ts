@@ -9,6 +9,7 @@ import { ensureClusterFiles, writeClusterRecord, type ClusterFiles } from './clu
 import { answersQueries } from './answers-queries';
 import { findLeftPostmaster } from './left-postmaster';
 import type { PostgresAccount } from './postgres-account';
+import { postgresEnvironment } from './postgres-environment';
 
 export type Cluster = Readonly<{ pid: number; port: number; adminUrl: string; isRunning: () => boolean; stop: () => Promise<void>; kill9: () => Promise<void> }>;
 
@@ -39,7 +40,7 @@ function launchPostmaster(files: ClusterFiles, programs: string, account: Postgr
   if (existsSync(files.logFile) && statSync(files.logFile).size > largestLogBytes) renameSync(files.logFile, `${files.logFile}.1`);
   const log = openSync(files.logFile, 'a', 0o600);
   const words = ['-D', files.clusterFolder, '-p', String(files.port), '-c', 'listen_addresses=127.0.0.1', '-c', 'unix_socket_directories=', '-c', 'logging_collector=off', '-c', 'log_line_prefix=%m [%p] '];
-  const child = spawn(path.join(programs, 'postgres'), words, { cwd: '/', env: { PATH: '/usr/bin:/bin', LC_ALL: 'C.UTF-8' }, stdio: ['ignore', log, log], detached: true, ...account });
+  const child = spawn(path.join(programs, 'postgres'), words, { cwd: '/', env: postgresEnvironment, stdio: ['ignore', log, log], detached: true, ...account });
   closeSync(log);
   child.on('error', () => undefined);
   child.unref();
