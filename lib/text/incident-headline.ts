@@ -1,0 +1,49 @@
+import type { CaseState, Incident } from '@/lib/case/case-state';
+import { metresPerSecond, milliseconds, percent } from '@/lib/text/format';
+
+/** % of baseline that the paths of an incident show now: the lowest newest comparable run. @returns % or null @source house rule */
+export function percentNow(state: CaseState, incident: Incident): number | null {
+  const percents = incident.pathIds
+    .map((pathId) => state.paths[pathId]?.compared?.change.percentOfBaseline ?? null)
+    .filter((value) => value !== null);
+  return percents.length === 0 ? incident.worstPercentOfBaseline : Math.min(...percents);
+}
+
+/**
+ * The one sentence of a notice or alert: which nerve, what changed, how much.
+ * @returns "Ulnar at 38 % of baseline", "No ulnar response", "Ulnar slower, 31 m/s"
+ * @source house rule: one number for one fact; amplitude as % of baseline
+ * @accuracy whole percent; tests/lib/text/theatre-view.test.ts
+ */
+export function incidentHeadline(state: CaseState, incident: Incident): string {
+  const name = state.plan.nerves.find((nerve) => nerve.id === incident.nerveId)?.name ?? incident.nerveId;
+  const now = percentNow(state, incident);
+  if (incident.recoveredAt !== null) return now === null ? `${name} back inside its limits` : `${name} back at ${percent(now)} of baseline`;
+  if (now !== null && now < state.plan.rules.lostBelowPercent) return `No ${name.toLowerCase()} response`;
+  switch (incident.finding) {
+    case 'segment-slowed':
+      return slowedHeadline(state, incident, name);
+    case 'onset-late':
+      return lateHeadline(state, incident, name);
+    case 'threshold-rise':
+      return `${name} needs more current`;
+    case 'ratio-fall':
+      return `${name} lower proximally`;
+    default:
+      return now === null ? `${name} changed` : `${name} at ${percent(now)} of baseline`;
+  }
+}
+
+function slowedHeadline(state: CaseState, incident: Incident, name: string): string {
+  const slowed = Object.values(state.segments).find(
+    (segment) => segment.nerveId === incident.nerveId && segment.findings.some((finding) => finding.kind === 'segment-slowed'),
+  );
+  return slowed?.velocity.kind === 'velocity' ? `${name} slower, ${metresPerSecond(slowed.velocity.velocityMps)}` : `${name} slower`;
+}
+
+function lateHeadline(state: CaseState, incident: Incident, name: string): string {
+  const delays = incident.pathIds
+    .map((pathId) => state.paths[pathId]?.compared?.change.onsetChangeMs ?? null)
+    .filter((value) => value !== null);
+  return delays.length === 0 ? `${name} later` : `${name} later by ${milliseconds(Math.max(...delays))}`;
+}
