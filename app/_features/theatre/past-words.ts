@@ -1,0 +1,15 @@
+import type { TheatreLine } from '@/lib/text/theatre-line';
+
+const openWords = { high: 'Alert was open', medium: 'Notice was open', low: 'Watch was open' } as const;
+
+/** The last known state in the past tense: what was open stays named as open then, everything else as what was shown. */
+export function pastHeadline(line: TheatreLine): string {
+  const words = line.headline.charAt(0).toLowerCase() + line.headline.slice(1);
+  const isOpen = line.kind === 'alert' || line.kind === 'notice' || line.kind === 'watch';
+  return isOpen && line.priority !== null ? `${openWords[line.priority]}: ${words}` : `Shown then: ${words}`;
+}
+
+/** Whether the line keeps its mark and its size while the screen is not live: an open alert or notice does. */
+export function staysLarge(line: TheatreLine): boolean {
+  return line.priority === 'high' || line.priority === 'medium';
+}

@@ -1,0 +1,61 @@
+import type { Nerve, Site } from '@/lib/alert/nerve-plan';
+import type { CaseState, PathRecord } from '@/lib/case/case-state';
+import { pathIdOf } from '@/lib/case/keys';
+import { brokenText } from '@/lib/chart/broken-text';
+import { findingPriority } from '@/lib/chart/finding-priority';
+import type { NerveLineSegment } from '@/lib/chart/nerve-line';
+import { siteShare } from '@/lib/chart/site-share';
+import { testedSince } from '@/lib/chart/tested-since';
+import { milliseconds } from '@/lib/text/format';
+
+/**
+ * From the most distal site to the channel: there is no response from further on, so the segment carries the whole
+ * response of its site, and a latency in place of a velocity.
+ *
+ * Method: amplitude share is the site's own share; the velocity share is baseline onset over onset now. The onset holds
+ * the time across the muscle's end plates too, so it is no velocity and is not shown as one.
+ *
+ * @param state the case; not modified
+ * @param nerve the nerve of the site
+ * @param site its most distal site
+ * @param channelId the channel the line is drawn from
+ * @param endMm position of the channel in mm
+ * @returns the segment with the onset in ms as its text
+ * @source common practice (distal latency)
+ * @accuracy tests/lib/chart/nerve-line-view.test.ts
+ * @example
+ * distalSegment(state, nerve, wrist, 'adm', 530).text // => '2.90 ms'
+ */
+export function distalSegment(state: CaseState, nerve: Nerve, site: Site, channelId: string, endMm: number): NerveLineSegment {
+  const record = state.paths[pathIdOf(site.id, channelId)];
+  const isUntested = record?.compared == null || record.compared.at < testedSince(state, nerve.id);
+  const share = siteShare(record);
+  const isBroken = !isUntested && share === 0;
+  const onset = onsetText(record);
+  return {
+    key: `${channelId}|${site.id}|end`,
+    fromMm: site.positionMm,
+    toMm: endMm,
+    amplitudeShare: share,
+    velocityShare: onsetShare(record),
+    ...(isBroken ? brokenText(record) : { text: onset, shortText: onset }),
+    priority: findingPriority(record?.compared?.findings ?? [], state.incidents[nerve.id]),
+    isUntested,
+    isBroken,
+    isShort: false,
+  };
+}
+
+function onsetText(record: PathRecord | undefined): string {
+  const reading = record?.compared?.reading ?? record?.lastReading;
+  if (reading === undefined) return 'not tested';
+  if (reading.kind === 'absent') return 'no response';
+  return reading.kind === 'measured' && reading.onsetMs !== null ? milliseconds(reading.onsetMs) : 'not read';
+}
+
+function onsetShare(record: PathRecord | undefined): number | null {
+  const compared = record?.compared ?? null;
+  if (compared?.reading.kind !== 'measured' || compared.reading.onsetMs === null || compared.change.onsetChangeMs === null) return null;
+  const share = (compared.reading.onsetMs - compared.change.onsetChangeMs) / compared.reading.onsetMs;
+  return share > 0 ? share : null;
+}

@@ -1,0 +1,104 @@
+import type { NerveLineView } from '@/lib/chart/nerve-line';
+import type { NerveLineSizes } from '@/lib/chart/nerve-line-sizes';
+import { packLabels } from '@/lib/chart/pack-labels';
+import type { Shape, Tone } from '@/lib/chart/scene';
+import { shortenText } from '@/lib/chart/shorten-text';
+import { textWidth } from '@/lib/chart/text-width';
+import { toneOf } from '@/lib/chart/tone-of';
+import { wrapName } from '@/lib/chart/wrap-name';
+
+/** One block above the line: a name of one or two lines, and the response under it. */
+interface Block {
+  readonly key: string;
+  readonly x: number;
+  readonly nameLines: readonly string[];
+  readonly value: string;
+  readonly tone: Tone;
+  readonly isQuiet: boolean;
+  readonly widthPx: number;
+}
+
+/** The blocks above the line, drawn upwards from 0, and the height they take. */
+export interface SiteLabels {
+  readonly shapes: readonly Shape[];
+  readonly heightPx: number;
+}
+
+/**
+ * Names and responses above the nerve, none over another.
+ *
+ * Method: full names in one row; else names on two lines; else two rows; else names cut to the width of the responses
+ * and as many rows as it takes. A response is never cut or left out. Blocks away from their site get a leader.
+ *
+ * @param view the nerve line; not modified
+ * @param sizes its lengths
+ * @param toX from mm to px
+ * @returns shapes with y = 0 at the top edge of the line and upwards negative, and the height in px
+ * @source house rule
+ * @accuracy tests/lib/chart/nerve-line-scene.test.ts (property test)
+ * @example
+ * siteLabels(view, sizes, lineScale(view, sizes)).heightPx
+ */
+export function siteLabels(view: NerveLineView, sizes: NerveLineSizes, toX: (positionMm: number) => number): SiteLabels {
+  const single = blocksOf(view, sizes, toX, (name) => [name]);
+  const wrapped = blocksOf(view, sizes, toX, wrapName);
+  const cut = blocksOf(view, sizes, toX, (name, valueWidthPx) => [shortenText(name, sizes.textPx, Math.max(valueWidthPx, sizes.textPx * 4))]);
+  const tries = [[single, 1], [wrapped, 1], [single, 2], [wrapped, 2], [cut, Infinity]] as const;
+  for (const [blocks, mostRows] of tries) {
+    const placed = packLabels(blocks.map((block) => ({ centrePx: block.x, widthPx: block.widthPx })), sizes.widthPx, sizes.labelGapPx, mostRows);
+    const fits = blocks.every((block) => block.widthPx <= sizes.widthPx) || mostRows === Infinity;
+    if (placed !== null && fits) return draw(blocks, placed, sizes);
+  }
+  return { shapes: [], heightPx: 0 };
+}
+
+function blocksOf(
+  view: NerveLineView,
+  sizes: NerveLineSizes,
+  toX: (positionMm: number) => number,
+  linesOf: (name: string, valueWidthPx: number) => readonly string[],
+): readonly Block[] {
+  const block = (key: string, positionMm: number, name: string, value: string, tone: Tone, isQuiet: boolean): Block => {
+    const valueWidthPx = textWidth(value, sizes.valuePx, true);
+    const nameLines = linesOf(name, valueWidthPx);
+    const widthPx = Math.max(valueWidthPx, ...nameLines.map((line) => textWidth(line, sizes.textPx, false)));
+    return { key, x: toX(positionMm), nameLines, value, tone, isQuiet, widthPx };
+  };
+  const sites = view.sites.map((site) =>
+    block(site.siteId, site.positionMm, site.name, site.text, toneOf(site.priority, site.isDim ? 'second' : 'ink'), site.isDim),
+  );
+  return view.end === null ? sites : [...sites, block('end', view.end.positionMm, view.end.caption, view.end.name, 'second', true)];
+}
+
+function draw(blocks: readonly Block[], placed: readonly { readonly row: number; readonly centrePx: number }[], sizes: NerveLineSizes): SiteLabels {
+  const nameRows = Math.max(...blocks.map((block) => block.nameLines.length), 1);
+  const rowHeightPx = nameRows * sizes.lineHeightPx + sizes.valuePx * 1.1;
+  const clearPx = sizes.textPx * 0.5;
+  const rows = Math.max(...placed.map((place) => place.row), 0) + 1;
+  const shapes = blocks.flatMap((block, index) => {
+    const place = placed[index]!;
+    const valueY = -clearPx - place.row * rowHeightPx;
+    const value: Shape = { kind: 'text', key: `value-${block.key}`, role: 'response', tone: block.tone, x: place.centrePx, y: valueY, sizePx: sizes.valuePx, widthPx: textWidth(block.value, sizes.valuePx, true), isMono: true, isBold: true, text: block.value };
+    const names = block.nameLines.map<Shape>((line, lineIndex) => ({
+      kind: 'text', key: `name-${block.key}-${lineIndex}`, role: 'site', tone: 'second', x: place.centrePx,
+      y: valueY - sizes.valuePx * 1.05 - (block.nameLines.length - 1 - lineIndex) * sizes.lineHeightPx,
+      sizePx: sizes.textPx, widthPx: textWidth(line, sizes.textPx, false), isMono: false, isBold: false, text: line,
+    }));
+    return place.row === 0 ? [value, ...names] : [...leader(block, place, placed, blocks, valueY, sizes), value, ...names];
+  });
+  return { shapes, heightPx: clearPx + rows * rowHeightPx };
+}
+
+function leader(
+  block: Block,
+  place: { readonly row: number; readonly centrePx: number },
+  placed: readonly { readonly row: number; readonly centrePx: number }[],
+  blocks: readonly Block[],
+  valueY: number,
+  sizes: NerveLineSizes,
+): readonly Shape[] {
+  const x = Math.min(Math.max(block.x, place.centrePx - block.widthPx / 2), place.centrePx + block.widthPx / 2);
+  const crosses = placed.some((other, index) => other.row < place.row && Math.abs(other.centrePx - x) < blocks[index]!.widthPx / 2 + 2);
+  if (crosses) return [];
+  return [{ kind: 'line', key: `leader-${block.key}`, role: 'leader', tone: 'rule', x1: x, y1: valueY + sizes.textPx * 0.3, x2: x, y2: -2, widthPx: Math.max(1, sizes.textPx / 14), dashPx: null }];
+}

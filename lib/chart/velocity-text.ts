@@ -1,0 +1,38 @@
+import type { NoVelocityReason, SegmentJudgement } from '@/lib/alert/judgement';
+import { metresPerSecond } from '@/lib/text/format';
+
+/** The words of a segment, and the same where there is little room. */
+export interface SegmentText {
+  readonly text: string;
+  readonly shortText: string;
+}
+
+const reasons: Record<NoVelocityReason, SegmentText> = {
+  'partner-not-tested': { text: 'not tested', shortText: 'not tested' },
+  'spans-risk-step': { text: 'no fresh pair', shortText: 'no pair' },
+  'distances-not-measured': { text: 'distance not measured', shortText: 'no mm' },
+  'onset-not-read': { text: 'onset not read', shortText: 'no onset' },
+  'no-response': { text: 'no response', shortText: 'none' },
+  'latencies-exchanged': { text: 'latencies exchanged', shortText: 'check ms' },
+  'latencies-equal': { text: 'latencies equal', shortText: 'check ms' },
+};
+
+/**
+ * What stands under a segment: its velocity, marked when short, else why there is none.
+ *
+ * Method: copies the judgement. A short segment says so, because its velocity carries a large error; the error itself
+ * is in the log.
+ *
+ * @param segment the newest judgement of the segment; undefined before the first pair
+ * @returns text and short text
+ * @source product rule: under 80 mm marked short, "not computable" with its reason
+ * @accuracy tests/lib/chart/velocity-text.test.ts
+ * @example
+ * velocityText(undefined).text // => 'not tested'
+ */
+export function velocityText(segment: SegmentJudgement | undefined): SegmentText {
+  if (segment === undefined) return reasons['partner-not-tested'];
+  if (segment.velocity.kind === 'not-computable') return reasons[segment.velocity.reason];
+  const velocity = metresPerSecond(segment.velocity.velocityMps);
+  return segment.velocity.isShort ? { text: `${velocity}, short`, shortText: `${velocity}, short` } : { text: velocity, shortText: velocity };
+}
