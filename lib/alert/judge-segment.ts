@@ -95,8 +95,8 @@ function velocityOf(input: SegmentPairInput): SegmentJudgement['velocity'] {
   }
   return {
     kind: 'velocity',
-    velocityMps: result.velocityMps,
-    standardErrorMps: result.standardErrorMps,
+    velocityMps: roundTo(result.velocityMps, resolutions.velocityMps),
+    standardErrorMps: roundTo(result.standardErrorMps, resolutions.velocityMps),
     distanceMm: result.distanceMm,
     isShort: result.isShort,
     isImplausible: result.plausibility !== 'plausible',

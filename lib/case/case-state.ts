@@ -58,6 +58,10 @@ export interface Incident {
   readonly firstSeq: number;
   /** Numbers of the runs that were past a limit since the first, at most 50. */
   readonly badSeqs: readonly number[];
+  /** Every path that was past a limit since the first, also those not named in the evidence. */
+  readonly badPathIds: readonly string[];
+  /** Runs from this number on say where the change lies: the first abnormal one, or the one it returned with. */
+  readonly locateFromSeq: number;
   readonly firstBadAt: string;
   readonly raisedAt: string;
   readonly repeatDueAt: string | null;

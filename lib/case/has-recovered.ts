@@ -5,7 +5,7 @@ import { isAbnormal } from '@/lib/case/is-abnormal';
 /**
  * Whether every path of a notice or alert is back inside its limit with the margin.
  *
- * Method: each path named in the evidence needs its newest `runsNeeded` comparable runs, all made after the first
+ * Method: each path that was past a limit needs its newest `runsNeeded` comparable runs, all made after the first
  * abnormal one, inside the limit plus margin; no other path of the nerve tested since may be past a limit.
  *
  * @param runsNeeded 1 settles a notice, 2 shows the recovery of an alert
@@ -18,7 +18,7 @@ import { isAbnormal } from '@/lib/case/is-abnormal';
 export function hasRecovered(state: CaseState, nerve: Nerve, incident: Incident, runsNeeded: 1 | 2): boolean {
   const isBack = (record: ComparedRecord | null | undefined) =>
     record !== null && record !== undefined && record.seq > incident.firstSeq && isInside(state, record);
-  const evidenceIsBack = incident.pathIds.every((pathId) => {
+  const evidenceIsBack = incident.badPathIds.every((pathId) => {
     const record = state.paths[pathId];
     return isBack(record?.compared) && (runsNeeded === 1 || isBack(record?.previous));
   });

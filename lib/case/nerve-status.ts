@@ -12,7 +12,7 @@ export interface NerveStatus {
   readonly freshSiteCount: number;
   readonly untestedSiteIds: readonly string[];
   readonly lastRiskStep: KeptStep | null;
-  readonly isEverCompared: boolean;
+  readonly isEverySiteCompared: boolean;
   readonly newestComparedAt: string | null;
   readonly oldestComparedAt: string | null;
   readonly lowest: { readonly percentOfBaseline: number; readonly at: string; readonly siteId: string } | null;
@@ -55,7 +55,7 @@ export function nerveStatus(state: CaseState, nerve: Nerve, nowMs: number): Nerv
     freshSiteCount: siteIds.length - untestedSiteIds.length,
     untestedSiteIds,
     lastRiskStep,
-    isEverCompared: compared.length > 0,
+    isEverySiteCompared: compared.length === required.length,
     newestComparedAt: times.at(-1) ?? null,
     oldestComparedAt: times[0] ?? null,
     lowest: lowestOf(state, required),

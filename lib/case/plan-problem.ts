@@ -1,6 +1,7 @@
 import type { Nerve } from '@/lib/alert/nerve-plan';
 import type { CasePlan } from '@/lib/case/plan';
 import { pathIdOf } from '@/lib/case/keys';
+import { consoleKeys, isConsoleKey } from '@/lib/reference/templates/console-keys';
 
 /**
  * What does not fit together in a plan, as a sentence.
@@ -80,10 +81,7 @@ function keyProblem(plan: CasePlan): string | null {
   if (key !== null) return `Key twice: ${key}. Each site and each step needs a key of its own, or none`;
   const notDigit = siteKeys.find((siteKey) => !/^[0-9]$/.test(siteKey));
   if (notDigit !== undefined) return `Key of a site must be a digit: ${notDigit}`;
-  const reserved = stepKeys.find((stepKey) => /^[0-9]$/.test(stepKey) || consoleKeys.includes(stepKey));
-  if (reserved !== undefined) return `Key of a step taken: ${reserved}. The console needs ${consoleKeys.join(', ')} and the digits`;
+  const reserved = stepKeys.find((stepKey) => /^[0-9]$/.test(stepKey) || isConsoleKey(stepKey));
+  if (reserved !== undefined) return `Key of a step taken: ${reserved}. The console needs ${Object.keys(consoleKeys).join(', ')} and the digits`;
   return null;
 }
-
-/** Letters of the console's own actions: no response, same settings, told, action, read back, end, conditions, messages. */
-export const consoleKeys: readonly string[] = ['n', 'r', 't', 'a', 'b', 'e', 'c', 'm', 'u', 's', 'p'];

@@ -3,7 +3,7 @@ import { metresPerSecond, milliseconds, percent } from '@/lib/text/format';
 
 /** % of baseline that the paths of an incident show now: the lowest newest comparable run. @returns % or null @source house rule */
 export function percentNow(state: CaseState, incident: Incident): number | null {
-  const percents = incident.pathIds
+  const percents = incident.badPathIds
     .map((pathId) => state.paths[pathId]?.compared?.change.percentOfBaseline ?? null)
     .filter((value) => value !== null);
   return percents.length === 0 ? incident.worstPercentOfBaseline : Math.min(...percents);

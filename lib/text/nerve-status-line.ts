@@ -72,9 +72,9 @@ function notTestedWords(state: CaseState, status: NerveStatus, nowMs: number, ti
     return [`${siteCount(status.freshSiteCount, status)} tested since ${step.since}`, `${upper(step.since)} ${since}. ${before}`];
   }
   if (status.oldestComparedAt === null || status.newestComparedAt === null) {
-    if (status.isEverCompared) return [`${siteCount(status.freshSiteCount, status)} tested`, before];
     return ['Not tested since baseline', `Baseline at ${siteCount(status.baselineSiteCount, status)}.`];
   }
+  if (!status.isEverySiteCompared) return [`${siteCount(status.freshSiteCount, status)} tested since baseline`, before];
   const age = durationWords(nowMs - msOfMoment(status.oldestComparedAt));
   if (status.freshSiteCount === 0) return [`Not tested for ${durationWords(nowMs - msOfMoment(status.newestComparedAt))}`, before];
   const limit = `${state.plan.rules.freshnessMinutes} min`;

@@ -7,6 +7,7 @@ import { repeatDueAt } from '@/lib/case/decide/repeat-due-at';
 import { worseningOf } from '@/lib/case/decide/worsening-of';
 import type { EntryDraft } from '@/lib/case/entry-bodies';
 import { hasRecovered } from '@/lib/case/has-recovered';
+import { isComingBack } from '@/lib/case/is-coming-back';
 import { locateInCase } from '@/lib/case/locate-in-case';
 
 /**
@@ -64,14 +65,15 @@ function insideLimits(after: CaseState, nerve: Nerve, incident: Incident, runSeq
 }
 
 function located(after: CaseState, nerve: Nerve, incident: Incident, runSeq: number): readonly EntryDraft[] {
-  const location = locateInCase(after, nerve, incident.firstSeq);
-  // A recovered nerve has nothing abnormal left to locate; what was found stays.
+  // A path that came back says that the nerve recovers, not that the change moved: what was found stays.
+  if (isComingBack(after, incident)) return [];
+  const location = locateInCase(after, nerve, incident.locateFromSeq);
   if (location === null || JSON.stringify(location) === JSON.stringify(incident.location)) return [];
   return [draft('alert.located', { alertId: incident.alertId, runSeq, location })];
 }
 
 function lowestPercent(after: CaseState, incident: Incident): number | null {
-  const percents = incident.pathIds
+  const percents = incident.badPathIds
     .map((pathId) => after.paths[pathId]?.compared?.change.percentOfBaseline ?? null)
     .filter((percent) => percent !== null);
   return percents.length === 0 ? null : Math.min(...percents);

@@ -1,8 +1,9 @@
-import { judgeVersion } from '@/lib/alert/judgement';
+import { judgeVersion, type Location } from '@/lib/alert/judgement';
 import type { Nerve } from '@/lib/alert/nerve-plan';
 import type { CaseState, Incident } from '@/lib/case/case-state';
 import type { AbnormalRun } from '@/lib/case/decide/abnormal-of';
 import type { AlertEvidence } from '@/lib/case/entry-bodies';
+import { isComingBack } from '@/lib/case/is-coming-back';
 import { locateInCase } from '@/lib/case/locate-in-case';
 
 /**
@@ -20,9 +21,8 @@ export function evidenceOf(
   open: { readonly alertId: string; readonly incident: Incident | null },
 ): AlertEvidence {
   const { incident } = open;
-  const firstSeq = incident?.firstSeq ?? abnormal.runSeq;
   const pathIds = [...new Set([...(incident?.pathIds ?? []), ...abnormal.pathIds])];
-  const location = locateInCase(state, nerve, firstSeq) ?? incident?.location ?? { kind: 'not-known', nextSiteId: null };
+  const location = locationOf(state, nerve, abnormal, incident);
   const shared = {
     alertId: open.alertId,
     nerveId: nerve.id,
@@ -42,6 +42,13 @@ export function evidenceOf(
     .filter((step) => step.at <= abnormal.at && (lastGoodAt === null || step.at > lastGoodAt))
     .map((step) => step.since);
   return { ...shared, lastGoodAt, firstBadAt: abnormal.at, stepsBetween };
+}
+
+function locationOf(state: CaseState, nerve: Nerve, abnormal: AbnormalRun, incident: Incident | null): Location {
+  const unknown: Location = { kind: 'not-known', nextSiteId: null };
+  if (incident === null || incident.recoveredAt !== null) return locateInCase(state, nerve, abnormal.runSeq) ?? unknown;
+  if (isComingBack(state, incident)) return incident.location;
+  return locateInCase(state, nerve, incident.locateFromSeq) ?? incident.location;
 }
 
 function lastGood(state: CaseState, pathIds: readonly string[]): string | null {

@@ -2,7 +2,7 @@ import type { PathJudgement } from '@/lib/alert/judgement';
 import type { CaseState, ComparedRecord, Incident, KeptRun, PathRecord } from '@/lib/case/case-state';
 import type { CaseEntry, EntryBodies } from '@/lib/case/entry-bodies';
 import { isAbnormal } from '@/lib/case/is-abnormal';
-import { segmentKey } from '@/lib/case/keys';
+import { pathIdOf, segmentKey } from '@/lib/case/keys';
 import type { Reading } from '@/lib/response/reading';
 
 /** Numbers of abnormal runs an incident remembers. */
@@ -73,18 +73,25 @@ function incidentsAfter(state: CaseState, judged: EntryBodies['run.judged'], kep
   for (const incident of Object.values(state.incidents)) {
     const nerve = state.plan.nerves.find((candidate) => candidate.id === incident.nerveId);
     if (nerve === undefined || !nerve.sites.some((site) => site.id === kept.run.siteId)) continue;
-    const isBad =
-      judged.paths.some((path) => path.kind === 'compared' && isAbnormal(path.findings)) ||
-      judged.segments.some((segment) => isAbnormal(segment.findings));
+    const badPathIds = badPathsOf(judged, kept);
     const others = incident.badSeqs.filter((seq) => seq !== kept.seq);
     const isRepeat = kept.seq > incident.firstSeq && judged.paths.some((path) => isRepeatOf(incident, path));
     incidents[incident.nerveId] = {
       ...incident,
-      badSeqs: isBad ? [...others, kept.seq].slice(-keptBadSeqs) : others,
+      badSeqs: badPathIds.length > 0 ? [...others, kept.seq].slice(-keptBadSeqs) : others,
+      badPathIds: [...new Set([...incident.badPathIds, ...badPathIds])],
       repeatDueAt: isRepeat ? null : incident.repeatDueAt,
     };
   }
   return incidents;
+}
+
+function badPathsOf(judged: EntryBodies['run.judged'], kept: KeptRun): readonly string[] {
+  const ofPaths = judged.paths.filter((path) => path.kind === 'compared' && isAbnormal(path.findings)).map((path) => path.pathId);
+  const ofSegments = judged.segments
+    .filter((segment) => isAbnormal(segment.findings))
+    .map((segment) => pathIdOf(kept.run.siteId, segment.channelId));
+  return [...ofPaths, ...ofSegments];
 }
 
 function isRepeatOf(incident: Incident, path: PathJudgement): boolean {
