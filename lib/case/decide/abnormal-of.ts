@@ -1,4 +1,4 @@
-import type { Finding, FindingKind } from '@/lib/alert/judgement';
+import type { Finding, FindingKind, SegmentJudgement } from '@/lib/alert/judgement';
 import type { Nerve } from '@/lib/alert/nerve-plan';
 import { worstFinding } from '@/lib/alert/worst-finding';
 import type { CaseState, KeptRun } from '@/lib/case/case-state';
@@ -14,6 +14,8 @@ export interface AbnormalRun {
   readonly finding: FindingKind;
   readonly mayBecomeAlert: boolean;
   readonly worstPercentOfBaseline: number | null;
+  /** False when only a segment is past its limit whose proximal end was run earlier: such a run cannot confirm. */
+  readonly isOwnEvidence: boolean;
 }
 
 /**
@@ -28,16 +30,26 @@ export function abnormalOf(state: CaseState, nerve: Nerve, kept: KeptRun): Abnor
   const pathIds: string[] = [];
   const findings: Finding[] = [];
   const percents: number[] = [];
+  let isOwnEvidence = false;
   for (const { channelId } of kept.run.readings) {
     const pathId = pathIdOf(kept.run.siteId, channelId);
     const record = recordOfRun(state, pathId, kept.seq);
     const ofPath = record === null ? [] : record.findings;
-    const ofSegments = segmentFindings(state, nerve, channelId, kept);
-    if (!isAbnormal([...ofPath, ...ofSegments])) continue;
-    pathIds.push(pathId);
-    findings.push(...ofPath, ...ofSegments);
-    const percent = record?.change.percentOfBaseline ?? null;
-    if (percent !== null) percents.push(percent);
+    const ofProximal = segmentsOf(state, nerve, channelId).filter((segment) => isEnd(segment.proximalSiteId, segment.proximalAt, kept));
+    const own = [...ofPath, ...ofProximal.flatMap((segment) => segment.findings)];
+    if (isAbnormal(own)) {
+      isOwnEvidence = true;
+      pathIds.push(pathId);
+      findings.push(...own);
+      const percent = record?.change.percentOfBaseline ?? null;
+      if (percent !== null) percents.push(percent);
+    }
+    for (const segment of segmentsOf(state, nerve, channelId)) {
+      if (!isEnd(segment.distalSiteId, segment.distalAt, kept) || !isAbnormal(segment.findings)) continue;
+      // What is slow or weak across a segment shows in the response from its proximal end.
+      pathIds.push(pathIdOf(segment.proximalSiteId, channelId));
+      findings.push(...segment.findings);
+    }
   }
   const worst = worstFinding(findings);
   if (worst === null) return null;
@@ -45,10 +57,11 @@ export function abnormalOf(state: CaseState, nerve: Nerve, kept: KeptRun): Abnor
     runSeq: kept.seq,
     at: kept.at,
     siteId: kept.run.siteId,
-    pathIds,
+    pathIds: [...new Set(pathIds)],
     finding: worst.kind,
     mayBecomeAlert: findings.some((finding) => finding.mayBecomeAlert),
     worstPercentOfBaseline: percents.length === 0 ? null : Math.min(...percents),
+    isOwnEvidence,
   };
 }
 
@@ -58,11 +71,8 @@ function recordOfRun(state: CaseState, pathId: string, runSeq: number) {
   return record?.previous?.seq === runSeq ? record.previous : null;
 }
 
-function segmentFindings(state: CaseState, nerve: Nerve, channelId: string, kept: KeptRun): readonly Finding[] {
-  return Object.values(state.segments)
-    .filter((segment) => segment.nerveId === nerve.id && segment.channelId === channelId)
-    .filter((segment) => isEnd(segment.proximalSiteId, segment.proximalAt, kept) || isEnd(segment.distalSiteId, segment.distalAt, kept))
-    .flatMap((segment) => segment.findings);
+function segmentsOf(state: CaseState, nerve: Nerve, channelId: string): readonly SegmentJudgement[] {
+  return Object.values(state.segments).filter((segment) => segment.nerveId === nerve.id && segment.channelId === channelId);
 }
 
 function isEnd(siteId: string, at: string, kept: KeptRun): boolean {

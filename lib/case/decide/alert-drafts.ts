@@ -30,7 +30,7 @@ export function alertDrafts(before: CaseState, after: CaseState, runSeq: number)
   const abnormal = abnormalOf(after, nerve, kept);
   const incident = before.incidents[nerve.id];
   if (incident === undefined) return abnormal === null ? [] : [notice(after, nerve, abnormal)];
-  if (abnormal !== null) return abnormalAgain(after, nerve, incident, abnormal);
+  if (abnormal !== null && abnormal.isOwnEvidence) return abnormalAgain(after, nerve, incident, abnormal);
   return insideLimits(after, nerve, incident, runSeq);
 }
 

@@ -89,7 +89,7 @@ function incidentsAfter(state: CaseState, judged: EntryBodies['run.judged'], kep
 function badPathsOf(judged: EntryBodies['run.judged'], kept: KeptRun): readonly string[] {
   const ofPaths = judged.paths.filter((path) => path.kind === 'compared' && isAbnormal(path.findings)).map((path) => path.pathId);
   const ofSegments = judged.segments
-    .filter((segment) => isAbnormal(segment.findings))
+    .filter((segment) => segment.proximalSiteId === kept.run.siteId && isAbnormal(segment.findings))
     .map((segment) => pathIdOf(kept.run.siteId, segment.channelId));
   return [...ofPaths, ...ofSegments];
 }
