@@ -1,5 +1,3 @@
-import { existsSync } from 'node:fs';
-import path from 'node:path';
 import { parseSettings, type Settings } from '@/server/settings/settings';
 import { buildWhenChanged } from './build';
 import { buildFolders } from './build-folders';
@@ -56,5 +54,5 @@ async function readyDatabase(root: string, settings: Settings, adminUrl: string,
     return lacks;
   });
   await step('tables', () => migrateDatabase(root, adminUrl));
-  if (settings.demo && existsSync(path.join(root, 'db/seeds/seed-demo.ts'))) await step('demo', () => seedWhenEmpty(settings, adminUrl));
+  if (settings.demo) await step('demo', () => seedWhenEmpty(adminUrl));
 }

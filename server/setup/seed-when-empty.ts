@@ -1,17 +1,15 @@
-import knex from 'knex';
-import path from 'node:path';
-import type { Settings } from '@/server/settings/settings';
+import { makePool } from '@/db/connection';
+import { isEmptyDatabase } from '@/db/seeds/is-empty-database';
+import { seedDemo } from '@/db/seeds/seed-demo';
 
-/** Writes the demo people and cases into a database that holds no hospital yet. */
-export async function seedWhenEmpty(settings: Settings, adminUrl: string): Promise<string> {
-  const database = knex({ client: 'pg', connection: adminUrl, pool: { min: 0, max: 2 } });
+/** Writes the demo hospitals and people into a database that holds nobody yet. */
+export async function seedWhenEmpty(adminUrl: string): Promise<string> {
+  const admin = makePool(adminUrl, 2, 'fascicle demo');
   try {
-    if ((await database('hospitals').first('id')) !== undefined) return 'there already';
-    const file = path.resolve(import.meta.dirname, '../../db/seeds/seed-demo.ts');
-    const { seedDemo } = (await import(file)) as { seedDemo: (database: unknown, settings: Settings) => Promise<void> };
-    await seedDemo(database, settings);
+    if (!(await isEmptyDatabase(admin))) return 'there already';
+    await seedDemo(admin);
     return 'written';
   } finally {
-    await database.destroy();
+    await admin.destroy();
   }
 }

@@ -3,7 +3,6 @@ import type { Settings } from '@/server/settings/settings';
 import { buildEnvironment, type BuildFolders } from './build-folders';
 import type { ClusterSource } from './database/cluster-source';
 import { roleAddresses } from './database/prepare-database';
-import { listDemoPeople } from './list-demo-people';
 import { productAddress } from './installation';
 import { printWelcome } from './print-welcome';
 import { updateRunning } from './running-record.mjs';
@@ -18,7 +17,6 @@ type Service = Readonly<{ root: string; stateFolder: string; stop: AbortSignal; 
 export async function serve({ root, stateFolder, stop, settings, secret, source, folders }: Service): Promise<void> {
   const logFile = path.join(stateFolder, 'server.log');
   const log = openServerLog(logFile, (line) => process.stderr.write(`${line}\n`));
-  const demoPeople = settings.demo ? await listDemoPeople() : [];
   await supervise({
     stop,
     cluster: source.cluster,
@@ -35,7 +33,7 @@ export async function serve({ root, stateFolder, stop, settings, secret, source,
     },
     onFirstListening: () => {
       updateRunning(stateFolder, { url: settings.publicUrl });
-      printWelcome({ url: settings.publicUrl, demoPeople, afterMs: performance.now(), logFile });
+      printWelcome({ url: settings.publicUrl, isDemo: settings.demo, afterMs: performance.now(), logFile });
     },
     say: (sentence) => process.stderr.write(`${new Date().toISOString()} ${sentence}\n`),
   });
