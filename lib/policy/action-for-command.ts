@@ -12,5 +12,5 @@ import type { Action } from '@/lib/policy/action';
 export function actionForCommand(name: CaseCommandName): Action {
   if (name === 'plan-case') return 'plan-case';
   if (name === 'miss-repeat') return 'run-timer';
-  return name === 'send-message' ? 'send-message' : 'write-case';
+  return name === 'send-message' || name === 'accept-baseline' ? name : 'write-case';
 }

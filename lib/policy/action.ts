@@ -6,6 +6,7 @@ export const actions = [
   'see-identity',
   'write-case',
   'send-message',
+  'accept-baseline',
   'pair-screen',
   'see-screens',
   'revoke-screen',

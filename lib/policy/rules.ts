@@ -25,7 +25,7 @@ export const caseRules: readonly CaseRule[] = [
     role: 'neurophysiologist',
     reach: 'assigned',
     statuses: everyStatus,
-    actions: ['see-case', 'see-identity', 'write-case', 'send-message', 'see-screens', 'revoke-screen'],
+    actions: ['see-case', 'see-identity', 'write-case', 'send-message', 'accept-baseline', 'see-screens', 'revoke-screen'],
   },
   { name: 'neurophysiologist-pairs-until-close', role: 'neurophysiologist', reach: 'assigned', statuses: beforeClose, actions: ['pair-screen'] },
   { name: 'surgeon-of-the-case', role: 'surgeon', reach: 'assigned', statuses: everyStatus, actions: ['see-case', 'see-identity'] },
@@ -34,7 +34,7 @@ export const caseRules: readonly CaseRule[] = [
     role: 'physician',
     reach: 'assigned',
     statuses: everyStatus,
-    actions: ['see-case', 'see-identity', 'send-message', 'see-screens'],
+    actions: ['see-case', 'see-identity', 'send-message', 'accept-baseline', 'see-screens'],
   },
   { name: 'reviewer-of-closed-cases', role: 'reviewer', reach: 'hospital', statuses: ['closed'], actions: ['see-case'] },
 ];
@@ -46,3 +46,15 @@ export const hospitalRules: readonly { readonly name: string; readonly role: Rol
   { name: 'physician-of-the-hospital', role: 'physician', actions: ['list-cases'] },
   { name: 'reviewer-of-the-hospital', role: 'reviewer', actions: ['list-cases'] },
 ];
+
+/**
+ * The role that a rule on cases speaks of; an entry carries it as its author's role.
+ *
+ * @param ruleName name of a rule, as `decideAccess` tells it
+ * @returns the role, or null when the rule speaks of no person
+ * @source house rule
+ * @example roleOfRule('surgeon-of-the-case') // 'surgeon'
+ */
+export function roleOfRule(ruleName: string): Role | null {
+  return caseRules.find((rule) => rule.name === ruleName)?.role ?? null;
+}

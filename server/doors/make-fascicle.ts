@@ -1,0 +1,36 @@
+import { commandDoors } from '@/server/doors/command-doors';
+import type { Answered, Door, DoorParts } from '@/server/doors/door-parts';
+import { queryDoors } from '@/server/doors/query-doors';
+import { isFailure, notReadable, notSaved, type Failure } from '@/server/failure';
+import type { Fascicle, Reply, RequestSource } from '@/server/fascicle-global';
+
+/** The seam as the routes see it: every door answers, whatever happens behind it. */
+export function makeFascicle(parts: DoorParts): Fascicle {
+  return {
+    execute: (name, input, source) => pass(parts, name, commandDoors[name] as Door<unknown, never>, input, source, notSaved),
+    query: (name, input, source) => pass(parts, name, queryDoors[name] as Door<unknown, never>, input, source, notReadable),
+  };
+}
+
+async function pass<Input, Answer extends object>(
+  parts: DoorParts,
+  name: string,
+  door: Door<Input, Answer>,
+  input: Input,
+  source: RequestSource,
+  faultReply: () => Failure,
+): Promise<Reply<Answer>> {
+  try {
+    const answered = await door(parts, input, source);
+    if (hasCookies(answered)) return { isOk: true, status: 200, body: answered.answer, cookies: answered.cookies };
+    return { isOk: true, status: 200, body: answered, cookies: [] };
+  } catch (thrown) {
+    if (!isFailure(thrown)) parts.context.log.error({ err: thrown, door: name }, 'A door met a fault.');
+    const { status, reply } = isFailure(thrown) ? thrown : faultReply();
+    return { isOk: false, status, body: reply, cookies: [] };
+  }
+}
+
+function hasCookies<Answer extends object>(answered: Answer | Answered<Answer>): answered is Answered<Answer> {
+  return 'isAnswered' in answered;
+}

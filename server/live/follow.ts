@@ -1,0 +1,56 @@
+import { followRequestSchema, type FollowReply } from '@/lib/contracts/channel/messages';
+import { contractVersion } from '@/lib/contracts/contract-version';
+import { isFailure } from '@/server/failure';
+import { roomOf, type LiveSocket } from '@/server/live/live-socket';
+import type { Departures } from '@/server/live/departures';
+import type { Presence } from '@/server/cases/presence';
+import type { Pump } from '@/server/live/pump';
+import { largestPage, readPage } from '@/server/queries/case-entries';
+import { openCase } from '@/server/queries/open-case';
+import type { ServerContext } from '@/server/server-context';
+
+/** What following needs. */
+export interface FollowParts {
+  readonly context: ServerContext;
+  readonly pump: Pump;
+  readonly presence: Presence;
+  readonly departures: Departures;
+}
+
+const mostCasesPerViewer = 20;
+
+/**
+ * Lets the viewer in, joins the room, then reads after its last number: nothing can fall between, and nothing of a case
+ * reaches a viewer whom the policy does not let in. Joining and joining again are one call.
+ */
+export async function follow(parts: FollowParts, socket: LiveSocket, message: unknown): Promise<FollowReply> {
+  const read = followRequestSchema.safeParse(message);
+  if (isOtherVersion(message)) return { kind: 'refused', code: 'newer-version', message: 'Newer version: this page and the server do not speak the same version. Load the page again.' };
+  if (!read.success) return { kind: 'refused', code: 'bad-request', message: `Not a request to follow: ${read.error.issues[0]?.message ?? 'unreadable'}` };
+  const { caseId, after } = read.data;
+  const isNew = !socket.data.caseIds.has(caseId);
+  if (isNew && socket.data.caseIds.size >= mostCasesPerViewer) {
+    return { kind: 'refused', code: 'bad-request', message: `Too many: ${mostCasesPerViewer} cases at most can be followed at a time.` };
+  }
+  try {
+    const { visitor, isDesk } = socket.data;
+    await openCase(parts.context, visitor, { caseId, action: 'see-case', what: 'follow' });
+    await socket.join(roomOf(caseId, visitor.kind));
+    const page = await readPage(parts.context, visitor, { caseId, after, limit: largestPage });
+    if (!socket.connected) throw new Error('The viewer left while the log was read.');
+    parts.pump.watch(caseId, page.headSeq);
+    socket.data.caseIds.add(caseId);
+    if (isNew) parts.presence.arrive(caseId, socket.id, { desk: isDesk, screenId: visitor.kind === 'screen' ? visitor.screenId : null });
+    return { kind: 'entries', ...page };
+  } catch (cause) {
+    if (isNew) await socket.leave(roomOf(caseId, socket.data.visitor.kind));
+    if (isFailure(cause) && cause.reply.kind === 'not-found') return { kind: 'refused', code: 'not-found', message: cause.message };
+    parts.context.log.warn({ err: cause, caseId }, 'A viewer could not follow.');
+    return { kind: 'refused', code: 'not-saved', message: 'Not read: the database did not answer. Try again.' };
+  }
+}
+
+function isOtherVersion(message: unknown): boolean {
+  if (typeof message !== 'object' || message === null || !('contractVersion' in message)) return false;
+  return typeof message.contractVersion === 'number' && message.contractVersion !== contractVersion;
+}

@@ -1,0 +1,24 @@
+import { screensOfCase as boundScreens } from '@/db/repositories/screens/screens-of-case';
+import { withinHospitals } from '@/db/within-hospitals';
+import type { SignedIn } from '@/server/auth/read-session';
+import type { Presence } from '@/server/cases/presence';
+import { openCase } from '@/server/queries/open-case';
+import type { ScreenListReply } from '@/server/replies';
+import type { ServerContext } from '@/server/server-context';
+
+/** Walls bound to a case, with who of them is connected to this process. */
+export async function screensOfCase(context: ServerContext, presence: Presence, { actor }: SignedIn, caseId: string): Promise<ScreenListReply> {
+  const { row } = await openCase(context, actor, { caseId, action: 'see-screens', what: 'screens' });
+  const bound = await withinHospitals(context.database.app, [row.hospitalId], (transaction) => boundScreens(transaction, caseId));
+  const connected = presence.wallsOf(caseId);
+  return {
+    screens: bound.map((screen) => ({
+      screenId: screen.id,
+      words: screen.words,
+      pairedAt: screen.pairedAt ?? screen.askedAt,
+      lastSeenAt: screen.lastSeenAt,
+      endedAt: screen.endedAt,
+      isConnected: connected.has(screen.id),
+    })),
+  };
+}
