@@ -33,7 +33,7 @@ const LINES = `
   where exists (select from case_assignments a where a.case_id = c.id and a.person_id = :personId and a.to_at is null)
     or (life.kind in ('case.closed', 'case.sealed') and exists (select from memberships m
       where m.hospital_id = c.hospital_id and m.person_id = :personId and m.role = 'reviewer' and m.revoked_at is null))
-  order by head.recorded_at desc
+  order by head.recorded_at desc, c.id desc
   limit :limit`;
 
 /** Cases that a person is assigned to, and for a reviewer every closed one of the hospital; latest first. Run it within the person's hospitals. */

@@ -1,0 +1,149 @@
+import { createHash } from 'node:crypto';
+import { v7 as uuidv7 } from 'uuid';
+import { afterAll, beforeAll, describe, expect, test } from 'vitest';
+import { acceptSecondFactorStep } from '@/db/repositories/people/accept-second-factor-step';
+import { demoPeople } from '@/db/repositories/people/demo-people';
+import { findCredentialsByEmail } from '@/db/repositories/people/find-credentials-by-email';
+import { findCredentialsByPerson } from '@/db/repositories/people/find-credentials-by-person';
+import { findPeople } from '@/db/repositories/people/find-people';
+import { liveMemberships } from '@/db/repositories/people/live-memberships';
+import { membersOf } from '@/db/repositories/people/members-of';
+import { findLiveSession } from '@/db/repositories/sessions/find-live-session';
+import { insertSession } from '@/db/repositories/sessions/insert-session';
+import { liveSessionIds } from '@/db/repositories/sessions/live-session-ids';
+import { noteReauthenticated } from '@/db/repositories/sessions/note-reauthenticated';
+import { noteSessionSeen } from '@/db/repositories/sessions/note-session-seen';
+import { revokeSession } from '@/db/repositories/sessions/revoke-session';
+import { revokeSessionsOf } from '@/db/repositories/sessions/revoke-sessions-of';
+import { countFailures } from '@/db/repositories/sign-in/count-failures';
+import { noteAttempt } from '@/db/repositories/sign-in/note-attempt';
+import { withinHospitals } from '@/db/within-hospitals';
+import { openRecordDatabase, type RecordDatabase } from '@/tests/db/record-database';
+
+let db: RecordDatabase;
+beforeAll(async () => {
+  db = await openRecordDatabase();
+});
+afterAll(() => db.drop());
+
+const inAnHour = () => new Date(Date.now() + 3_600_000).toISOString();
+
+async function begin(expiresAt = inAnHour()): Promise<string> {
+  const id = uuidv7();
+  await insertSession(db.database.app, { id, personId: db.hospital.deskId, expiresAt });
+  return id;
+}
+
+describe('credentials', () => {
+  test('are found by address in any case of letters, and by person, with no hospital set', async () => {
+    const expected = {
+      personId: db.hospital.deskId, email: 'desk@north.example', displayName: 'neurophysiologist',
+      passwordHash: 'hash of desk@north.example', secondFactorSecret: 'secret of desk@north.example', secondFactorStep: -1, isDemo: false,
+    };
+    expect(await findCredentialsByEmail(db.database.app, 'Desk@North.EXAMPLE')).toEqual(expected);
+    expect(await findCredentialsByPerson(db.database.app, db.hospital.deskId)).toEqual(expected);
+  });
+
+  test('are not found for an unknown address, also not by a pattern', async () => {
+    for (const email of ['nobody@north.example', '%', 'desk@north.example\' or true --']) expect(await findCredentialsByEmail(db.database.app, email)).toBeNull();
+    expect(await findCredentialsByPerson(db.database.app, uuidv7())).toBeNull();
+  });
+
+  test('are listed for demo people only', async () => {
+    expect(await demoPeople(db.database.app)).toEqual([]);
+    await db.admin('people').where({ id: db.other.reviewerId }).update({ is_demo: true });
+    expect((await demoPeople(db.database.app)).map(({ personId }) => personId)).toEqual([db.other.reviewerId]);
+  });
+});
+
+describe('acceptSecondFactorStep', () => {
+  test('takes a step once and never an earlier one', async () => {
+    const accept = (step: number) => acceptSecondFactorStep(db.database.app, db.hospital.reviewerId, step);
+    expect([await accept(100), await accept(100), await accept(99), await accept(101)]).toEqual([true, false, false, true]);
+    expect((await findCredentialsByPerson(db.database.app, db.hospital.reviewerId))?.secondFactorStep).toBe(101);
+  });
+
+  test('takes it once also when eight requests race', async () => {
+    const answers = await Promise.all(Array.from({ length: 8 }, () => acceptSecondFactorStep(db.database.app, db.other.deskId, 7)));
+    expect(answers.filter(Boolean)).toHaveLength(1);
+  });
+
+  test('takes none for a person who is not there', async () => {
+    expect(await acceptSecondFactorStep(db.database.app, uuidv7(), 1)).toBe(false);
+  });
+});
+
+describe('findLiveSession', () => {
+  test('gives the person and their present roles in one answer', async () => {
+    const sessionId = await begin();
+    expect(await findLiveSession(db.database.app, sessionId)).toMatchObject({
+      sessionId, personId: db.hospital.deskId, email: 'desk@north.example', isDemo: false, reauthenticatedAt: null,
+      memberships: [{ hospitalId: db.hospital.id, hospitalName: 'Hospital north', timeZone: 'Europe/London', role: 'neurophysiologist' }],
+    });
+  });
+
+  test('gives nothing for one that is revoked, past its time or unknown', async () => {
+    const revoked = await begin();
+    expect([await revokeSession(db.database.app, revoked), await revokeSession(db.database.app, revoked)]).toEqual([true, false]);
+    const past = await begin();
+    await db.admin('sessions').where({ id: past }).update({ created_at: '2020-01-01Z', expires_at: '2020-01-02Z' });
+    for (const id of [revoked, past, uuidv7()]) expect(await findLiveSession(db.database.app, id)).toBeNull();
+    expect(await liveSessionIds(db.database.app, [revoked, past])).toEqual(new Set());
+    expect(await noteReauthenticated(db.database.app, revoked)).toBe(false);
+  });
+
+  test('drops a role as soon as the membership is revoked', async () => {
+    const id = uuidv7();
+    await insertSession(db.database.app, { id, personId: db.other.reviewerId, expiresAt: inAnHour() });
+    expect((await findLiveSession(db.database.app, id))?.memberships).toHaveLength(1);
+    await db.admin('memberships').where({ person_id: db.other.reviewerId }).update({ revoked_at: db.admin.fn.now() });
+    expect((await findLiveSession(db.database.app, id))?.memberships).toEqual([]);
+    expect(await liveMemberships(db.database.app, db.other.reviewerId)).toEqual([]);
+    expect(await withinHospitals(db.database.app, [db.other.id], (transaction) => membersOf(transaction, db.other.id, 'reviewer'))).toEqual([]);
+  });
+
+  test('shows that the person gave their credentials again', async () => {
+    const id = await begin();
+    await noteSessionSeen(db.database.app, id);
+    expect(await noteReauthenticated(db.database.app, id)).toBe(true);
+    expect((await findLiveSession(db.database.app, id))?.reauthenticatedAt).toMatch(/^\d{4}-.+\.\d{3}Z$/);
+  });
+});
+
+describe('revokeSessionsOf', () => {
+  test('ends all of a person and names them', async () => {
+    const ids = [await begin(), await begin()];
+    expect(await liveSessionIds(db.database.app, ids)).toEqual(new Set(ids));
+    expect(await revokeSessionsOf(db.database.app, db.hospital.deskId)).toEqual(expect.arrayContaining(ids));
+    expect(await liveSessionIds(db.database.app, ids)).toEqual(new Set());
+  });
+});
+
+describe('members and people', () => {
+  test('are found within the hospital only', async () => {
+    const desk = { personId: db.hospital.deskId, email: 'desk@north.example', displayName: 'neurophysiologist' };
+    const within = <Result>(work: Parameters<typeof withinHospitals<Result>>[2]) => withinHospitals(db.database.app, [db.hospital.id], work);
+    expect(await within((transaction) => membersOf(transaction, db.hospital.id, 'neurophysiologist'))).toEqual([desk]);
+    expect(await within((transaction) => membersOf(transaction, db.other.id, 'neurophysiologist'))).toEqual([]);
+    expect(await within((transaction) => findPeople(transaction, [db.hospital.deskId, db.other.deskId]))).toEqual([desk]);
+  });
+});
+
+describe('countFailures', () => {
+  test('counts by address typed since its last success, and by machine', async () => {
+    const emailHash = createHash('sha256').update('someone').digest();
+    const attempt = (succeeded: boolean, address: string) => noteAttempt(db.database.app, { emailHash, address, succeeded });
+    const count = (windowS = 60) => countFailures(db.database.app, emailHash, '127.0.0.9', windowS);
+    expect(await count()).toEqual({ byEmail: 0, byAddress: 0 });
+    await attempt(false, '127.0.0.9');
+    await attempt(false, '127.0.0.8');
+    expect(await count()).toEqual({ byEmail: 2, byAddress: 1 });
+    await attempt(true, '127.0.0.9');
+    expect(await count()).toEqual({ byEmail: 0, byAddress: 1 });
+    await attempt(false, '127.0.0.9');
+    expect(await count()).toEqual({ byEmail: 1, byAddress: 2 });
+    await db.admin('sign_in_attempts').update({ at: db.admin.raw(`at - interval '2 minutes'`) });
+    expect(await count()).toEqual({ byEmail: 0, byAddress: 0 });
+    expect(await count(300)).toEqual({ byEmail: 1, byAddress: 2 });
+  });
+});
