@@ -1,5 +1,6 @@
 import type { Finding, PathChange } from '@/lib/alert/judgement';
 import type { RuleSet } from '@/lib/alert/rule-set';
+import { worstFirst } from '@/lib/alert/worst-finding';
 import { amplitudeChange } from '@/lib/change/amplitude-change';
 import { durationChange } from '@/lib/change/duration-change';
 import { isBeyondNoise } from '@/lib/change/is-beyond-noise';
@@ -42,8 +43,11 @@ export function judgePath(
   rules: RuleSet,
 ): { readonly change: PathChange; readonly findings: readonly Finding[] } {
   const change = pathChange(reading, baseline, rules);
-  return { change, findings: findingsOf(change, rules) };
+  const isLost = reading.kind === 'absent' || (change.percentOfBaseline !== null && change.percentOfBaseline < rules.lostBelowPercent);
+  return { change, findings: isLost ? [lost] : findingsOf(change, rules) };
 }
+
+const lost: Finding = { kind: 'response-lost', priority: 'notice', mayBecomeAlert: true };
 
 function pathChange(reading: SeenReading, baseline: PathBaseline, rules: RuleSet): PathChange {
   const isMeasured = reading.kind === 'measured';
@@ -81,10 +85,7 @@ function pathChange(reading: SeenReading, baseline: PathBaseline, rules: RuleSet
 }
 
 function findingsOf(change: PathChange, rules: RuleSet): readonly Finding[] {
-  const { percentOfBaseline, amplitudeChangePercent, amplitudeErrorPercent } = change;
-  if (percentOfBaseline !== null && percentOfBaseline < rules.lostBelowPercent) {
-    return [{ kind: 'response-lost', priority: 'notice', mayBecomeAlert: true }];
-  }
+  const { amplitudeChangePercent, amplitudeErrorPercent } = change;
   const isOnsetLate = hasLateOnset(change, rules);
   const findings: Finding[] = [];
   if (amplitudeChangePercent !== null && amplitudeErrorPercent !== null) {
@@ -99,7 +100,7 @@ function findingsOf(change: PathChange, rules: RuleSet): readonly Finding[] {
   if (isOnsetLate && findings[0]?.kind !== 'amplitude-and-onset') {
     findings.push({ kind: 'onset-late', priority: 'notice', mayBecomeAlert: false });
   }
-  return findings;
+  return worstFirst(findings);
 }
 
 function hasLateOnset(change: PathChange, rules: RuleSet): boolean {

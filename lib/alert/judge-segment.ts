@@ -3,6 +3,7 @@ import type { RuleSet } from '@/lib/alert/rule-set';
 import { amplitudeRatio } from '@/lib/change/amplitude-ratio';
 import { isBeyondNoise } from '@/lib/change/is-beyond-noise';
 import { segmentTimeChange } from '@/lib/change/segment-time-change';
+import { shortSegmentMm } from '@/lib/conduction/short-segment-mm';
 import { twoSiteVelocity } from '@/lib/conduction/two-site-velocity';
 import { resolutions } from '@/lib/units/resolutions';
 import { roundTo } from '@/lib/units/round-to';
@@ -38,7 +39,7 @@ export interface SegmentPairInput {
  *
  * Method: from the newest run of either site. A pair that spans a risk step is no evidence: it gives neither a
  * velocity nor a finding. A conduction time past its limit may become an alert only on segments that are not
- * short; the ratio reaches a notice at most. A distance error common to baseline and now cancels in the time.
+ * short and whose length is known; the ratio reaches a notice at most. A distance error common to baseline and now cancels in the time.
  *
  * @param input both ends, the distance in mm and the limits
  * @returns velocity in m/s with its standard error, or the reason why there is none; changes are null when not computable
@@ -55,8 +56,9 @@ export function judgeSegment(input: SegmentPairInput): SegmentJudgement {
   const velocity = velocityOf(input);
   const findings: Finding[] = [];
   if (time !== null && isSlowed(time, input.rules)) {
-    const isShort = velocity.kind === 'velocity' && velocity.isShort;
-    findings.push({ kind: 'segment-slowed', priority: 'notice', mayBecomeAlert: !isShort });
+    // A segment whose length is void or unknown may be a short one.
+    const isLong = input.distanceMm !== null && input.distanceMm >= shortSegmentMm.value;
+    findings.push({ kind: 'segment-slowed', priority: 'notice', mayBecomeAlert: isLong });
   }
   if (ratio !== null && ratio.changePercent <= -input.rules.amplitudeRatioFallPercent && isBeyondNoise(ratio)) {
     findings.push({ kind: 'ratio-fall', priority: 'notice', mayBecomeAlert: false });
@@ -130,9 +132,14 @@ function isSlowed(
   );
 }
 
+/** Above this many times its baseline a ratio says nothing but that one end is next to nothing. House rule. */
+const largestRatioShare = 1000;
+
 function ratioChangeOf({ proximal, distal }: SegmentPairInput) {
   if (proximal.amplitudeUv === null || distal.amplitudeUv === null) return null;
   if (proximal.baselineAmplitudeUv === null || distal.baselineAmplitudeUv === null) return null;
+  const nowTimesBaseline = proximal.amplitudeUv * distal.baselineAmplitudeUv;
+  if (nowTimesBaseline > largestRatioShare * distal.amplitudeUv * proximal.baselineAmplitudeUv) return null;
   const ratio = amplitudeRatio({
     baseline: { proximalUv: proximal.baselineAmplitudeUv, distalUv: distal.baselineAmplitudeUv },
     current: { proximalUv: proximal.amplitudeUv, distalUv: distal.amplitudeUv },

@@ -22,6 +22,18 @@ const order: readonly FindingKind[] = [
  * worstFinding([]) // => null
  */
 export function worstFinding(findings: readonly Finding[]): Finding | null {
-  const ordered = [...findings].sort((first, second) => order.indexOf(first.kind) - order.indexOf(second.kind));
-  return ordered[0] ?? null;
+  return worstFirst(findings)[0] ?? null;
+}
+
+/**
+ * Findings in order, the worst first.
+ * @param findings any number, in any order; not modified
+ * @returns the same findings, sorted
+ * @source order: as for `worstFinding`
+ * @accuracy exact; tests/lib/alert/worst-finding.test.ts
+ * @example
+ * worstFirst([]) // => []
+ */
+export function worstFirst(findings: readonly Finding[]): readonly Finding[] {
+  return [...findings].sort((first, second) => order.indexOf(first.kind) - order.indexOf(second.kind));
 }
