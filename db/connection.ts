@@ -24,10 +24,14 @@ const STATEMENT_TIMEOUT_MS = 5000;
 const QUERY_TIMEOUT_MS = 6000;
 const CONNECT_TIMEOUT_MS = 3000;
 
+/** Every failure reaches the caller, who says it once; knex would print it a second time. */
+const silent = { warn: () => undefined, error: () => undefined, deprecate: () => undefined, debug: () => undefined };
+
 /** A pool for one role. Opens no connection before the first query. */
 export function makePool(url: string, max: number, name: string): Knex {
   return knex({
     client: 'pg',
+    log: silent,
     connection: {
       connectionString: url,
       application_name: name,

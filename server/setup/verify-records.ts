@@ -19,7 +19,7 @@ export function readVerifyRequest(words: readonly string[]): VerifyRequest {
     if (uuid.test(caseId)) return { kind: 'verify', caseId };
     return { kind: 'wrong', sentence: `Case ${JSON.stringify(values.case)} is no case id; a UUID is allowed.` };
   } catch (error) {
-    return { kind: 'wrong', sentence: `${error instanceof Error ? error.message : String(error)} ${USAGE}` };
+    return { kind: 'wrong', sentence: `${error instanceof Error ? error.message.replace(/\.?$/, '.') : String(error)} ${USAGE}` };
   }
 }
 

@@ -3,7 +3,7 @@ import { settings } from '@/server/settings/settings';
 import { exitStatuses } from './exit-statuses.mjs';
 import { openInstallation } from './installation';
 import { readEnvironmentFile } from './read-environment-file.mjs';
-import { reportFailure } from './setup-failure.mjs';
+import { reportFailure, SetupFailure } from './setup-failure.mjs';
 import { readVerifyRequest, verifyRecords } from './verify-records';
 
 const NOT_VERIFIED = 1;
@@ -19,6 +19,8 @@ async function verify(words: readonly string[]): Promise<number> {
   const feed = makePool(openInstallation(settings()).feedUrl, 1, 'fascicle verify');
   try {
     return (await verifyRecords(feed, request.caseId, (line) => console.log(line))) ? 0 : NOT_VERIFIED;
+  } catch (error) {
+    throw new SetupFailure('database', `The records could not be read: ${error instanceof Error ? error.message : String(error)}.`, error);
   } finally {
     await feed.destroy();
   }
