@@ -1,0 +1,5 @@
+/** Pages a signed-in person goes to from anywhere. */
+export const deskLinks = [
+  { href: '/cases', label: 'Cases' },
+  { href: '/plan', label: 'Plan a case' },
+] as const;

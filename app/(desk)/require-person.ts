@@ -1,0 +1,18 @@
+import { headers } from 'next/headers';
+import { notFound, redirect } from 'next/navigation';
+
+import { sourceOf } from '@/server/http/answer-route';
+
+/** Only signed-in people pass. A server without its database lets the shell through: the page itself says what is missing. */
+export async function requirePerson(): Promise<void> {
+  const reply = await globalThis.fascicle.query('session', {}, sourceOf(await headers()));
+  if (!reply.isOk && reply.status === 401) redirect('/sign-in');
+}
+
+/** A case that this person may not see is not there, in the page as in the interface. */
+export async function requireCase(caseId: string): Promise<void> {
+  const reply = await globalThis.fascicle.query('case-head', { caseId }, sourceOf(await headers()));
+  if (reply.isOk) return;
+  if (reply.status === 401) redirect('/sign-in');
+  if (reply.status === 404 || reply.status === 400) notFound();
+}

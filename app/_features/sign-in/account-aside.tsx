@@ -1,0 +1,40 @@
+'use client';
+
+import { useQuery } from '@tanstack/react-query';
+import { signOut } from 'next-auth/react';
+import { useState } from 'react';
+
+import { readSession } from '@/app/_live/api';
+import { forgetDesk, signOutWarning } from '@/app/_live/sign-out';
+import { Button } from '@/app/_ui/button';
+import { Dialog } from '@/app/_ui/dialog';
+import { ThemeToggle } from '@/app/_ui/theme-toggle';
+
+/** Who is signed in, the theme, and the way out. Waiting entries are named before a person leaves them behind. */
+export function AccountAside() {
+  const session = useQuery({ queryKey: ['session'], queryFn: () => readSession() });
+  const [warning, setWarning] = useState<string | null>(null);
+  const leave = async () => {
+    await forgetDesk();
+    await signOut({ redirect: false });
+    window.location.assign('/sign-in');
+  };
+  const handleSignOut = () => {
+    const waiting = signOutWarning();
+    if (waiting === null) void leave();
+    else setWarning(waiting);
+  };
+  return (
+    <>
+      <span className="text-second">{session.data?.displayName ?? ''}</span>
+      <ThemeToggle />
+      <Button onClick={handleSignOut}>Sign out</Button>
+      <Dialog isOpen={warning !== null} onOpenChange={(isOpen) => (isOpen ? undefined : setWarning(null))} title="Entries are waiting" description={warning ?? ''}>
+        <div className="flex flex-wrap gap-3">
+          <Button variant="primary" onClick={() => setWarning(null)}>Stay signed in</Button>
+          <Button onClick={() => void leave()}>Sign out all the same</Button>
+        </div>
+      </Dialog>
+    </>
+  );
+}
