@@ -2,7 +2,12 @@ import { z } from 'zod';
 
 const controlCharacter = /[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f]/;
 
-/** Text of a person: well-formed Unicode without control characters, trimmed, 1 to `max` characters. */
+/**
+ * Text of a person: well-formed Unicode without control characters, trimmed.
+ * @param max most characters allowed, 1 or more
+ * @returns a schema of 1 to `max` characters
+ * @source house rule
+ */
 export const boundedText = (max: number) =>
   z
     .string()

@@ -6,6 +6,7 @@ const minus = '\u2212';
  * A clock time in the theatre's zone, 24 h.
  * @param moment RFC 3339 in UTC
  * @param timeZone IANA zone
+ * @param options `seconds` adds the seconds
  * @returns "10:41" or "10:41:20"
  * @source house rule: local time, seconds where they matter
  * @accuracy whole minutes or seconds, cut, not rounded; tests/lib/text/format.test.ts
@@ -24,6 +25,7 @@ export function clockTime(moment: string, timeZone: string, options: { readonly 
 
 /**
  * A number with a true minus sign and fixed digits.
+ * @param value a finite number in any unit
  * @param digits digits after the point
  * @returns "−0.50"
  * @source house rule: a minus sign is a minus sign
@@ -36,18 +38,18 @@ export function decimal(value: number, digits: number): string {
   return value < 0 && Number(text) !== 0 ? `${minus}${text}` : text;
 }
 
-/** A change: with its sign, plus included. @returns "+1.40", "−62", "0" @source house rule @example signed(1.4, 2) // => '+1.40' */
+/** A change: with its sign, plus included. @param value a finite change in any unit @param digits digits after the point @returns "+1.40", "−62", "0" @source house rule @example signed(1.4, 2) // => '+1.40' */
 export function signed(value: number, digits: number): string {
   const text = decimal(value, digits);
   return value > 0 && Number(text) !== 0 ? `+${text}` : text;
 }
 
-/** A whole percentage. @returns "38 %" with a space that does not break @source house rule @example percent(37.6) // => '38 %' */
+/** A whole percentage. @param value in percent @returns "38 %" with a space that does not break @source house rule @example percent(37.6) // => '38 %' */
 export function percent(value: number): string {
   return `${decimal(Math.round(value), 0)}${nonBreakingSpace}%`;
 }
 
-/** A time to 0.01 ms. @returns "9.71 ms" @source house rule @example milliseconds(9.71) // => '9.71 ms' */
+/** A time to 0.01 ms. @param value in ms @returns "9.71 ms" @source house rule @example milliseconds(9.71) // => '9.71 ms' */
 export function milliseconds(value: number): string {
   return `${decimal(value, 2)}${nonBreakingSpace}ms`;
 }
@@ -57,7 +59,7 @@ export function millivolts(amplitudeUv: number): string {
   return `${decimal(amplitudeUv / 1000, 1)}${nonBreakingSpace}mV`;
 }
 
-/** A velocity. @returns "31 m/s" @source house rule @example metresPerSecond(31.4) // => '31 m/s' */
+/** A velocity in whole m/s. @param value in m/s @returns "31 m/s" @source house rule @example metresPerSecond(31.4) // => '31 m/s' */
 export function metresPerSecond(value: number): string {
   return `${decimal(Math.round(value), 0)}${nonBreakingSpace}m/s`;
 }

@@ -11,6 +11,7 @@ const lateAfterMs = 180_000;
 
 /**
  * What the theatre screen says of an open notice or alert.
+ * @param timeZone IANA zone of the theatre
  * @returns a line: high for an alert, medium for a notice, low once recovered; flashing until told
  * @source product rule: what changed, where once located, last good and first seen, after which step
  * @accuracy tests/lib/text/theatre-view.test.ts

@@ -11,6 +11,7 @@ import { msOfMoment } from '@/lib/units/ms-of-moment';
  * Method: the first that applies, from what must not look calm to what may: no baseline, not compared, not
  * monitorable, watch, not tested, improved, stable.
  *
+ * @param timeZone IANA zone of the theatre
  * @returns a line; calm only for improved and stable
  * @source product rule: stable must be earned
  * @accuracy tests/lib/text/theatre-view.test.ts

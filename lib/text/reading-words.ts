@@ -12,7 +12,7 @@ export const unusableWords: { readonly [R in UnusableReason]: string } = {
   'off-scale': 'off scale',
 };
 
-/** A current with the digits it needs: one, or two below 1 mA. @returns "18.0 mA", "0.35 mA" @source house rule @example milliamperes(18) // => '18.0 mA' */
+/** A current with the digits it needs: one, or two below 1 mA. @param value in mA @returns "18.0 mA", "0.35 mA" @source house rule @example milliamperes(18) // => '18.0 mA' */
 export function milliamperes(value: number): string {
   return `${decimal(value, value < 1 ? 2 : 1)}${nonBreakingSpace}mA`;
 }

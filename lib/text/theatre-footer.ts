@@ -7,6 +7,7 @@ import { msOfMoment } from '@/lib/units/ms-of-moment';
 
 /**
  * Short facts under the theatre picture: what is next, what else could explain a change, what was told.
+ * @param timeZone IANA zone of the theatre
  * @returns at most six short sentences without a full stop, the most needed first
  * @source product rule: explanations carry their evidence and age; an old value is said with its time
  * @accuracy tests/lib/text/theatre-view.test.ts

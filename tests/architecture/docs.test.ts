@@ -49,13 +49,20 @@ describe('the docstrings of lib', () => {
 describe('the check of docstrings can fail', () => {
   const good = '/**\n * A summary that says something.\n * @param onsetMs in ms\n * @returns in ms\n * @source house rule\n */\n';
   const text = 'export function f(onsetMs: number): number { return onsetMs; }\n';
-  const problems = (docstring: string, code = text) => checkDocstrings({ path: 'lib/a.ts', text: docstring + code });
+  const problems = (docstring: string, code = text) => checkDocstrings({ path: 'lib/units/a.ts', text: docstring + code });
 
   it('lets a complete docstring pass', () => expect(problems(good)).toEqual([]));
   it('finds a missing docstring', () => expect(problems('')).toHaveLength(1));
   it('does not take the comment of another statement', () => expect(problems(`${good}const x = 1;\n`)).toHaveLength(1));
   it.each(['@param onsetMs in ms', '@returns in ms', '@source house rule'])('finds a missing %s', (line) => {
     expect(problems(good.replace(` * ${line}\n`, ''))).not.toEqual([]);
+  });
+  it('asks for every parameter in the sciences, elsewhere for those that leave something open', () => {
+    const code = 'export function f(state: CaseState, nowMs: number, zone: string): string { return zone; }\n';
+    const told = '/** A summary that says something. @returns words @source house rule */\n';
+    const asked = (path: string) => checkDocstrings({ path, text: told + code }).map((problem) => problem.split('@param ')[1]);
+    expect(asked('lib/text/a.ts')).toEqual(['zone']);
+    expect(asked('lib/change/a.ts')).toEqual(['state', 'nowMs', 'zone']);
   });
   it('finds a number without a unit', () => expect(problems(good.replace('@returns in ms', '@returns the result'))).toHaveLength(1));
   it('finds a summary that says nothing', () => expect(problems(good.replace('A summary that says something.', 'F.'))).toHaveLength(1));

@@ -27,7 +27,12 @@ export const consoleKeys = {
 /** A key of the console. */
 export type ConsoleKey = keyof typeof consoleKeys;
 
-/** True when the console uses this key itself. */
+/**
+ * Whether the console uses this key itself.
+ * @param key one character or the browser's name of a key
+ * @returns true when it does
+ * @source house rule
+ */
 export function isConsoleKey(key: string): key is ConsoleKey {
   return Object.hasOwn(consoleKeys, key);
 }

@@ -55,12 +55,12 @@ export function checkLock(text: string): readonly string[] {
   });
 }
 
-/** Packages that DEVELOPERS.md does not name on a line with at least four words of reason. */
+/** Packages that DEVELOPERS.md does not name on a line with at least three words of reason. */
 export function checkReasons(names: readonly string[], page: string): readonly string[] {
   return names
     .filter((name) => {
       const whole = new RegExp(`(^|[\`\\s|,(])${name.replace(/[/.]/g, '\\$&')}($|[\`\\s|,:)])`);
-      return !page.split('\n').some((line) => whole.test(line) && line.split(/\s+/).filter((word) => /[a-z]{2,}/i.test(word)).length >= 5);
+      return !page.split('\n').some((line) => whole.test(line) && line.split(/\s+/).filter((word) => /[a-z]{2,}/i.test(word)).length >= 4);
     })
     .map((name) => `${name}: DEVELOPERS.md gives no reason for it`);
 }

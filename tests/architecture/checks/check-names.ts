@@ -49,6 +49,7 @@ export function checkDeclaredNames(file: HouseFile): readonly string[] {
 export const startedPrograms: Readonly<Record<string, string>> = {
   'server/main.ts': 'the composition root',
   'server/setup/start.mjs': 'npm start',
+  'server/setup/with-packages.mjs': 'npm test',
   'server/setup/build-product.ts': 'npm run build',
   'server/setup/verify.ts': 'npm run verify',
   'server/setup/psql.ts': 'npm run psql',
@@ -68,7 +69,7 @@ export function checkMainExport(file: HouseFile): readonly string[] {
   const valueCount = declarations.filter(({ node }) => !ts.isInterfaceDeclaration(node) && !ts.isTypeAliasDeclaration(node)).length;
   const words = basename(file.path).replace(/\.(ts|tsx|mjs)$/, '').split('-');
   const isSubject = names.length > 1 && names.some((name) => words.every((word) => name.includes(word.replace(/ies$|s$/, ''))));
-  if (names.includes(words.join('')) || (valueCount === 0 && isSubject) || valueCount > 1) return [];
+  if (names.includes(words.join('')) || (valueCount < 2 && names.length - valueCount > 1 && isSubject) || valueCount > 1) return [];
   return [`${file.path}: exports ${names.join(', ') || 'nothing'}, none called like the file`];
 }
 

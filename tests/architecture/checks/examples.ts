@@ -32,7 +32,12 @@ export function examplesOf(file: HouseFile): readonly Example[] {
 export function runExample(example: Example, exported: Readonly<Record<string, unknown>>): { given: unknown; promised: unknown } {
   const names = Object.keys(exported).filter((name) => name !== 'default');
   const run = (text: string): unknown => new Function(...names, `'use strict'; return (${text});`)(...names.map((name) => exported[name]));
-  return { given: run(example.expression), promised: run(example.expected) };
+  return { given: plainSpaces(run(example.expression)), promised: plainSpaces(run(example.expected)) };
+}
+
+/** Text with every space an ordinary one: a docstring cannot show a space that does not break. */
+function plainSpaces(value: unknown): unknown {
+  return typeof value === 'string' ? value.replace(/[\u00a0\u2009\u202f]/g, ' ') : value;
 }
 
 /** Names an example uses that neither its file nor the language gives: such an example is read, not run. */
