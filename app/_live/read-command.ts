@@ -1,0 +1,17 @@
+import { personCommandSchema, type PersonCommand } from '@/lib/contracts/http/commands';
+import type { CommandReply } from '@/lib/contracts/http/replies';
+
+type Refused = Extract<CommandReply, { kind: 'refused' }>;
+
+/** Checks a command against the contract before it is kept: what the server could never take must not wait for it. */
+export function readCommand(command: PersonCommand): { readonly kind: 'read'; readonly command: PersonCommand } | Refused {
+  const read = personCommandSchema.safeParse(command);
+  if (read.success) return { kind: 'read', command: read.data };
+  const issue = read.error.issues[0];
+  return {
+    kind: 'refused',
+    code: 'bad-request',
+    message: issue?.message ?? 'Not readable: this command is not complete',
+    field: issue === undefined || issue.path.length === 0 ? null : issue.path.join('.'),
+  };
+}
