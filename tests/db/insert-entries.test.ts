@@ -1,3 +1,4 @@
+import fc from 'fast-check';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import { entriesAfter } from '@/db/repositories/entries/entries-after';
 import { headOf } from '@/db/repositories/entries/head-of';
@@ -6,6 +7,7 @@ import { verifyCase } from '@/db/read-models/verify-case';
 import { chainEntries } from '@/lib/record/chain-entries';
 import type { ChainHead, SealedEntry } from '@/lib/record/entry';
 import { sealEntry } from '@/lib/record/seal-entry';
+import { jsonBody } from '@/tests/lib/record/record-arbitraries';
 import { addCase, chained, draft, openRecordDatabase, type RecordDatabase } from './record-database';
 
 let db: RecordDatabase;
@@ -24,6 +26,22 @@ describe('insertEntries', () => {
     await append(more);
     expect(await entriesAfter(db.database.feed, caseId, 1, 10)).toEqual(more);
     expect(await headOf(db.database.feed, caseId)).toEqual({ seq: 4, hash: more[2]?.hash, recordedAt: more[2]?.entry.recordedAt });
+  });
+
+  test('takes any body that an entry may carry, and verification agrees with it', async () => {
+    const { caseId } = await addCase(db.database.app, db.hospital);
+    let head = await headOf(db.database.feed, caseId);
+    await fc.assert(
+      fc.asyncProperty(jsonBody, async (body) => {
+        const sealed = chainEntries(head ?? { seq: 0, hash: '' }, [{ ...draft(db.hospital, caseId, 2, 'step.logged'), body }]);
+        await append(sealed);
+        const before = head?.seq ?? 0;
+        head = await headOf(db.database.feed, caseId);
+        expect((await entriesAfter(db.database.feed, caseId, before, 2)).map(({ hash }) => hash)).toEqual([sealed[0]?.hash]);
+      }),
+      { numRuns: 100 },
+    );
+    expect(await verifyCase(db.database.feed, caseId)).toEqual({ ok: true, count: 101 });
   });
 
   test('is a clash when the number is taken, and writes nothing', async () => {

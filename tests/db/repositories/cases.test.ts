@@ -1,6 +1,7 @@
 import { v7 as uuidv7 } from 'uuid';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import type { Knex } from 'knex';
+import { assignmentsOfCases } from '@/db/repositories/cases/assignments-of-cases';
 import { assignmentsOf } from '@/db/repositories/cases/assignments-of';
 import { endAssignment } from '@/db/repositories/cases/end-assignment';
 import { eraseIdentity } from '@/db/repositories/cases/erase-identity';
@@ -8,6 +9,7 @@ import { findCase } from '@/db/repositories/cases/find-case';
 import { getCase } from '@/db/repositories/cases/get-case';
 import { insertCase } from '@/db/repositories/cases/insert-case';
 import { readIdentity } from '@/db/repositories/cases/read-identity';
+import { findHospital } from '@/db/repositories/hospitals/find-hospital';
 import { readsOfHospital } from '@/db/repositories/reads/reads-of-hospital';
 import { findSnapshot } from '@/db/repositories/snapshots/find-snapshot';
 import { insertSnapshot } from '@/db/repositories/snapshots/insert-snapshot';
@@ -78,6 +80,24 @@ describe('assignments', () => {
     expect(await within(db.hospital, (transaction) => endAssignment(transaction, assignment))).toBe(false);
     expect(await within(db.hospital, (transaction) => assignmentsOf(transaction, caseId))).toEqual([]);
     expect(await db.admin('case_assignments').where({ case_id: caseId }).count()).toEqual([{ count: 1 }]);
+  });
+});
+
+describe('assignmentsOfCases', () => {
+  test('names the present ones of the cases asked for, within the hospital', async () => {
+    const one = await addCase(db.database.app, db.hospital);
+    const two = await addCase(db.database.app, db.hospital);
+    const foreign = await addCase(db.database.app, db.other);
+    const found = await within(db.hospital, (transaction) => assignmentsOfCases(transaction, [one.caseId, two.caseId, foreign.caseId]));
+    expect(new Set(found.map(({ caseId }) => caseId))).toEqual(new Set([one.caseId, two.caseId]));
+    expect(found[0]).toMatchObject({ hospitalId: db.hospital.id, personId: db.hospital.deskId, role: 'neurophysiologist' });
+  });
+});
+
+describe('findHospital', () => {
+  test('finds the one that is set and no other', async () => {
+    expect(await within(db.hospital, (transaction) => findHospital(transaction, db.hospital.id))).toEqual({ hospitalId: db.hospital.id, name: 'Hospital north', timeZone: 'Europe/London' });
+    expect(await within(db.hospital, (transaction) => findHospital(transaction, db.other.id))).toBeNull();
   });
 });
 

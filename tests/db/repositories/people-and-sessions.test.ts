@@ -9,6 +9,7 @@ import { findPeople } from '@/db/repositories/people/find-people';
 import { liveMemberships } from '@/db/repositories/people/live-memberships';
 import { membersOf } from '@/db/repositories/people/members-of';
 import { findLiveSession } from '@/db/repositories/sessions/find-live-session';
+import { findLiveSessions } from '@/db/repositories/sessions/find-live-sessions';
 import { insertSession } from '@/db/repositories/sessions/insert-session';
 import { liveSessionIds } from '@/db/repositories/sessions/live-session-ids';
 import { noteReauthenticated } from '@/db/repositories/sessions/note-reauthenticated';
@@ -90,6 +91,13 @@ describe('findLiveSession', () => {
     for (const id of [revoked, past, uuidv7()]) expect(await findLiveSession(db.database.app, id)).toBeNull();
     expect(await liveSessionIds(db.database.app, [revoked, past])).toEqual(new Set());
     expect(await noteReauthenticated(db.database.app, revoked)).toBe(false);
+  });
+
+  test('gives the same for many at once, the live ones only', async () => {
+    const [live, revoked] = [await begin(), await begin()];
+    await revokeSession(db.database.app, revoked);
+    const found = await findLiveSessions(db.database.app, [live, revoked, uuidv7()]);
+    expect([...found]).toEqual([[live, await findLiveSession(db.database.app, live)]]);
   });
 
   test('drops a role as soon as the membership is revoked', async () => {
