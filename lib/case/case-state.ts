@@ -48,6 +48,12 @@ export interface Baseline extends BaselineValues {
   readonly isMarkedByCorrection: boolean;
 }
 
+/** A segment past its limit: its key, and whether its conduction time or its amplitude ratio showed it. */
+export interface BadSegment {
+  readonly key: string;
+  readonly measure: 'time' | 'ratio';
+}
+
 /** An open notice or alert of one nerve. */
 export interface Incident {
   readonly alertId: string;
@@ -60,9 +66,16 @@ export interface Incident {
   readonly badSeqs: readonly number[];
   /** Every path that was past a limit since the first, also those not named in the evidence. */
   readonly badPathIds: readonly string[];
-  /** Runs from this number on say where the change lies: the first abnormal one, or the one it returned with. */
+  /** Segments that were past a limit since the first, and by what: they have to come back too. */
+  readonly badSegments: readonly BadSegment[];
+  /** False while everything seen is a notice at most: then the first graver run asks for a repeat of its own. */
+  readonly mayBecomeAlert: boolean;
+  /** Runs from this number and time on say where the change lies: the first abnormal one, or the one it returned with. */
   readonly locateFromSeq: number;
+  readonly locateFromAt: string;
   readonly firstBadAt: string;
+  /** When the first abnormal run arrived: later than it was made when the desk had no link or the entry came late. */
+  readonly receivedAt: string;
   readonly raisedAt: string;
   readonly repeatDueAt: string | null;
   readonly pathIds: readonly string[];

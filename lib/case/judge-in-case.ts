@@ -42,6 +42,8 @@ function judgeReading(state: CaseState, judged: RunToJudge, row: ChannelReading)
   if (row.reading.kind === 'unusable') return notCompared('unusable');
   const baseline = state.baselines[baselineKey(pathId, run.electrodeId, run.family)];
   if (baseline === undefined) return notCompared(missingBaselineReason(state, pathId, run));
+  // A run that its baseline was made of, or a late entry from before it, had no baseline at its own time.
+  if (judged.at <= baseline.at) return notCompared('no-baseline');
   const likeness = comparability(conditionsOf(state, run, row.channelId), baselineConditions(state, baseline, row.channelId));
   if (likeness.kind === 'not-compared') return notCompared(likeness.reason);
   const seen = judgePath(row.reading, pathBaseline(baseline), state.plan.rules);

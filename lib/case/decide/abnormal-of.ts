@@ -1,7 +1,7 @@
-import type { Finding, FindingKind, SegmentJudgement } from '@/lib/alert/judgement';
-import type { Nerve } from '@/lib/alert/nerve-plan';
+import type { Finding, FindingKind } from '@/lib/alert/judgement';
 import { worstFinding } from '@/lib/alert/worst-finding';
-import type { CaseState, KeptRun } from '@/lib/case/case-state';
+import type { KeptRun } from '@/lib/case/case-state';
+import type { EntryBodies } from '@/lib/case/entry-bodies';
 import { isAbnormal } from '@/lib/case/is-abnormal';
 import { pathIdOf } from '@/lib/case/keys';
 
@@ -9,8 +9,9 @@ import { pathIdOf } from '@/lib/case/keys';
 export interface AbnormalRun {
   readonly runSeq: number;
   readonly at: string;
-  readonly siteId: string;
   readonly pathIds: readonly string[];
+  /** Those of the paths whose finding is not a notice at most. */
+  readonly alertPathIds: readonly string[];
   readonly finding: FindingKind;
   readonly mayBecomeAlert: boolean;
   readonly worstPercentOfBaseline: number | null;
@@ -18,63 +19,67 @@ export interface AbnormalRun {
   readonly isOwnEvidence: boolean;
 }
 
+/** What one path shows past a limit. */
+interface AbnormalPath {
+  readonly pathId: string;
+  readonly findings: readonly Finding[];
+  readonly percentOfBaseline: number | null;
+  readonly isOwn: boolean;
+}
+
 /**
  * What of a judged run is past a limit.
- * @param state the case with the run's judgement
- * @param nerve the nerve of the run's site
+ *
+ * Method: from the judgement itself, so that a run whose entry came late is not missed because a newer one was seen.
+ *
+ * @param judged the judgement of the run
  * @param kept the run
  * @returns the abnormal paths and the worst finding; null when nothing is past a limit
  * @source house rule
  */
-export function abnormalOf(state: CaseState, nerve: Nerve, kept: KeptRun): AbnormalRun | null {
-  const pathIds: string[] = [];
-  const findings: Finding[] = [];
-  const percents: number[] = [];
-  let isOwnEvidence = false;
-  for (const { channelId } of kept.run.readings) {
-    const pathId = pathIdOf(kept.run.siteId, channelId);
-    const record = recordOfRun(state, pathId, kept.seq);
-    const ofPath = record === null ? [] : record.findings;
-    const ofProximal = segmentsOf(state, nerve, channelId).filter((segment) => isEnd(segment.proximalSiteId, segment.proximalAt, kept));
-    const own = [...ofPath, ...ofProximal.flatMap((segment) => segment.findings)];
-    if (isAbnormal(own)) {
-      isOwnEvidence = true;
-      pathIds.push(pathId);
-      findings.push(...own);
-      const percent = record?.change.percentOfBaseline ?? null;
-      if (percent !== null) percents.push(percent);
-    }
-    for (const segment of segmentsOf(state, nerve, channelId)) {
-      if (!isEnd(segment.distalSiteId, segment.distalAt, kept) || !isAbnormal(segment.findings)) continue;
-      // What is slow or weak across a segment shows in the response from its proximal end.
-      pathIds.push(pathIdOf(segment.proximalSiteId, channelId));
-      findings.push(...segment.findings);
-    }
-  }
+export function abnormalOf(judged: EntryBodies['run.judged'], kept: KeptRun): AbnormalRun | null {
+  const paths = [...ownPaths(judged, kept), ...proximalPaths(judged, kept)];
+  const findings = paths.flatMap((path) => path.findings);
   const worst = worstFinding(findings);
   if (worst === null) return null;
+  const percents = paths.map((path) => path.percentOfBaseline).filter((percent) => percent !== null);
   return {
     runSeq: kept.seq,
     at: kept.at,
-    siteId: kept.run.siteId,
-    pathIds: [...new Set(pathIds)],
+    pathIds: [...new Set(paths.map((path) => path.pathId))],
+    alertPathIds: [...new Set(paths.filter((path) => path.findings.some((finding) => finding.mayBecomeAlert)).map((path) => path.pathId))],
     finding: worst.kind,
     mayBecomeAlert: findings.some((finding) => finding.mayBecomeAlert),
     worstPercentOfBaseline: percents.length === 0 ? null : Math.min(...percents),
-    isOwnEvidence,
+    isOwnEvidence: paths.some((path) => path.isOwn),
   };
 }
 
-function recordOfRun(state: CaseState, pathId: string, runSeq: number) {
-  const record = state.paths[pathId];
-  if (record?.compared?.seq === runSeq) return record.compared;
-  return record?.previous?.seq === runSeq ? record.previous : null;
+function ownPaths(judged: EntryBodies['run.judged'], kept: KeptRun): readonly AbnormalPath[] {
+  return judged.paths
+    .map((path) => {
+      const ofSegments = judged.segments.filter(
+        (segment) => segment.proximalSiteId === kept.run.siteId && pathIdOf(segment.proximalSiteId, segment.channelId) === path.pathId,
+      );
+      const ofPath = path.kind === 'compared' ? path.findings : [];
+      return {
+        pathId: path.pathId,
+        findings: [...ofPath, ...ofSegments.flatMap((segment) => segment.findings)],
+        percentOfBaseline: path.kind === 'compared' ? path.change.percentOfBaseline : null,
+        isOwn: true,
+      };
+    })
+    .filter((path) => isAbnormal(path.findings));
 }
 
-function segmentsOf(state: CaseState, nerve: Nerve, channelId: string): readonly SegmentJudgement[] {
-  return Object.values(state.segments).filter((segment) => segment.nerveId === nerve.id && segment.channelId === channelId);
-}
-
-function isEnd(siteId: string, at: string, kept: KeptRun): boolean {
-  return siteId === kept.run.siteId && at === kept.at;
+/** What is slow or weak across a segment shows in the response from its proximal end. */
+function proximalPaths(judged: EntryBodies['run.judged'], kept: KeptRun): readonly AbnormalPath[] {
+  return judged.segments
+    .filter((segment) => segment.distalSiteId === kept.run.siteId && isAbnormal(segment.findings))
+    .map((segment) => ({
+      pathId: pathIdOf(segment.proximalSiteId, segment.channelId),
+      findings: segment.findings,
+      percentOfBaseline: null,
+      isOwn: false,
+    }));
 }

@@ -1,4 +1,4 @@
-import type { CaseState } from '@/lib/case/case-state';
+import type { CaseState, KeptRun } from '@/lib/case/case-state';
 import type { CaseCommand, Refusal } from '@/lib/case/commands';
 import { alertDrafts } from '@/lib/case/decide/alert-drafts';
 import type { DecideContext } from '@/lib/case/decide/decide-context';
@@ -6,14 +6,19 @@ import { draft } from '@/lib/case/decide/draft';
 import { evolveDraft } from '@/lib/case/decide/evolve-draft';
 import { judgedDraft } from '@/lib/case/decide/judged-draft';
 import { roundRun } from '@/lib/case/decide/round-run';
+import { runProblem } from '@/lib/case/decide/run-problem';
 import type { EntryDraft } from '@/lib/case/entry-bodies';
 
 /**
  * Corrects or withdraws a run and judges its paths again.
  *
  * Method: an alert whose every abnormal run is gone is withdrawn and says so; an alert with other evidence stays.
- * A correction that shows a change the typing had hidden raises it with the run's own time.
+ * A correction that shows a change the typing had hidden raises it with the run's own time. A run that its baseline was
+ * made of, or that is older, is not held against that baseline.
  *
+ * @param state the case
+ * @param command the run as it should read, or null to withdraw it
+ * @param context times of the command
  * @returns drafts: run.corrected, run.judged, then alert entries; or a refusal
  * @source product rule: a correction judges its path again; nothing ends by itself
  */
@@ -33,13 +38,15 @@ export function decideCorrection(
     };
   }
   const run = command.run === null ? null : roundRun(command.run);
+  const problem = run === null ? null : runProblem(state, run);
+  if (problem !== null) return problem;
   const corrected = draft('run.corrected', { runSeq: command.runSeq, run, reason: command.reason });
   const drafts: EntryDraft[] = [corrected];
   let after = evolveDraft(state, corrected, context);
-  const judged = run === null ? null : judgedDraft(after, command.runSeq);
+  const judged = run === null || isOlderThanBaseline(state, kept) ? null : judgedDraft(after, command.runSeq);
   if (judged !== null) {
-    drafts.push(judged);
-    after = evolveDraft(after, judged, context);
+    drafts.push(judged.entry);
+    after = evolveDraft(after, judged.entry, context);
   }
   const withdrawn = Object.values(state.incidents).filter(
     (incident) => incident.badSeqs.includes(command.runSeq) && after.incidents[incident.nerveId]?.badSeqs.length === 0,
@@ -47,5 +54,9 @@ export function decideCorrection(
   for (const incident of withdrawn) {
     drafts.push(draft('alert.withdrawn', { alertId: incident.alertId, runSeq: command.runSeq }));
   }
-  return withdrawn.length > 0 || judged === null ? drafts : [...drafts, ...alertDrafts(state, after, command.runSeq)];
+  return withdrawn.length > 0 || judged === null ? drafts : [...drafts, ...alertDrafts(state, after, judged.body, context)];
+}
+
+function isOlderThanBaseline(state: CaseState, kept: KeptRun): boolean {
+  return Object.values(state.baselines).some((baseline) => baseline.pathId.startsWith(`${kept.run.siteId}/`) && kept.at <= baseline.at);
 }

@@ -6,11 +6,15 @@ import { draft } from '@/lib/case/decide/draft';
 import { evolveDraft } from '@/lib/case/decide/evolve-draft';
 import { judgedDraft } from '@/lib/case/decide/judged-draft';
 import { roundRun } from '@/lib/case/decide/round-run';
+import { runProblem } from '@/lib/case/decide/run-problem';
 import type { EntryDraft } from '@/lib/case/entry-bodies';
 
 /**
  * Logs a run, judges it, and raises, confirms, worsens, locates or recovers what it shows.
- * @returns drafts: run.logged, run.judged, then alert entries; a refusal only for a site or channel the plan does not have
+ * @param state the case
+ * @param command the run
+ * @param context times of the command
+ * @returns drafts: run.logged, run.judged, then alert entries; a refusal only for what the plan does not have, or an amplitude of 0
  * @source product rule: a well-formed run is never refused for the case's state
  */
 export function decideRun(
@@ -18,25 +22,13 @@ export function decideRun(
   command: CaseCommand & { name: 'log-run' },
   context: DecideContext,
 ): readonly EntryDraft[] | Refusal {
-  const sites = state.plan.nerves.flatMap((nerve) => nerve.sites);
-  if (!sites.some((site) => site.id === command.run.siteId)) {
-    const known = sites.map((site) => site.id).join(', ');
-    return { code: 'site-unknown', message: `Site unknown: ${command.run.siteId}. The plan has ${known}` };
-  }
-  const channels = state.plan.channels.map((channel) => channel.id);
-  const stranger = command.run.readings.find((row) => !channels.includes(row.channelId));
-  if (stranger !== undefined) {
-    return { code: 'channel-unknown', message: `Channel unknown: ${stranger.channelId}. The plan has ${channels.join(', ')}` };
-  }
-  if (!state.plan.electrodes.some((electrode) => electrode.id === command.run.electrodeId)) {
-    const known = state.plan.electrodes.map((electrode) => electrode.id).join(', ');
-    return { code: 'electrode-unknown', message: `Electrode unknown: ${command.run.electrodeId}. The plan has ${known}` };
-  }
-  const logged = draft('run.logged', roundRun(command.run));
+  const run = roundRun(command.run);
+  const problem = runProblem(state, run);
+  if (problem !== null) return problem;
+  const logged = draft('run.logged', run);
   const afterRun = evolveDraft(state, logged, context);
-  const runSeq = state.seq + 1;
-  const judged = judgedDraft(afterRun, runSeq);
+  const judged = judgedDraft(afterRun, state.seq + 1);
   if (judged === null) return [logged];
-  const afterJudgement = evolveDraft(afterRun, judged, context);
-  return [logged, judged, ...alertDrafts(state, afterJudgement, runSeq)];
+  const afterJudgement = evolveDraft(afterRun, judged.entry, context);
+  return [logged, judged.entry, ...alertDrafts(state, afterJudgement, judged.body, context)];
 }

@@ -4,14 +4,16 @@ import type { CaseState, Incident } from '@/lib/case/case-state';
 import type { AbnormalRun } from '@/lib/case/decide/abnormal-of';
 import type { AlertEvidence } from '@/lib/case/entry-bodies';
 import { isComingBack } from '@/lib/case/is-coming-back';
+import { isSince } from '@/lib/case/is-since';
 import { locateInCase } from '@/lib/case/locate-in-case';
 
 /**
  * The evidence of a notice or alert: paths, worst value, location and onset bracket.
  * @param state the case with the run's judgement
+ * @param nerve the nerve
  * @param abnormal the run that is past a limit
  * @param open the id, and the incident it belongs to if one is open
- * @returns evidence; the bracket of an open incident stays, its worst value and paths only grow
+ * @returns evidence; of an open incident the worst value and the paths only grow, and the bracket only moves to an earlier run
  * @source product rule: onset bracket is last good, first bad, every step between
  */
 export function evidenceOf(
@@ -21,37 +23,49 @@ export function evidenceOf(
   open: { readonly alertId: string; readonly incident: Incident | null },
 ): AlertEvidence {
   const { incident } = open;
-  const pathIds = [...new Set([...(incident?.pathIds ?? []), ...abnormal.pathIds])];
-  const location = locationOf(state, nerve, abnormal, incident);
-  const shared = {
+  return {
     alertId: open.alertId,
     nerveId: nerve.id,
     runSeq: abnormal.runSeq,
-    pathIds,
+    pathIds: [...new Set([...(incident?.pathIds ?? []), ...abnormal.pathIds])],
     finding: abnormal.finding,
-    worstPercentOfBaseline: abnormal.worstPercentOfBaseline,
-    location,
+    worstPercentOfBaseline: worstPercent(abnormal, incident),
+    location: locationOf(state, nerve, abnormal, incident),
+    ...bracketOf(state, abnormal, incident),
     judgeVersion,
   };
-  if (incident !== null) {
-    const { lastGoodAt, firstBadAt, stepsBetween } = incident;
-    return { ...shared, lastGoodAt, firstBadAt, stepsBetween };
-  }
-  const lastGoodAt = lastGood(state, abnormal.pathIds);
-  const stepsBetween = state.steps
-    .filter((step) => step.at <= abnormal.at && (lastGoodAt === null || step.at > lastGoodAt))
-    .map((step) => step.since);
-  return { ...shared, lastGoodAt, firstBadAt: abnormal.at, stepsBetween };
+}
+
+/** What came back and fell again is counted from there. */
+function worstPercent(abnormal: AbnormalRun, incident: Incident | null): number | null {
+  const before = incident === null || incident.recoveredAt !== null ? null : incident.worstPercentOfBaseline;
+  const percents = [before, abnormal.worstPercentOfBaseline].filter((percent) => percent !== null);
+  return percents.length === 0 ? null : Math.min(...percents);
 }
 
 function locationOf(state: CaseState, nerve: Nerve, abnormal: AbnormalRun, incident: Incident | null): Location {
   const unknown: Location = { kind: 'not-known', nextSiteId: null };
-  if (incident === null || incident.recoveredAt !== null) return locateInCase(state, nerve, abnormal.runSeq) ?? unknown;
+  if (incident === null || incident.recoveredAt !== null) {
+    return locateInCase(state, nerve, { at: abnormal.at, seq: abnormal.runSeq }) ?? unknown;
+  }
   if (isComingBack(state, incident)) return incident.location;
-  return locateInCase(state, nerve, incident.locateFromSeq) ?? incident.location;
+  return locateInCase(state, nerve, { at: incident.locateFromAt, seq: incident.locateFromSeq }) ?? incident.location;
 }
 
-function lastGood(state: CaseState, pathIds: readonly string[]): string | null {
-  const times = pathIds.map((pathId) => state.paths[pathId]?.lastGoodAt ?? null).filter((at) => at !== null);
-  return times.length === 0 ? null : times.reduce((latest, at) => (at > latest ? at : latest));
+function bracketOf(state: CaseState, abnormal: AbnormalRun, incident: Incident | null) {
+  if (incident !== null && incident.firstBadAt <= abnormal.at) {
+    const { lastGoodAt, firstBadAt, stepsBetween } = incident;
+    return { lastGoodAt, firstBadAt, stepsBetween };
+  }
+  const lastGoodAt = lastGoodBefore(state, abnormal);
+  const stepsBetween = state.steps
+    .filter((step) => step.at <= abnormal.at && (lastGoodAt === null || step.at > lastGoodAt))
+    .sort((first, second) => (isSince(first, second) ? 1 : -1))
+    .map((step) => step.since);
+  return { lastGoodAt, firstBadAt: abnormal.at, stepsBetween };
+}
+
+function lastGoodBefore(state: CaseState, abnormal: AbnormalRun): string | null {
+  const times = abnormal.pathIds.map((pathId) => state.paths[pathId]?.lastGoodAt ?? null).filter((at) => at !== null && at <= abnormal.at);
+  return times.reduce<string | null>((latest, at) => (latest === null || (at !== null && at > latest) ? at : latest), null);
 }

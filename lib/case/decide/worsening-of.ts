@@ -3,9 +3,19 @@ import type { Nerve } from '@/lib/alert/nerve-plan';
 import type { CaseState, Incident } from '@/lib/case/case-state';
 import type { AbnormalRun } from '@/lib/case/decide/abnormal-of';
 import type { AlertEvidence, Worsening } from '@/lib/case/entry-bodies';
+import { channelOfPath } from '@/lib/case/keys';
 
 /**
  * In which ways an open alert got worse since it was last raised.
+ *
+ * Method: against what it was raised with. A finding that is a notice at most makes no alert worse, save after its
+ * recovery. A late entry from before the recovery is no return.
+ *
+ * @param state the case with the run's judgement
+ * @param nerve the nerve
+ * @param incident its open alert as it was before the run
+ * @param abnormal the run that is past a limit
+ * @param evidence the evidence with the run
  * @returns the ways, empty when it is no worse
  * @source product rule: partial to lost, 20 points more (custom), another muscle or segment, return after recovery
  */
@@ -16,12 +26,13 @@ export function worseningOf(
   abnormal: AbnormalRun,
   evidence: AlertEvidence,
 ): readonly Worsening[] {
+  if (incident.recoveredAt !== null) return abnormal.at > incident.recoveredAt ? ['returned'] : [];
   const ways: Worsening[] = [];
   if (abnormal.finding === 'response-lost' && !incident.isLost) ways.push('lost');
   if (isPointsWorse(state, incident, abnormal)) ways.push('twenty-points');
-  if (abnormal.pathIds.some((pathId) => !channelsOf(incident.pathIds).includes(channelOf(pathId)))) ways.push('another-muscle');
+  const channelIds = incident.pathIds.map(channelOfPath);
+  if (abnormal.alertPathIds.some((pathId) => !channelIds.includes(channelOfPath(pathId)))) ways.push('another-muscle');
   if (isFurtherDistal(nerve, incident.location, evidence.location)) ways.push('another-segment');
-  if (incident.recoveredAt !== null) ways.push('returned');
   return ways;
 }
 
@@ -30,14 +41,6 @@ function isPointsWorse(state: CaseState, incident: Incident, abnormal: AbnormalR
   const now = abnormal.worstPercentOfBaseline;
   if (before === null || now === null) return false;
   return before - now >= state.plan.rules.worseningPercent;
-}
-
-function channelOf(pathId: string): string {
-  return pathId.slice(pathId.indexOf('/') + 1);
-}
-
-function channelsOf(pathIds: readonly string[]): readonly string[] {
-  return pathIds.map(channelOf);
 }
 
 /** A located change that now reaches distal to where it ended: a site that was good is not good any more. */

@@ -1,4 +1,5 @@
 import type { CaseState, Incident } from '@/lib/case/case-state';
+import { badSegmentsOf } from '@/lib/case/evolve/bad-segments-of';
 import type { AlertEvidence, CaseEntry } from '@/lib/case/entry-bodies';
 
 type AlertEntry = CaseEntry & {
@@ -13,8 +14,10 @@ const keptWithdrawn = 5;
 /** Opens, updates and ends the one incident of a nerve. @returns the state after it @source house rule: one alert per nerve */
 export function evolveAlert(state: CaseState, entry: AlertEntry): CaseState {
   if (entry.kind === 'notice.raised') {
+    const open = state.incidents[entry.body.nerveId];
+    if (open?.alertId === entry.body.alertId) return withIncident(state, askedAnew(open, entry));
     const count = (state.alertCounts[entry.body.nerveId] ?? 0) + 1;
-    return withIncident({ ...state, alertCounts: { ...state.alertCounts, [entry.body.nerveId]: count } }, opened(entry));
+    return withIncident({ ...state, alertCounts: { ...state.alertCounts, [entry.body.nerveId]: count } }, opened(state, entry));
   }
   const incident = Object.values(state.incidents).find((open) => open.alertId === entry.body.alertId);
   if (incident === undefined) return state;
@@ -27,11 +30,11 @@ export function evolveAlert(state: CaseState, entry: AlertEntry): CaseState {
       return { ...withoutIncident(state, incident.nerveId), withdrawn: [...state.withdrawn, withdrawn].slice(-keptWithdrawn) };
     }
     default:
-      return withIncident(state, updated(incident, entry));
+      return withIncident(state, updated(state, incident, entry));
   }
 }
 
-function opened(entry: CaseEntry & { kind: 'notice.raised' }): Incident {
+function opened(state: CaseState, entry: CaseEntry & { kind: 'notice.raised' }): Incident {
   return {
     ...evidenceFields(entry.body),
     alertId: entry.body.alertId,
@@ -41,8 +44,11 @@ function opened(entry: CaseEntry & { kind: 'notice.raised' }): Incident {
     firstSeq: entry.body.runSeq,
     badSeqs: [entry.body.runSeq],
     badPathIds: entry.body.pathIds,
+    badSegments: segmentsOfRun(state, entry.body),
+    mayBecomeAlert: entry.body.repeatDueAt !== null,
     locateFromSeq: entry.body.runSeq,
-    firstBadAt: entry.body.firstBadAt,
+    locateFromAt: entry.body.firstBadAt,
+    receivedAt: entry.recordedAt,
     raisedAt: entry.recordedAt,
     repeatDueAt: entry.body.repeatDueAt,
     toldAt: null,
@@ -54,8 +60,16 @@ function opened(entry: CaseEntry & { kind: 'notice.raised' }): Incident {
   };
 }
 
+/** A graver finding on a nerve whose notice could not become an alert: the same notice, with a repeat of its own. */
+function askedAnew(incident: Incident, entry: CaseEntry & { kind: 'notice.raised' }): Incident {
+  const { repeatDueAt } = entry.body;
+  const told = { toldAt: null, readBackAt: null };
+  return { ...incident, ...evidenceFields(entry.body), ...told, raisedAt: entry.recordedAt, repeatDueAt, mayBecomeAlert: repeatDueAt !== null };
+}
+
 function evidenceFields(body: AlertEvidence) {
   return {
+    firstBadAt: body.firstBadAt,
     finding: body.finding,
     pathIds: body.pathIds,
     worstPercentOfBaseline: body.worstPercentOfBaseline,
@@ -67,6 +81,7 @@ function evidenceFields(body: AlertEvidence) {
 }
 
 function updated(
+  state: CaseState,
   incident: Incident,
   entry: Exclude<AlertEntry, { kind: 'notice.raised' | 'notice.settled' | 'alert.ended' | 'alert.withdrawn' }>,
 ): Incident {
@@ -81,13 +96,14 @@ function updated(
         repeatDueAt: null,
         // What was told of the notice was not yet told of the alert.
         toldAt: incident.level === 'alert' ? incident.toldAt : null,
+        readBackAt: incident.level === 'alert' ? incident.readBackAt : null,
       };
     case 'alert.worsened':
       return {
         ...incident,
         ...evidenceFields(entry.body),
         isLost: incident.isLost || entry.body.finding === 'response-lost',
-        ...(entry.body.worsening.includes('returned') ? { locateFromSeq: entry.body.runSeq, badPathIds: entry.body.pathIds } : {}),
+        ...(entry.body.worsening.includes('returned') ? returned(state, entry) : {}),
         toldAt: null,
         readBackAt: null,
         actedAt: null,
@@ -105,6 +121,17 @@ function updated(
     case 'alert.acted':
       return { ...incident, actedAt: entry.eventAt, action: entry.body.action };
   }
+}
+
+/** What is past a limit again says where the change lies now; what is not, came back. */
+function returned(state: CaseState, { body, eventAt }: CaseEntry & { kind: 'alert.worsened' }) {
+  const locateFromAt = state.runs.find((run) => run.seq === body.runSeq)?.at ?? eventAt;
+  return { locateFromSeq: body.runSeq, locateFromAt, badPathIds: body.pathIds, badSegments: segmentsOfRun(state, body) };
+}
+
+function segmentsOfRun(state: CaseState, body: AlertEvidence) {
+  const kept = state.runs.find((run) => run.seq === body.runSeq);
+  return kept === undefined ? [] : badSegmentsOf(state, body.nerveId, kept);
 }
 
 function withIncident(state: CaseState, incident: Incident): CaseState {

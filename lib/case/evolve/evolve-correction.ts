@@ -1,31 +1,63 @@
-import type { CaseState, PathRecord } from '@/lib/case/case-state';
+import type { SegmentJudgement } from '@/lib/alert/judgement';
+import type { Baseline, CaseState, KeptRun, PathRecord } from '@/lib/case/case-state';
 import type { CaseEntry } from '@/lib/case/entry-bodies';
+import { isAbnormal } from '@/lib/case/is-abnormal';
 
-/** Replaces or withdraws a run: its judgements go, baselines that used it are marked. @returns the state after it @source house rule */
+/**
+ * Replaces or withdraws a run: its judgements and the segments computed from it go, baselines that used it are marked.
+ * A corrected run is judged again by the entry that follows; only a withdrawn one is no evidence any more.
+ * @param state the case
+ * @param entry the correction
+ * @returns the state after it
+ * @source house rule
+ */
 export function evolveCorrection(state: CaseState, entry: CaseEntry & { kind: 'run.corrected' }): CaseState {
   const { runSeq, run } = entry.body;
+  const gone = state.runs.find((kept) => kept.seq === runSeq);
   const runs =
     run === null
       ? state.runs.filter((kept) => kept.seq !== runSeq)
       : state.runs.map((kept) => (kept.seq === runSeq ? { ...kept, run: { ...run, note: run.note ?? null } } : kept));
-  const paths = Object.fromEntries(Object.entries(state.paths).map(([id, record]) => [id, without(record, runSeq)]));
-  const baselines = Object.fromEntries(
-    Object.entries(state.baselines).map(([key, baseline]) => [
-      key,
-      baseline.runSeqs.includes(runSeq) ? { ...baseline, isMarkedByCorrection: true } : baseline,
-    ]),
-  );
-  const incidents = Object.fromEntries(
-    Object.entries(state.incidents).map(([id, incident]) => [
-      id,
-      { ...incident, badSeqs: incident.badSeqs.filter((seq) => seq !== runSeq) },
-    ]),
-  );
-  return { ...state, runs, paths, baselines, incidents };
+  const marked = {
+    baselines: mapValues(state.baselines, (baseline) => markedBaseline(baseline, runSeq)),
+    openingBaselines: mapValues(state.openingBaselines, (baseline) => markedBaseline(baseline, runSeq)),
+  };
+  if (gone === undefined) return { ...state, runs, ...marked };
+  const paths = mapValues(state.paths, (record) => without(record, gone));
+  const segments = mapValues(state.segments, (segment) => (isFrom(segment, gone) ? null : segment));
+  const incidents =
+    run === null
+      ? mapValues(state.incidents, (incident) => ({ ...incident, badSeqs: incident.badSeqs.filter((seq) => seq !== runSeq) }))
+      : state.incidents;
+  return { ...state, runs, ...marked, paths, segments, incidents };
 }
 
-function without(record: PathRecord, runSeq: number): PathRecord {
-  if (record.compared?.seq === runSeq) return { ...record, compared: record.previous, previous: null };
-  if (record.previous?.seq === runSeq) return { ...record, previous: null };
-  return record;
+/** The record with every value changed; what becomes null is left out. */
+function mapValues<T>(record: Readonly<Record<string, T>>, change: (value: T) => T | null): Record<string, T> {
+  return Object.fromEntries(
+    Object.entries(record).flatMap(([key, value]) => {
+      const changed = change(value);
+      return changed === null ? [] : [[key, changed]];
+    }),
+  );
+}
+
+function markedBaseline(baseline: Baseline, runSeq: number): Baseline {
+  return baseline.runSeqs.includes(runSeq) ? { ...baseline, isMarkedByCorrection: true } : baseline;
+}
+
+function isFrom(segment: SegmentJudgement, gone: KeptRun): boolean {
+  const { siteId } = gone.run;
+  return (segment.proximalSiteId === siteId && segment.proximalAt === gone.at) || (segment.distalSiteId === siteId && segment.distalAt === gone.at);
+}
+
+/** A path without one of its runs: the run before it stands again, or nothing was tested. */
+function without(record: PathRecord, gone: KeptRun): PathRecord | null {
+  const [compared = null, previous = null] = [record.compared, record.previous].filter((kept) => kept !== null && kept.seq !== gone.seq);
+  const good = [compared, previous].find((kept) => kept !== null && kept.change.percentOfBaseline !== null && !isAbnormal(kept.findings));
+  const lastGoodAt = record.lastGoodAt === gone.at ? (good?.at ?? null) : record.lastGoodAt;
+  const kept = { ...record, compared, previous, lastGoodAt };
+  if (record.lastSeq !== gone.seq) return kept;
+  if (compared === null) return null;
+  return { ...kept, lastSeq: compared.seq, lastAt: compared.at, lastReading: compared.reading, lastNotCompared: null };
 }
