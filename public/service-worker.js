@@ -37,7 +37,7 @@ self.addEventListener('fetch', (event) => {
 
 self.addEventListener('message', (event) => {
   const message = event.data;
-  if (message?.kind === 'keep-page') event.waitUntil(keepPage(message.path, message.assets));
+  if (message?.kind === 'keep-page') event.waitUntil(keepAndTell(message, event.source));
   if (message?.kind === 'forget-pages') event.waitUntil(Promise.all([caches.delete(pagesName), caches.delete(listsName)]));
 });
 
@@ -66,11 +66,20 @@ async function openAsset(request, url) {
   return fetch(request);
 }
 
+/** The page shows whether it is kept: a desk that will not load without a link must say so while there is one. */
+async function keepAndTell({ path, assets }, page) {
+  const isKept = await keepPage(path, assets).then(
+    () => true,
+    () => false,
+  );
+  page?.postMessage({ kind: 'page-kept', path, isKept });
+}
+
 /** Fetches the page and everything its HTML, its styles and its first run need; swaps it in only when all of it is there. */
 async function keepPage(path, loadedAssets) {
-  if (typeof path !== 'string' || !path.startsWith('/') || isNeverKept(path)) return;
+  if (typeof path !== 'string' || !path.startsWith('/') || isNeverKept(path)) throw new Error('Not kept: no path of a page');
   const response = await fetch(path, { credentials: 'same-origin', redirect: 'error', headers: { accept: 'text/html' } });
-  if (!response.ok || !(response.headers.get('content-type') ?? '').startsWith('text/html')) return;
+  if (!response.ok || !(response.headers.get('content-type') ?? '').startsWith('text/html')) throw new Error(`Not kept: ${path} answered ${response.status}`);
   const html = await response.clone().text();
   const named = html.match(/\/_next\/static\/[A-Za-z0-9_\-./~%()[\]@]+\.(?:js|css|woff2)(?:\?[A-Za-z0-9_\-=&.]*)?/g) ?? [];
   const given = Array.isArray(loadedAssets) ? loadedAssets.filter((one) => typeof one === 'string' && isAsset(one)) : [];

@@ -62,6 +62,7 @@ export class DeskIdentity {
   /** Signed out: nobody works here. */
   async forget(): Promise<void> {
     this.unconfirm();
+    this.started = null;
     this.personId = null;
     this.parts.publish({ status: 'signed-out' });
     await this.parts.personChanged(null);

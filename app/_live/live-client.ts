@@ -70,6 +70,9 @@ export class LiveClient {
       alwaysStale: () => this.socket?.reconnect(),
     });
     this.paints = new PaintConfirmations({ request: (body, timeoutMs) => this.request('painted', body, timeoutMs), isConnected: () => this.isConnected(), nowMs: () => this.nowMs(), wait });
+    parts.tabs.hear((message) => {
+      if (message.kind === 'signed-out') void this.leaveDesk();
+    });
     parts.store.setState({ isStorageDurable: parts.storage.waiting.isDurable });
   }
 
@@ -113,10 +116,18 @@ export class LiveClient {
 
   /** Drops the connection and everything of the person from this tab; the waiting commands stay in the browser. */
   async signOut(): Promise<void> {
-    this.disconnect();
-    await this.identity.forget();
+    await this.leaveDesk();
     await this.parts.storage.forgetReadings();
     this.parts.tabs.tell({ kind: 'signed-out' });
+  }
+
+  private async leaveDesk(): Promise<void> {
+    if (this.viewer === 'wall') return;
+    this.disconnect();
+    for (const { follower } of this.followers.values()) follower.stop();
+    this.followers.clear();
+    this.parts.store.setState({ feeds: {} });
+    await this.identity.forget();
   }
 
   private async begin(caseId: string, viewer: Viewer): Promise<void> {

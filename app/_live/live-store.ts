@@ -69,6 +69,8 @@ export interface LiveStore {
   readonly session: DeskSession;
   /** False when this browser keeps nothing: entries that wait are lost on reload, and the desk must say so. */
   readonly isStorageDurable: boolean;
+  /** Whether this page loads without a link; null before the service worker answered. */
+  readonly isPageKept: boolean | null;
 }
 
 /** A feed before anything came. */
@@ -91,6 +93,7 @@ export const emptyLiveStore: LiveStore = {
   waiting: [],
   session: { status: 'unknown' },
   isStorageDurable: true,
+  isPageKept: null,
 };
 
 /** The one store of live state. Written only inside `app/_live`. */
