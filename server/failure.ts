@@ -28,9 +28,9 @@ export const notFound = (): Failure => failure('not-found', 'not-found', 'Not fo
 /** Nobody is signed in, or no longer. */
 export const notSignedIn = (): Failure => failure('not-signed-in', 'not-signed-in', 'Not signed in. Sign in again; what waits in this browser is kept.');
 
-/** The database did not answer: nothing may be called saved. */
+/** Database or server met a fault: nothing may be called saved. */
 export const notSaved = (): Failure =>
-  failure('not-saved', 'not-saved', 'Not saved: the database did not answer. It is safe to send the same again.');
+  failure('not-saved', 'not-saved', 'Not saved: the server or its database met a fault. It is safe to send the same again.');
 
-/** The database did not answer a question. */
-export const notReadable = (): Failure => failure('not-saved', 'not-reachable', 'Not read: the database did not answer. Try again.');
+/** Database or server met a fault while something was read. */
+export const notReadable = (): Failure => failure('not-saved', 'not-reachable', 'Not read: the server or its database met a fault. Try again.');

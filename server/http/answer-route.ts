@@ -11,12 +11,12 @@ export function sourceOf(headers: Pick<Headers, 'get'>): RequestSource {
 export async function answerRoute(request: Request, ask: (source: RequestSource) => Promise<Reply<object>>): Promise<Response> {
   try {
     const { status, body, cookies } = await ask(sourceOf(request.headers));
-    const headers = new Headers({ 'cache-control': 'no-store' });
+    const headers = new Headers();
     for (const cookie of cookies) headers.append('set-cookie', cookie);
     return Response.json(body, { status: statusOf(status, body), headers });
   } catch (thrown) {
     if (!isFailure(thrown)) throw thrown;
-    return Response.json(thrown.reply, { status: thrown.status, headers: { 'cache-control': 'no-store' } });
+    return Response.json(thrown.reply, { status: thrown.status });
   }
 }
 

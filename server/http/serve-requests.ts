@@ -48,8 +48,9 @@ export function serveRequests(options: { allowed: AllowedOrigins; publicUrl: str
 /** Next sets its own cache header late; ours must be the last word on everything that may hold a case. */
 function keepUnstored(response: ServerResponse): void {
   response.setHeader('cache-control', 'no-store');
-  const setHeader = response.setHeader.bind(response);
+  const [setHeader, appendHeader] = [response.setHeader.bind(response), response.appendHeader.bind(response)];
   response.setHeader = (name, value) => setHeader(name, name.toLowerCase() === 'cache-control' ? 'no-store' : value);
+  response.appendHeader = (name, value) => (name.toLowerCase() === 'cache-control' ? response : appendHeader(name, value));
 }
 
 /** Answers without reading the body; the connection ends, because bytes of that body may still come. */

@@ -1,6 +1,6 @@
 import { followRequestSchema, type FollowReply } from '@/lib/contracts/channel/messages';
 import { contractVersion } from '@/lib/contracts/contract-version';
-import { isFailure } from '@/server/failure';
+import { isFailure, notReadable } from '@/server/failure';
 import { roomOf, type LiveSocket } from '@/server/live/live-socket';
 import type { Departures } from '@/server/live/departures';
 import type { Presence } from '@/server/cases/presence';
@@ -46,7 +46,7 @@ export async function follow(parts: FollowParts, socket: LiveSocket, message: un
     if (isNew) await socket.leave(roomOf(caseId, socket.data.visitor.kind));
     if (isFailure(cause) && cause.reply.kind === 'not-found') return { kind: 'refused', code: 'not-found', message: cause.message };
     parts.context.log.warn({ err: cause, caseId }, 'A viewer could not follow.');
-    return { kind: 'refused', code: 'not-saved', message: 'Not read: the database did not answer. Try again.' };
+    return { kind: 'refused', code: 'not-saved', message: notReadable().message };
   }
 }
 

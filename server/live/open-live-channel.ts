@@ -111,7 +111,9 @@ function listenToViewers(io: LiveServer, parts: Parts): void {
       if (!tooMany(answer)) void giveCommandMessage(context, socket, message).then((given) => reply(answer, given));
     });
     socket.on('painted', (message, answer) => {
-      if (!tooMany(answer) && notePainted(context, painted, socket, message)) reply(answer, { kind: 'noted' });
+      if (tooMany(answer)) return;
+      const isNoted = notePainted(context, painted, socket, message);
+      reply(answer, isNoted ? { kind: 'noted' } : { kind: 'refused', code: 'bad-request', message: 'Not noted: a wall confirms what it painted of its own case only.' });
     });
     socket.on('error', (cause) => context.log.warn({ err: cause }, 'A socket met a fault.'));
     socket.on('disconnect', () => {
