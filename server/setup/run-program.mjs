@@ -60,5 +60,7 @@ export async function endRunningPrograms() {
  */
 export function tellingLine(output) {
   const lines = output.replace(/\u001b\[[0-9;]*m/g, '').split('\n').map((line) => line.trim()).filter(Boolean);
-  return lines.find((line) => /\b(error|fatal|failed|denied)\b/i.test(line)) ?? lines.at(-1) ?? 'it said nothing';
+  // Headings that only announce the reason.
+  const reasons = lines.filter((line) => !/build error occurred|build failed with|^migration .* failed with error/i.test(line));
+  return reasons.find((line) => /\b(error|fatal|failed|denied)\b/i.test(line)) ?? reasons.at(-1) ?? 'it said nothing';
 }

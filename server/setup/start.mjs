@@ -13,6 +13,9 @@ const root = fileURLToPath(new URL('../..', import.meta.url)).replace(/\/$/, '')
 const stop = new AbortController();
 let stateFolder = '';
 
+// A terminal that was closed must not take the product's watch with it.
+for (const output of [process.stdout, process.stderr]) output.on('error', () => {});
+
 for (const signal of /** @type {const} */ (['SIGINT', 'SIGTERM', 'SIGHUP'])) {
   process.on(signal, () => {
     stop.abort();
