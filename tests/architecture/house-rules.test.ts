@@ -55,11 +55,11 @@ describe('each rule of the house can fail', () => {
     expect(checkFileName(path)).toEqual([]);
   });
 
-  it.each(['const data = 1;', 'function f(item: number) {}', 'const caseData = 1;', 'interface A { info: string }', 'const { flag } = x;'])('the name in %s', (text) => {
+  it.each(['const data = 1;', 'function f(item: number) {}', 'const caseData = 1;', 'interface A { info: string }', 'const { flag } = x;', 'const process = 1;'])('the name in %s', (text) => {
     expect(checkDeclaredNames({ path: 'lib/a.ts', text })).toHaveLength(1);
   });
 
-  it.each(['const temperatureC = 1;', 'const { data: cases } = x;', 'const { data: cases }: { readonly x: 1 } = y;', 'process.exit(1);'])('and lets the names in %s pass', (text) => {
+  it.each(['const temperatureC = 1;', 'const { data: cases } = x;', 'const { data: cases }: { readonly x: 1 } = y;', 'process.exit(1);', 'const serverProcess = 1;'])('and lets the names in %s pass', (text) => {
     expect(checkDeclaredNames({ path: 'lib/a.ts', text })).toEqual([]);
   });
 

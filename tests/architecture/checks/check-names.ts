@@ -39,7 +39,9 @@ export function checkDeclaredNames(file: HouseFile): readonly string[] {
       ts.isInterfaceDeclaration(node) || ts.isTypeAliasDeclaration(node) || ts.isPropertySignature(node) || ts.isClassDeclaration(node);
     if (!isDeclared || !node.name || !ts.isIdentifier(node.name)) return;
     const words = node.name.text.replace(/([a-z0-9])([A-Z])/g, '$1 $2').toLowerCase().split(/[ _]/);
-    const empty = ts.isPropertySignature(node) ? emptyWords.filter((word) => words.length === 1 && words[0] === word) : emptyWords.filter((word) => words.includes(word));
+    // "serverProcess" is a process of the machine and says so; "process" alone says nothing. Fields follow foreign shapes.
+    const isWhole = (word: string) => words.length === 1 && words[0] === word;
+    const empty = emptyWords.filter((word) => (ts.isPropertySignature(node) || word === 'process' ? isWhole(word) : words.includes(word)));
     for (const word of empty) problems.push(`${file.path}:${lineOf(source, node)}: "${node.name.text}" holds the empty word "${word}"`);
   });
   return problems;

@@ -6,7 +6,7 @@ const forbiddenText: readonly (readonly [RegExp, string])[] = [
   [new RegExp(`\\bas a${'ny'}\\b|<a${'ny'}>`), 'a cast that believes everything'],
   [new RegExp(`@ts-(igno${'re'}|noche${'ck'}|expect-err${'or'})`), 'a silenced compiler'],
   [new RegExp(`eslint-disa${'ble'}`), 'a silenced lint'],
-  [new RegExp(`(^|[\\s"'\`(=:])/(ho${'me'}|wo${'rk'}|ro${'ot'}|Us${'ers'})/[a-z]`, 'm'), 'a path of one machine'],
+  [new RegExp(`(^|[\\s"'\`(=:])/(ho${'me'}|wo${'rk'}|ro${'ot'}|Us${'ers'})/(?!somebody)[a-z]`, 'm'), 'a path of one machine'],
   [new RegExp(`regis${'try'}\\.npmjs|npm${'mirror'}|artifac${'tory'}|verdac${'cio'}|nex${'us'}/repository`, 'i'), 'a package host of one machine'],
   [new RegExp(`/tm${'p'}/`), 'a folder of one machine: ask the system for its temporary folder'],
   [new RegExp(`\\b(conduct${'ion'}|pract${'ice'}|tru${'st'}|sta${'ck'}|anch${'ors'}|archit${'ecture'}|prod${'uct'})\\.m${'d'}\\b`), 'a page that is not in the house'],

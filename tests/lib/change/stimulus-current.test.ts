@@ -19,6 +19,7 @@ describe('stimulusCurrent', () => {
     ['both exactly 1.2 times the largest response', measured(24, 20), measured(12, 10), 'supramaximal'],
     ['one ticked, one measured', ticked(30), measured(12, 10), 'supramaximal'],
     ['1.19 times only', measured(23.8, 20), measured(12, 10), 'raised'],
+    ['1.19 times only at the exposed nerve', measured(1.19, 1), measured(0.6, 0.5), 'raised'],
     ['a raised current over a baseline not known supramaximal', ticked(30), plain(20), 'raised'],
     ['a lower current under a supramaximal baseline', plain(10), ticked(20), 'not-supramaximal'],
     ['no current at all in both', plain(0), plain(0), 'equal'],
