@@ -4,6 +4,7 @@ import { pathIdOf } from '@/lib/case/keys';
 import { brokenText } from '@/lib/chart/broken-text';
 import { findingPriority } from '@/lib/chart/finding-priority';
 import type { NerveLineSegment } from '@/lib/chart/nerve-line';
+import { nerveLineSite } from '@/lib/chart/nerve-line-site';
 import { siteShare } from '@/lib/chart/site-share';
 import { testedSince } from '@/lib/chart/tested-since';
 import { milliseconds } from '@/lib/text/format';
@@ -20,13 +21,14 @@ import { milliseconds } from '@/lib/text/format';
  * @param site its most distal site
  * @param channelId the channel the line is drawn from
  * @param endMm position of the channel in mm
+ * @param nowMs time of the picture, Unix ms
  * @returns the segment with the onset in ms as its text
  * @source common practice (distal latency)
  * @accuracy tests/lib/chart/nerve-line-view.test.ts
  * @example
- * distalSegment(state, nerve, wrist, 'adm', 530).text // => '2.90 ms'
+ * distalSegment(state, nerve, wrist, 'adm', 530, nowMs).text // => '2.90 ms'
  */
-export function distalSegment(state: CaseState, nerve: Nerve, site: Site, channelId: string, endMm: number): NerveLineSegment {
+export function distalSegment(state: CaseState, nerve: Nerve, site: Site, channelId: string, endMm: number, nowMs: number): NerveLineSegment {
   const record = state.paths[pathIdOf(site.id, channelId)];
   const isUntested = record?.compared == null || record.compared.at < testedSince(state, nerve.id);
   const share = siteShare(record);
@@ -41,6 +43,7 @@ export function distalSegment(state: CaseState, nerve: Nerve, site: Site, channe
     ...(isBroken ? brokenText(record) : { text: onset, shortText: onset }),
     priority: findingPriority(record?.compared?.findings ?? [], state.incidents[nerve.id]),
     isUntested,
+    isDim: nerveLineSite(state, nerve, site, channelId, nowMs).isDim,
     isBroken,
     isShort: false,
   };
@@ -48,7 +51,7 @@ export function distalSegment(state: CaseState, nerve: Nerve, site: Site, channe
 
 function onsetText(record: PathRecord | undefined): string {
   const reading = record?.compared?.reading ?? record?.lastReading;
-  if (reading === undefined) return 'not tested';
+  if (reading === undefined) return '';
   if (reading.kind === 'absent') return 'no response';
   return reading.kind === 'measured' && reading.onsetMs !== null ? milliseconds(reading.onsetMs) : 'not read';
 }

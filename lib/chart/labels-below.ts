@@ -37,7 +37,7 @@ export interface LabelsBelow {
  */
 export function labelsBelow(view: NerveLineView, sizes: NerveLineSizes, toX: (positionMm: number) => number): LabelsBelow {
   const segments = (isShort: boolean) =>
-    view.segments.map<Caption>((segment) => ({
+    view.segments.filter((segment) => segment.text !== '').map<Caption>((segment) => ({
       key: `velocity-${segment.key}`,
       role: 'velocity',
       x: (toX(segment.fromMm) + toX(segment.toMm)) / 2,
@@ -45,38 +45,44 @@ export function labelsBelow(view: NerveLineView, sizes: NerveLineSizes, toX: (po
       tone: toneOf(segment.priority, 'second'),
       isBold: segment.priority !== null,
     }));
-  const ages = view.sites
-    .filter((site) => sizes.hasAges && site.ageText !== null)
-    .map<Caption>((site) => ({ key: `age-${site.siteId}`, role: 'age', x: toX(site.positionMm), text: site.ageText!, tone: 'second', isBold: false }));
-  const velocities = row(segments(false), sizes, 2) ?? row(segments(true), sizes, Infinity)!;
-  const under = row(ages, sizes, Infinity)!;
+  const ages = view.sites.flatMap<Caption>((site) =>
+    sizes.hasAges && site.ageText !== null
+      ? [{ key: `age-${site.siteId}`, role: 'age', x: toX(site.positionMm), text: `${site.ageText} ago`, tone: 'second', isBold: false }]
+      : [],
+  );
+  const full = captionRows(segments(false), sizes, 2);
+  const velocities = full.isFitting ? full : captionRows(segments(true), sizes, Infinity);
+  const under = captionRows(ages, sizes, Infinity);
   const topPx = sizes.textPx * 1.3;
   const agesTopPx = topPx + velocities.rows * sizes.lineHeightPx;
   const heightPx = (ages.length === 0 ? agesTopPx : agesTopPx + under.rows * sizes.lineHeightPx) - sizes.textPx * 0.75;
   return { shapes: [...draw(velocities, topPx, sizes), ...draw(under, agesTopPx, sizes)], heightPx };
 }
 
-interface Row {
-  readonly captions: readonly Caption[];
-  readonly placed: readonly PlacedLabel[];
+interface CaptionRows {
+  readonly captions: readonly (Caption & { readonly place: PlacedLabel })[];
   readonly rows: number;
+  readonly isFitting: boolean;
 }
 
-function row(captions: readonly Caption[], sizes: NerveLineSizes, mostRows: number): Row | null {
+function captionRows(captions: readonly Caption[], sizes: NerveLineSizes, mostRows: number): CaptionRows {
   const labels = captions.map((caption) => ({ centrePx: caption.x, widthPx: textWidth(caption.text, sizes.textPx, true) }));
-  if (mostRows !== Infinity && labels.some((label) => label.widthPx > sizes.widthPx)) return null;
   const placed = packLabels(labels, sizes.widthPx, sizes.labelGapPx, mostRows);
-  return placed === null ? null : { captions, placed, rows: Math.max(0, ...placed.map((place) => place.row + 1)) };
+  return {
+    captions: captions.map((caption, index) => ({ ...caption, place: placed?.[index] ?? { row: index, centrePx: caption.x } })),
+    rows: Math.max(0, ...(placed ?? []).map((place) => place.row + 1)),
+    isFitting: placed !== null && labels.every((label) => label.widthPx <= sizes.widthPx),
+  };
 }
 
-function draw(own: Row, topPx: number, sizes: NerveLineSizes): readonly Shape[] {
-  return own.captions.map((caption, index) => ({
+function draw(own: CaptionRows, topPx: number, sizes: NerveLineSizes): readonly Shape[] {
+  return own.captions.map((caption) => ({
     kind: 'text',
     key: caption.key,
     role: caption.role,
     tone: caption.tone,
-    x: own.placed[index]!.centrePx,
-    y: topPx + own.placed[index]!.row * sizes.lineHeightPx,
+    x: caption.place.centrePx,
+    y: topPx + caption.place.row * sizes.lineHeightPx,
     sizePx: sizes.textPx,
     widthPx: textWidth(caption.text, sizes.textPx, true),
     isMono: true,

@@ -14,9 +14,10 @@ export function nerveLineDescription(view: Omit<NerveLineView, 'description'>): 
   const sites = view.sites.map((site) => `${site.name} ${site.text}${site.ageText === null ? '' : `, ${site.ageText} ago`}.`);
   const segments = view.segments.map((segment, index) => {
     const state = segment.isUntested ? ', not tested since' : '';
-    return `${names[index] ?? ''} to ${lowerFirst(names[index + 1] ?? '', index + 1 === names.length - 1)}: ${segment.text}${state}.`;
+    const words = `${segment.text}${state}`.replace(/^, /, '');
+    return words === '' ? '' : `${names[index] ?? ''} to ${lowerFirst(names[index + 1] ?? '', index + 1 === names.length - 1)}: ${words}.`;
   });
-  return [`${view.nerveName} nerve, recorded at ${view.end?.name ?? 'no channel'}.`, ...sites, ...segments].join(' ');
+  return [`${view.nerveName} nerve, recorded at ${view.end?.name ?? 'no channel'}.`, ...sites, ...segments.filter((sentence) => sentence !== '')].join(' ');
 }
 
 function lowerFirst(name: string, isChannel: boolean): string {

@@ -4,6 +4,7 @@ import type { CaseState, PathRecord } from '@/lib/case/case-state';
 import { pathIdOf, segmentKey } from '@/lib/case/keys';
 import { findingPriority } from '@/lib/chart/finding-priority';
 import type { NerveLineSegment } from '@/lib/chart/nerve-line';
+import { nerveLineSite } from '@/lib/chart/nerve-line-site';
 import { siteShare } from '@/lib/chart/site-share';
 import { testedSince } from '@/lib/chart/tested-since';
 import { velocityText } from '@/lib/chart/velocity-text';
@@ -23,13 +24,14 @@ import { shortSegmentMm } from '@/lib/conduction/short-segment-mm';
  * @param proximal the site nearer to the spine
  * @param distal its neighbour further out
  * @param channelId the channel the line is drawn from
+ * @param nowMs time of the picture, Unix ms
  * @returns the segment; shares null where they cannot be told
  * @source product rule (nerve line)
  * @accuracy tests/lib/chart/nerve-line-view.test.ts, values computed by hand
  * @example
- * nerveLineSegment(state, nerve, aboveElbow, belowElbow, 'adm').amplitudeShare // => 0.39
+ * nerveLineSegment(state, nerve, aboveElbow, belowElbow, 'adm', nowMs).amplitudeShare // => 0.39
  */
-export function nerveLineSegment(state: CaseState, nerve: Nerve, proximal: Site, distal: Site, channelId: string): NerveLineSegment {
+export function nerveLineSegment(state: CaseState, nerve: Nerve, proximal: Site, distal: Site, channelId: string, nowMs: number): NerveLineSegment {
   const key = segmentKey(channelId, proximal.id, distal.id);
   const ends = [state.paths[pathIdOf(proximal.id, channelId)], state.paths[pathIdOf(distal.id, channelId)]] as const;
   const segment = state.segments[key];
@@ -43,8 +45,9 @@ export function nerveLineSegment(state: CaseState, nerve: Nerve, proximal: Site,
     amplitudeShare,
     velocityShare: velocityShare(segment),
     ...(isBroken ? brokenText(ends[0]) : velocityText(segment)),
-    priority: isUntested ? locatedPriority(state, nerve.id, proximal, distal) : segmentPriority(state, nerve.id, key, proximal, distal),
+    priority: segmentPriority(state, nerve.id, key, proximal, distal),
     isUntested,
+    isDim: [proximal, distal].some((site) => nerveLineSite(state, nerve, site, channelId, nowMs).isDim),
     isBroken,
     isShort: distal.positionMm - proximal.positionMm < shortSegmentMm.value,
   };

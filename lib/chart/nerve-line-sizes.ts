@@ -46,9 +46,9 @@ export function nerveLineSizes(options: NerveLineOptions): NerveLineSizes {
     leastThicknessPx: Math.max(1.5, thicknessPx * 0.1),
     radiusPx: thicknessPx * 0.5,
     strokePx: thicknessPx * 0.19,
-    dashPx: thicknessPx * 1.4,
-    gapPx: Math.max(1.5, thicknessPx * 0.2),
-    labelGapPx: options.textPx * 0.45,
+    dashPx: Math.max(4, options.textPx * 0.95),
+    gapPx: Math.max(1.5, options.textPx * 0.2),
+    labelGapPx: options.textPx * 0.65,
   };
 }
 

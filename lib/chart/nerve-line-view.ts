@@ -34,7 +34,7 @@ export function nerveLineView(state: CaseState, nerveId: string, nowMs: number):
   }
   const sites = nerve.sites.map((site) => nerveLineSite(state, nerve, site, channel.id, nowMs));
   const end = endOf(nerve, channel);
-  const view = { nerveId, nerveName: nerve.name, sites, segments: segmentsOf(state, nerve, channel, end), end };
+  const view = { nerveId, nerveName: nerve.name, sites, segments: segmentsOf(state, nerve, channel, end, nowMs), end };
   return { ...view, description: nerveLineDescription(view) };
 }
 
@@ -49,8 +49,11 @@ function endOf(nerve: Nerve, channel: Channel): NerveLineEnd | null {
   };
 }
 
-function segmentsOf(state: CaseState, nerve: Nerve, channel: Channel, end: NerveLineEnd | null): readonly NerveLineSegment[] {
+function segmentsOf(state: CaseState, nerve: Nerve, channel: Channel, end: NerveLineEnd | null, nowMs: number): readonly NerveLineSegment[] {
   const last = nerve.sites.at(-1);
-  const between = nerve.sites.slice(1).map((distal, index) => nerveLineSegment(state, nerve, nerve.sites[index]!, distal, channel.id));
-  return last === undefined || end === null ? between : [...between, distalSegment(state, nerve, last, channel.id, end.positionMm)];
+  const between = nerve.sites.flatMap((proximal, index) => {
+    const distal = nerve.sites[index + 1];
+    return distal === undefined ? [] : [nerveLineSegment(state, nerve, proximal, distal, channel.id, nowMs)];
+  });
+  return last === undefined || end === null ? between : [...between, distalSegment(state, nerve, last, channel.id, end.positionMm, nowMs)];
 }

@@ -27,6 +27,8 @@ export interface NerveLineSegment {
   readonly priority: Priority | null;
   /** True without a comparable run at both ends after the last risk step and after the first run of an open alert. */
   readonly isUntested: boolean;
+  /** True when the response at either end is dim. */
+  readonly isDim: boolean;
   readonly isBroken: boolean;
   readonly isShort: boolean;
 }

@@ -41,27 +41,30 @@ export function packLabels(labels: readonly Label[], roomPx: number, gapPx: numb
 }
 
 function placeInRows(labels: readonly Label[], rows: number, roomPx: number, gapPx: number): readonly PlacedLabel[] | null {
-  const placed: PlacedLabel[] = new Array<PlacedLabel>(labels.length);
-  for (let row = 0; row < rows; row += 1) {
-    const indexes = labels.map((_, index) => index).filter((index) => index % rows === row);
-    const centres = packRow(indexes.map((index) => labels[index]!), roomPx, gapPx);
-    if (centres === null) return null;
-    indexes.forEach((index, position) => (placed[index] = { row, centrePx: centres[position]! }));
-  }
-  return placed;
+  const packed = Array.from({ length: rows }, (_, row) => packRow(labels.filter((__, index) => index % rows === row), roomPx, gapPx));
+  if (packed.some((centres) => centres === null)) return null;
+  return labels.map((label, index) => ({
+    row: index % rows,
+    centrePx: packed[index % rows]?.[Math.floor(index / rows)] ?? label.centrePx,
+  }));
 }
 
+/** One row: each label pushed right of its neighbour, then all pushed back from the right edge. */
 function packRow(labels: readonly Label[], roomPx: number, gapPx: number): readonly number[] | null {
-  const centres = labels.map((label) => clampCentre(label, roomPx));
-  for (let index = 1; index < labels.length; index += 1) {
-    centres[index] = Math.max(centres[index]!, centres[index - 1]! + distance(labels[index - 1]!, labels[index]!, gapPx));
-  }
-  for (let index = labels.length - 1; index >= 0; index -= 1) {
-    const next = index + 1 < labels.length ? centres[index + 1]! - distance(labels[index]!, labels[index + 1]!, gapPx) : Infinity;
-    centres[index] = Math.min(centres[index]!, next, Math.max(roomPx - labels[index]!.widthPx / 2, roomPx / 2));
-  }
-  const isAlone = labels.length === 1;
-  return labels.every((label, index) => isAlone || fits(label, centres[index]!, roomPx)) ? centres : null;
+  let leftPx = -Infinity;
+  const pushed = labels.map((label) => {
+    const centrePx = Math.max(clampCentre(label, roomPx), leftPx + label.widthPx / 2);
+    leftPx = centrePx + label.widthPx / 2 + gapPx;
+    return { label, centrePx };
+  });
+  let rightPx = Math.max(roomPx, pushed.at(-1)?.label.widthPx ?? 0);
+  const centres = pushed.toReversed().map(({ label, centrePx }) => {
+    const backPx = Math.min(centrePx, rightPx - label.widthPx / 2);
+    rightPx = backPx - label.widthPx / 2 - gapPx;
+    return { label, centrePx: backPx };
+  });
+  const isPlaced = labels.length === 1 || centres.every(({ label, centrePx }) => fits(label, centrePx, roomPx));
+  return isPlaced ? centres.toReversed().map(({ centrePx }) => centrePx) : null;
 }
 
 function fits(label: Label, centrePx: number, roomPx: number): boolean {
@@ -72,8 +75,4 @@ function fits(label: Label, centrePx: number, roomPx: number): boolean {
 function clampCentre(label: Label, roomPx: number): number {
   if (label.widthPx >= roomPx) return roomPx / 2;
   return Math.min(Math.max(label.centrePx, label.widthPx / 2), roomPx - label.widthPx / 2);
-}
-
-function distance(left: Label, right: Label, gapPx: number): number {
-  return (left.widthPx + right.widthPx) / 2 + gapPx;
 }

@@ -30,7 +30,7 @@ export function segmentShapes(segment: NerveLineSegment, fromX: number, toX: num
   if (segment.isUntested || segment.amplitudeShare === null) return [outline(segment, fromX, toX, sizes)];
   const share = Math.min(segment.amplitudeShare, mostShare);
   const thickness = Math.max(sizes.leastThicknessPx, sizes.thicknessPx * share);
-  const tone = toneOf(segment.priority, 'ink');
+  const tone = toneOf(segment.priority, segment.isDim ? 'second' : 'ink');
   if (segment.velocityShare === null) return [ghost, bar(`segment-${segment.key}`, 'segment', tone, fromX, toX, thickness, null)];
   const wanted = sizes.dashPx * Math.min(Math.max(segment.velocityShare, 0.15), mostShare);
   const fitted = fitDashes(toX - fromX, wanted, sizes.gapPx);

@@ -1,6 +1,6 @@
 import type { NerveLineView } from '@/lib/chart/nerve-line';
 import type { NerveLineSizes } from '@/lib/chart/nerve-line-sizes';
-import { packLabels } from '@/lib/chart/pack-labels';
+import { packLabels, type PlacedLabel } from '@/lib/chart/pack-labels';
 import type { Shape, Tone } from '@/lib/chart/scene';
 import { shortenText } from '@/lib/chart/shorten-text';
 import { textWidth } from '@/lib/chart/text-width';
@@ -13,10 +13,13 @@ interface Block {
   readonly x: number;
   readonly nameLines: readonly string[];
   readonly value: string;
+  /** Measured values stand larger than words about them. */
+  readonly valueSizePx: number;
   readonly tone: Tone;
-  readonly isQuiet: boolean;
   readonly widthPx: number;
 }
+
+type PlacedBlock = Block & { readonly place: PlacedLabel };
 
 /** The blocks above the line, drawn upwards from 0, and the height they take. */
 export interface SiteLabels {
@@ -47,7 +50,8 @@ export function siteLabels(view: NerveLineView, sizes: NerveLineSizes, toX: (pos
   for (const [blocks, mostRows] of tries) {
     const placed = packLabels(blocks.map((block) => ({ centrePx: block.x, widthPx: block.widthPx })), sizes.widthPx, sizes.labelGapPx, mostRows);
     const fits = blocks.every((block) => block.widthPx <= sizes.widthPx) || mostRows === Infinity;
-    if (placed !== null && fits) return draw(blocks, placed, sizes);
+    if (placed === null || !fits) continue;
+    return draw(blocks.map((block, index) => ({ ...block, place: placed[index] ?? { row: index, centrePx: block.x } })), sizes);
   }
   return { shapes: [], heightPx: 0 };
 }
@@ -58,47 +62,58 @@ function blocksOf(
   toX: (positionMm: number) => number,
   linesOf: (name: string, valueWidthPx: number) => readonly string[],
 ): readonly Block[] {
-  const block = (key: string, positionMm: number, name: string, value: string, tone: Tone, isQuiet: boolean): Block => {
-    const valueWidthPx = textWidth(value, sizes.valuePx, true);
+  const block = (key: string, positionMm: number, name: string, value: string, tone: Tone): Block => {
+    const valueSizePx = /\d|^none$/.test(value) || key === 'end' ? sizes.valuePx : sizes.textPx;
+    const valueWidthPx = textWidth(value, valueSizePx, true);
     const nameLines = linesOf(name, valueWidthPx);
     const widthPx = Math.max(valueWidthPx, ...nameLines.map((line) => textWidth(line, sizes.textPx, false)));
-    return { key, x: toX(positionMm), nameLines, value, tone, isQuiet, widthPx };
+    return { key, x: toX(positionMm), nameLines, value, valueSizePx, tone, widthPx };
   };
   const sites = view.sites.map((site) =>
-    block(site.siteId, site.positionMm, site.name, site.text, toneOf(site.priority, site.isDim ? 'second' : 'ink'), site.isDim),
+    block(site.siteId, site.positionMm, site.name, site.text, toneOf(site.priority, site.isDim ? 'second' : 'ink')),
   );
-  return view.end === null ? sites : [...sites, block('end', view.end.positionMm, view.end.caption, view.end.name, 'second', true)];
+  return view.end === null ? sites : [...sites, block('end', view.end.positionMm, view.end.caption, view.end.name, 'second')];
 }
 
-function draw(blocks: readonly Block[], placed: readonly { readonly row: number; readonly centrePx: number }[], sizes: NerveLineSizes): SiteLabels {
+function draw(blocks: readonly PlacedBlock[], sizes: NerveLineSizes): SiteLabels {
   const nameRows = Math.max(...blocks.map((block) => block.nameLines.length), 1);
   const rowHeightPx = nameRows * sizes.lineHeightPx + sizes.valuePx * 1.1;
   const clearPx = sizes.textPx * 0.5;
-  const rows = Math.max(...placed.map((place) => place.row), 0) + 1;
-  const shapes = blocks.flatMap((block, index) => {
-    const place = placed[index]!;
-    const valueY = -clearPx - place.row * rowHeightPx;
-    const value: Shape = { kind: 'text', key: `value-${block.key}`, role: 'response', tone: block.tone, x: place.centrePx, y: valueY, sizePx: sizes.valuePx, widthPx: textWidth(block.value, sizes.valuePx, true), isMono: true, isBold: true, text: block.value };
-    const names = block.nameLines.map<Shape>((line, lineIndex) => ({
-      kind: 'text', key: `name-${block.key}-${lineIndex}`, role: 'site', tone: 'second', x: place.centrePx,
-      y: valueY - sizes.valuePx * 1.05 - (block.nameLines.length - 1 - lineIndex) * sizes.lineHeightPx,
-      sizePx: sizes.textPx, widthPx: textWidth(line, sizes.textPx, false), isMono: false, isBold: false, text: line,
+  const rows = Math.max(...blocks.map((block) => block.place.row), 0) + 1;
+  const shapes = blocks.flatMap((block) => {
+    const valueY = -clearPx - block.place.row * rowHeightPx;
+    const value: Shape = {
+      ...blockText(block, `value-${block.key}`, 'response', block.value, valueY),
+      tone: block.tone,
+      sizePx: block.valueSizePx,
+      widthPx: textWidth(block.value, block.valueSizePx, true),
+      isMono: true,
+      isBold: true,
+    };
+    const names = block.nameLines.map<Shape>((line, index) => ({
+      ...blockText(block, `name-${block.key}-${index}`, 'site', line, valueY - sizes.valuePx * 1.05 - (block.nameLines.length - 1 - index) * sizes.lineHeightPx),
+      tone: 'second',
+      sizePx: sizes.textPx,
+      widthPx: textWidth(line, sizes.textPx, false),
+      isMono: false,
+      isBold: false,
     }));
-    return place.row === 0 ? [value, ...names] : [...leader(block, place, placed, blocks, valueY, sizes), value, ...names];
+    return [...leader(block, blocks, valueY, sizes), value, ...names];
   });
   return { shapes, heightPx: clearPx + rows * rowHeightPx };
 }
 
-function leader(
-  block: Block,
-  place: { readonly row: number; readonly centrePx: number },
-  placed: readonly { readonly row: number; readonly centrePx: number }[],
-  blocks: readonly Block[],
-  valueY: number,
-  sizes: NerveLineSizes,
-): readonly Shape[] {
-  const x = Math.min(Math.max(block.x, place.centrePx - block.widthPx / 2), place.centrePx + block.widthPx / 2);
-  const crosses = placed.some((other, index) => other.row < place.row && Math.abs(other.centrePx - x) < blocks[index]!.widthPx / 2 + 2);
+function blockText(block: PlacedBlock, key: string, role: string, text: string, y: number) {
+  return { kind: 'text', key, role, text, x: block.place.centrePx, y } as const;
+}
+
+/** A thin line from a raised block to its site, where it crosses no other block. */
+function leader(block: PlacedBlock, blocks: readonly PlacedBlock[], valueY: number, sizes: NerveLineSizes): readonly Shape[] {
+  if (block.place.row === 0) return [];
+  const half = block.widthPx / 2;
+  const x = Math.min(Math.max(block.x, block.place.centrePx - half), block.place.centrePx + half);
+  const crosses = blocks.some((other) => other.place.row < block.place.row && Math.abs(other.place.centrePx - x) < other.widthPx / 2 + 2);
   if (crosses) return [];
-  return [{ kind: 'line', key: `leader-${block.key}`, role: 'leader', tone: 'rule', x1: x, y1: valueY + sizes.textPx * 0.3, x2: x, y2: -2, widthPx: Math.max(1, sizes.textPx / 14), dashPx: null }];
+  const widthPx = Math.max(1, sizes.textPx / 14);
+  return [{ kind: 'line', key: `leader-${block.key}`, role: 'leader', tone: 'rule', x1: x, y1: valueY + sizes.textPx * 0.3, x2: x, y2: -2, widthPx, dashPx: null }];
 }

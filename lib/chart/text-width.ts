@@ -33,7 +33,7 @@ export function textWidth(text: string, sizePx: number, isMono: boolean): number
 }
 
 function monoWidth(character: string): number {
-  return character.codePointAt(0)! < 0x250 || '−–…’‘“”'.includes(character) ? monoEm : wideEm;
+  return (character.codePointAt(0) ?? 0) < 0x250 || '−–…’‘“”'.includes(character) ? monoEm : wideEm;
 }
 
 function sansWidth(character: string): number {

@@ -24,14 +24,14 @@ const reasons: Record<NoVelocityReason, SegmentText> = {
  * is in the log.
  *
  * @param segment the newest judgement of the segment; undefined before the first pair
- * @returns text and short text
+ * @returns text and short text; empty before the first pair, because the sites say that they are not tested
  * @source product rule: under 80 mm marked short, "not computable" with its reason
  * @accuracy tests/lib/chart/velocity-text.test.ts
  * @example
- * velocityText(undefined).text // => 'not tested'
+ * velocityText(undefined).text // => ''
  */
 export function velocityText(segment: SegmentJudgement | undefined): SegmentText {
-  if (segment === undefined) return reasons['partner-not-tested'];
+  if (segment === undefined) return { text: '', shortText: '' };
   if (segment.velocity.kind === 'not-computable') return reasons[segment.velocity.reason];
   const velocity = metresPerSecond(segment.velocity.velocityMps);
   return segment.velocity.isShort ? { text: `${velocity}, short`, shortText: `${velocity}, short` } : { text: velocity, shortText: velocity };

@@ -16,8 +16,8 @@ export function LeadBand({ line }: { readonly line: TheatreLine }) {
     case 'low':
       return (
         <section className="border-y border-rule px-(--edge-room) py-[0.8em] text-(length:--needed)">
-          <div className="flex items-center gap-[0.35em] border-[0.09em] border-low px-[0.4em] py-[0.15em] text-(length:--headline) text-low">
-            <PriorityMark kind="low" className="size-[0.8em] shrink-0" />
+          <div className="flex w-fit max-w-full items-center gap-[0.35em] border-[0.06em] border-low px-[0.35em] py-[0.12em] text-[calc(var(--headline)*0.85)] text-low">
+            <PriorityMark kind={theatreMark(line)} className="size-[0.8em] shrink-0" />
             <Headline text={line.headline} />
           </div>
           <Detail text={line.detail} className="mt-[0.6em] text-ink" />
@@ -26,7 +26,7 @@ export function LeadBand({ line }: { readonly line: TheatreLine }) {
     case null:
       return (
         <section className={joinClasses('flex items-center border-y border-rule text-(length:--needed)', line.isCalm && 'bg-raised')}>
-          <div className="flex w-full items-center gap-(--edge-room) px-(--edge-room) py-[1.1em]">
+          <div className="flex w-full items-center gap-(--edge-room) px-(--edge-room) py-[0.8em]">
             <PriorityMark kind={theatreMark(line)} className="w-[calc(var(--headline)*1.15)] shrink-0" />
             <Words line={line} detailClassName="text-second" />
           </div>
@@ -46,7 +46,7 @@ function HighBand({ line }: { readonly line: TheatreLine }) {
           </div>
         ) : null}
       </div>
-      <div className="min-w-0 flex-1 py-[1.1em] pr-(--edge-room) pl-[0.5em]">
+      <div className="min-w-0 flex-1 py-[0.8em] pr-(--edge-room) pl-[0.5em]">
         <Words line={line} detailClassName="font-medium" />
       </div>
     </section>
@@ -81,5 +81,5 @@ function Headline({ text }: { readonly text: string }) {
 }
 
 function Detail({ text, className }: { readonly text: string; readonly className: string }) {
-  return text === '' ? null : <p className={joinClasses('leading-[1.25] text-pretty wrap-anywhere', className)}>{text}</p>;
+  return text === '' ? null : <p className={joinClasses('leading-[1.25] text-balance wrap-anywhere', className)}>{text}</p>;
 }

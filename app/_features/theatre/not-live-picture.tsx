@@ -27,15 +27,15 @@ interface NotLivePictureProps {
  * not carry one. An alert that was open keeps its mark and its size.
  */
 export function NotLivePicture({ place, procedure, reason, lastLive, lines, settings }: NotLivePictureProps) {
-  const root = useRef<HTMLDivElement>(null);
+  const root = useRef<HTMLElement>(null);
   useWallType(root, settings, JSON.stringify([place, procedure, reason, lines]));
   return (
-    <div ref={root} className="wall wall-hatched">
+    <section ref={root} aria-label="Not live" className="wall wall-hatched">
       <header className="flex flex-wrap items-baseline gap-x-[0.8em] border-b border-rule bg-ground px-(--edge-room) py-[0.45em] text-(length:--needed) leading-[1.15]">
         <p className="text-(length:--state) font-bold">{place}</p>
         <p className="min-w-0 flex-1 basis-[8em] text-second">{procedure}</p>
       </header>
-      <div className="flex min-h-0 flex-1 flex-col justify-center gap-[1em] px-(--edge-room) py-[0.8em] text-(length:--needed)">
+      <div className="flex flex-1 flex-col justify-center gap-[1em] px-(--edge-room) py-[0.8em] text-(length:--needed)">
         <div>
           <h1 className="text-(length:--headline) leading-[1.06] font-bold">Not live</h1>
           <p className="mt-[0.4em] leading-[1.25] text-pretty">{reason}</p>
@@ -50,6 +50,6 @@ export function NotLivePicture({ place, procedure, reason, lastLive, lines, sett
         </ul>
         <p className="leading-[1.25] text-second">{lastLive === null ? 'Nothing was shown yet' : `State at ${lastLive}. It may have changed.`}</p>
       </div>
-    </div>
+    </section>
   );
 }

@@ -18,15 +18,15 @@ interface PairingPictureProps {
 
 /** A wall that belongs to no case: it says so, shows its code and the two words, and nothing that could look calm. */
 export function PairingPicture({ pairing, ended, problem, settings }: PairingPictureProps) {
-  const root = useRef<HTMLDivElement>(null);
+  const root = useRef<HTMLElement>(null);
   useWallType(root, settings, JSON.stringify([pairing, ended, problem]));
   return (
-    <div ref={root} className="wall">
+    <main ref={root} className="wall">
       <header className="flex items-center gap-[0.5em] border-b border-rule px-(--edge-room) py-[0.55em] text-(length:--needed) font-bold">
         <Mark sizePx={44} />
         Fascicle
       </header>
-      <div className="flex min-h-0 flex-1 flex-col justify-evenly gap-[0.8em] px-(--edge-room) py-[0.6em] text-(length:--needed) leading-[1.25]">
+      <div className="flex flex-1 flex-col justify-evenly gap-[0.8em] px-(--edge-room) py-[0.6em] text-(length:--needed) leading-[1.25]">
         <div>
           <h1 className="text-(length:--headline) leading-[1.06] font-bold">{ended ?? 'Not paired'}</h1>
           <p className="mt-[0.3em] text-second">{ended === null ? 'This screen shows no case' : 'Not monitored. This screen shows no case any more'}</p>
@@ -53,6 +53,6 @@ export function PairingPicture({ pairing, ended, problem, settings }: PairingPic
         An aid for qualified staff, not a certified medical device. It states findings and gives no advice: local protocols
         and licensed judgement come first.
       </footer>
-    </div>
+    </main>
   );
 }

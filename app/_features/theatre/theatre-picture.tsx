@@ -9,31 +9,34 @@ import { useWallType } from '@/app/_features/theatre/use-wall-type';
 import { WallHeader } from '@/app/_features/theatre/wall-header';
 import type { WallSettings } from '@/app/_features/theatre/wall-settings';
 import type { NerveLineView } from '@/lib/chart/nerve-line';
-import type { TheatreView } from '@/lib/text/theatre-line';
+import type { TheatreLine, TheatreView } from '@/lib/text/theatre-line';
 
 export interface TheatrePictureProps {
   readonly place: string;
   readonly procedure: string;
   readonly clock: string;
   readonly isLive: boolean;
+  /** "Desk not connected since 10:40"; null while it is connected. */
+  readonly deskWords: string | null;
   readonly view: TheatreView;
   readonly nerves: readonly NerveLineView[];
   readonly settings: WallSettings;
 }
 
 /** The whole wall of one case: place, lead, other lines, nerves, facts. It never scrolls and has no control. */
-export function TheatrePicture({ place, procedure, clock, isLive, view, nerves, settings }: TheatrePictureProps) {
-  const root = useRef<HTMLDivElement>(null);
-  const contents = JSON.stringify([place, procedure, view, nerves]);
-  const type = useWallType(root, settings, contents);
+export function TheatrePicture({ place, procedure, clock, isLive, deskWords, view, nerves, settings }: TheatrePictureProps) {
+  const root = useRef<HTMLElement>(null);
+  const sites = nerves.map((nerve) => nerve.sites.map((site) => [site.name, site.text]));
+  const segments = nerves.map((nerve) => nerve.segments.map((segment) => segment.text));
+  const type = useWallType(root, settings, JSON.stringify([place, procedure, deskWords, view, sites, segments]));
   return (
-    <div ref={root} className="wall">
+    <main ref={root} className="wall">
       <WallHeader place={place} procedure={procedure} clock={clock} isLive={isLive} />
-      <LeadBand line={view.lead} />
-      <OtherLines lines={view.others} />
-      <div className="grid min-h-0 flex-1 px-(--edge-room) py-[0.5em] text-(length:--needed)">
-        <NerveLines views={nerves} textPx={type.neededPx} hasAges={type.hasAges} emphasis={type.emphasis} />
+      <div aria-live="assertive">
+        <LeadBand line={view.lead} />
       </div>
+      <OtherLines lines={deskWords === null ? view.others : [...view.others, deskLine(deskWords)]} />
+      <NerveLines views={nerves} widthPx={type.roomPx} textPx={type.neededPx} hasAges={type.hasAges} emphasis={type.emphasis} />
       {view.footer.length === 0 ? null : (
         <footer className="border-t border-rule px-(--edge-room) py-[0.55em] text-(length:--needed) leading-[1.2] text-second">
           <ul className="flex flex-wrap gap-x-[1.4em] gap-y-[0.2em]">
@@ -43,6 +46,11 @@ export function TheatrePicture({ place, procedure, clock, isLive, view, nerves, 
           </ul>
         </footer>
       )}
-    </div>
+    </main>
   );
+}
+
+/** The missing desk is about the link, not about the nerve; it stands last, outlined as low. */
+function deskLine(words: string): TheatreLine {
+  return { kind: 'watch', priority: 'low', isCalm: false, isFlashing: false, nerveId: null, headline: words, detail: '' };
 }

@@ -1,13 +1,17 @@
 'use client';
 
-import { useEffect, useLayoutEffect, useState, type RefObject } from 'react';
+import { useLayoutEffect, useState, type RefObject } from 'react';
+import { flushSync } from 'react-dom';
 
+import { useFontStatus, useWindowSize } from '@/app/_features/theatre/use-window-size';
 import type { WallSettings } from '@/app/_features/theatre/wall-settings';
 import { theatreTypeScale } from '@/lib/chart/theatre-type-scale';
 
 /** Sizes in px as they were set on the page, and whether there is room for what is only good to know. */
 export interface WallType {
   readonly neededPx: number;
+  /** Width between the margins of the wall. */
+  readonly roomPx: number;
   readonly hasAges: boolean;
   readonly emphasis: number;
 }
@@ -17,48 +21,47 @@ export interface WallType {
  * down to 16 minutes of arc, the least that the ergonomics standard allows (from memory): smaller words before cut words.
  */
 const steps = [
-  { headline: 1.8, needed: 1, hasAges: true, emphasis: 1.7 },
-  { headline: 1.4, needed: 1, hasAges: true, emphasis: 1.3 },
-  { headline: 1.1, needed: 1, hasAges: true, emphasis: 1 },
+  { headline: 1.8, needed: 1, hasAges: true, emphasis: 1.8 },
+  { headline: 1.5, needed: 1, hasAges: true, emphasis: 1.4 },
+  { headline: 1.2, needed: 1, hasAges: true, emphasis: 1 },
+  { headline: 1, needed: 1, hasAges: true, emphasis: 1 },
   { headline: 1, needed: 1, hasAges: false, emphasis: 1 },
+  { headline: 0.95, needed: 0.93, hasAges: false, emphasis: 1 },
   { headline: 0.9, needed: 0.86, hasAges: false, emphasis: 1 },
+  { headline: 0.85, needed: 0.79, hasAges: false, emphasis: 1 },
   { headline: 0.8, needed: 0.73, hasAges: false, emphasis: 1 },
 ] as const;
 
+/** Side margin of the wall in needed sizes; the same as `--edge-room` in globals.css. */
+const edgeRoom = 1.15;
+
 /**
- * Sets the type of a wall from where it is read and steps down until nothing is cut. `contents` is any value that
- * changes when the words do. The sizes go to the element as custom properties: the content policy forbids style attributes.
+ * Sets the type of a wall from where it is read and steps down until nothing is cut. `words` is all that is shown; its
+ * digits do not count, so that a running number never moves the picture. The sizes go to the element as custom
+ * properties: the content policy forbids style attributes.
  */
-export function useWallType(root: RefObject<HTMLElement | null>, settings: WallSettings, contents: string): WallType {
-  const windowSize = useWindowSize();
-  const fitKey = `${contents}|${windowSize}|${settings.distanceM}|${settings.diagonalInch}`;
+export function useWallType(root: RefObject<HTMLElement | null>, settings: WallSettings, words: string): WallType {
+  const { distanceM, diagonalInch } = settings;
+  const { widthPx, heightPx } = useWindowSize();
+  const fontStatus = useFontStatus();
+  const fitKey = [fontStatus, words.replaceAll(/\d/g, '0'), widthPx, heightPx, distanceM, diagonalInch].join('|');
   const [fit, setFit] = useState({ key: fitKey, step: 0 });
   const index = fit.key === fitKey ? fit.step : 0;
   const step = steps[index] ?? steps[0];
-  const [widthPx = 1920, heightPx = 1080] = windowSize.split('x').map(Number);
-  const scale = theatreTypeScale({ distanceM: settings.distanceM, diagonalInch: settings.diagonalInch, widthPx, heightPx });
+  const scale = theatreTypeScale({ distanceM, diagonalInch, widthPx, heightPx });
   const neededPx = Math.round(scale.neededPx * step.needed * 10) / 10;
+  const { statePx } = scale;
 
   useLayoutEffect(() => {
     const element = root.current;
     if (element === null) return;
     element.style.setProperty('--needed', `${neededPx}px`);
-    element.style.setProperty('--state', `${scale.statePx * Math.min(step.headline, 1)}px`);
-    element.style.setProperty('--headline', `${scale.statePx * step.headline}px`);
+    element.style.setProperty('--state', `${statePx * Math.min(step.headline, 1)}px`);
+    element.style.setProperty('--headline', `${statePx * step.headline}px`);
     const isCut = element.scrollHeight > element.clientHeight + 1 || element.scrollWidth > element.clientWidth + 1;
-    if (isCut && index < steps.length - 1) setFit({ key: fitKey, step: index + 1 });
-  });
+    // Before the next paint, so that nobody sees the steps.
+    if (isCut && index < steps.length - 1) queueMicrotask(() => flushSync(() => setFit({ key: fitKey, step: index + 1 })));
+  }, [root, neededPx, statePx, step.headline, index, fitKey]);
 
-  return { neededPx, hasAges: step.hasAges, emphasis: step.emphasis };
-}
-
-function useWindowSize(): string {
-  const [size, setSize] = useState('1920x1080');
-  useEffect(() => {
-    const measure = () => setSize(`${Math.max(200, window.innerWidth)}x${Math.max(200, window.innerHeight)}`);
-    measure();
-    window.addEventListener('resize', measure);
-    return () => window.removeEventListener('resize', measure);
-  }, []);
-  return size;
+  return { neededPx, roomPx: Math.floor(widthPx - 2 * edgeRoom * neededPx), hasAges: step.hasAges, emphasis: step.emphasis };
 }

@@ -1,5 +1,3 @@
-import { StatusDot } from '@/app/_ui/status-dot';
-
 interface WallHeaderProps {
   /** Theatre and side in words: the one thing that must never be taken for another case. */
   readonly place: string;
@@ -15,9 +13,20 @@ export function WallHeader({ place, procedure, clock, isLive }: WallHeaderProps)
       <p className="text-(length:--state) font-bold">{place}</p>
       <p className="min-w-0 flex-1 basis-[8em] text-second">{procedure}</p>
       <p className="ml-auto flex items-center gap-[0.5em] self-center">
-        {isLive ? <span className="text-second [&_svg]:size-[0.45em] [&_svg]:text-ink"><StatusDot isOn>Live</StatusDot></span> : null}
+        {isLive ? <LiveDot /> : null}
         <time className="font-mono">{clock}</time>
       </p>
     </header>
+  );
+}
+
+function LiveDot() {
+  return (
+    <span className="inline-flex items-center gap-[0.35em] text-second">
+      <svg viewBox="0 0 10 10" className="size-[0.45em] text-ink" aria-hidden="true">
+        <circle cx="5" cy="5" r="5" fill="currentColor" />
+      </svg>
+      Live
+    </span>
   );
 }

@@ -13,6 +13,9 @@ const currents = { axilla: 20, 'above-elbow': 18, 'below-elbow': 16, wrist: 14 }
 
 export type UlnarSite = keyof typeof ulnarBaseline;
 
+/** From proximal to distal. */
+export const ulnarSites = Object.keys(ulnarBaseline) as readonly UlnarSite[];
+
 /** A run at a site whose response is `share` of its baseline and `laterMs` later. */
 export function ulnarRun(script: CaseScript, time: string, site: UlnarSite, share: number, laterMs = 0): CaseScript {
   const [onsetMs, amplitudeMv] = ulnarBaseline[site];
@@ -23,8 +26,7 @@ export function ulnarRun(script: CaseScript, time: string, site: UlnarSite, shar
 /** The ulnar case with its plan, three baseline runs at each site and of the control, accepted, in the monitoring phase. */
 export function ulnarMonitored(): CaseScript {
   const script = CaseScript.opened({ ...ulnarAtElbow, theatre: 'Theatre 3' });
-  const sites = Object.keys(ulnarBaseline) as UlnarSite[];
-  sites.forEach((site, index) => {
+  ulnarSites.forEach((site, index) => {
     const [onsetMs, amplitudeMv] = ulnarBaseline[site];
     [0.98, 1.02, 1].forEach((factor, run) =>
       script.run(`09:4${index}:${run}0`, site, currents[site], { adm: [onsetMs, amplitudeMv * factor] }, { purpose: 'baseline' }),

@@ -1,0 +1,16 @@
+import type { CaseState } from '@/lib/case/case-state';
+import type { NerveLineView } from '@/lib/chart/nerve-line';
+import { nerveLineView } from '@/lib/chart/nerve-line-view';
+import { notMonitoredView } from '@/lib/chart/not-monitored-view';
+import type { TheatreKind } from '@/lib/text/theatre-line';
+
+const notMonitored: readonly TheatreKind[] = ['set-up', 'paused', 'take-down'];
+
+/** The nerves a wall draws: those at risk and those with an open alert; none once the case is closed. */
+export function wallNerves(state: CaseState, lead: TheatreKind, nowMs: number): readonly NerveLineView[] {
+  if (lead === 'closed') return [];
+  return state.plan.nerves
+    .filter((nerve) => nerve.role === 'at-risk' || state.incidents[nerve.id] !== undefined)
+    .map((nerve) => nerveLineView(state, nerve.id, nowMs))
+    .map((view) => (notMonitored.includes(lead) ? notMonitoredView(view) : view));
+}

@@ -1,0 +1,18 @@
+import type { NerveLineView } from '@/lib/chart/nerve-line';
+
+/**
+ * The nerve line while nothing is monitored: the last values stay, as outlines and dim.
+ * @param view the nerve line; not modified
+ * @returns the same nerve with every site dim and every segment an outline
+ * @source product rule: only stable and improved look calm
+ * @accuracy tests/lib/chart/not-monitored-view.test.ts
+ * @example
+ * notMonitoredView(view).segments.every((segment) => segment.isUntested) // => true
+ */
+export function notMonitoredView(view: NerveLineView): NerveLineView {
+  return {
+    ...view,
+    sites: view.sites.map((site) => ({ ...site, isDim: true })),
+    segments: view.segments.map((segment) => ({ ...segment, isDim: true, isUntested: true })),
+  };
+}
