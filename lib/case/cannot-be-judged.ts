@@ -25,15 +25,18 @@ export function cannotBeJudged(state: CaseState): CannotBeJudged | null {
   const control = comparedOf(state, 'control');
   if (atRisk.length === 0 || control.length === 0) return null;
   if (![...atRisk, ...control].every(isLost)) return null;
-  const since = control.reduce((latest, record) => (record.at > latest ? record.at : latest), '');
+  const since = [...atRisk, ...control].map((record) => record.lostAt).reduce((latest, at) => (at > latest ? at : latest));
   return { since, trainOfFourAt: state.conditions['train-of-four']?.at ?? null };
 }
 
-function comparedOf(state: CaseState, role: 'at-risk' | 'control'): readonly ComparedRecord[] {
+/** Comparable records of the muscle paths, each with the time its nerve was first found changed: testing again does not start it anew. */
+function comparedOf(state: CaseState, role: 'at-risk' | 'control'): readonly (ComparedRecord & { readonly lostAt: string })[] {
   return state.plan.paths
     .filter((path) => isMuscle(state, path) && roleOf(state, path) === role)
-    .map((path) => state.paths[path.id]?.compared ?? null)
-    .filter((record) => record !== null);
+    .flatMap((path) => {
+      const record = state.paths[path.id]?.compared ?? null;
+      return record === null ? [] : [{ ...record, lostAt: state.incidents[path.nerveId]?.firstBadAt ?? record.at }];
+    });
 }
 
 function isMuscle(state: CaseState, path: Path): boolean {

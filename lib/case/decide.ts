@@ -22,7 +22,7 @@ export type Decision =
  *
  * Method: pure; the same in server and browser. Everything that is computed is rounded once here and written into
  * the entries. A well-formed run is never refused for the case's state; it is logged and judged "not compared" with
- * its reason. Only a closed case takes nothing more.
+ * its reason. A closed case takes late runs and the handling of what they show, and nothing else.
  *
  * @param state the case before the command; not modified
  * @param command what is asked
@@ -38,11 +38,16 @@ export function decide(state: CaseState, command: CaseCommand, context: DecideCo
   return Array.isArray(outcome) ? { kind: 'accepted', drafts: outcome } : { kind: 'refused', refusal: outcome as Refusal };
 }
 
+/** A run that waited at a desk without a link is never refused for the case's state; what it raises can be handled. */
+function isTakenAfterClose(command: CaseCommand): boolean {
+  return ['log-run', 'tell-alert', 'read-back-alert', 'act-on-alert', 'end-alert'].includes(command.name);
+}
+
 function outcomeOf(state: CaseState, command: CaseCommand, context: DecideContext): readonly EntryDraft[] | Refusal {
   if (command.name === 'plan-case') return decidePlan(state, command);
   if (state.seq === 0) return { code: 'not-planned', message: 'Case not planned: it has no plan yet' };
-  if (state.status === 'closed') {
-    return { code: 'case-closed', message: 'Case closed: a closed case takes no more entries' };
+  if (state.status === 'closed' && !isTakenAfterClose(command)) {
+    return { code: 'case-closed', message: 'Case closed: a closed case takes late runs and the handling of what they show, nothing else' };
   }
   switch (command.name) {
     case 'revise-plan':

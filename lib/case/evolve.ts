@@ -49,7 +49,7 @@ function evolveBody(state: CaseState, entry: CaseEntry): CaseState {
     case 'baseline.accepted':
       return evolveBaseline(state, entry);
     case 'condition.logged':
-      return { ...state, conditions: { ...state.conditions, [entry.body.condition.kind]: keptCondition(entry) } };
+      return evolveCondition(state, entry);
     case 'step.logged':
       return evolveStep(state, entry);
     case 'case.closed':
@@ -61,13 +61,25 @@ function evolveBody(state: CaseState, entry: CaseEntry): CaseState {
   }
 }
 
-function keptCondition(entry: CaseEntry & { kind: 'condition.logged' }): KeptCondition {
-  return { seq: entry.seq, at: entry.eventAt, condition: entry.body.condition };
+/** The newest by its own time stands: a late entry does not bring an older value back. */
+function evolveCondition(state: CaseState, entry: CaseEntry & { kind: 'condition.logged' }): CaseState {
+  const { kind } = entry.body.condition;
+  const before = state.conditions[kind];
+  if (before !== undefined && before.at > entry.eventAt) return state;
+  const kept: KeptCondition = { seq: entry.seq, at: entry.eventAt, condition: entry.body.condition };
+  return { ...state, conditions: { ...state.conditions, [kind]: kept } };
+}
+
+/** The newest of them, and the last risk step however many came after it. */
+function keptSteps(steps: readonly KeptStep[]): readonly KeptStep[] {
+  const newest = steps.slice(-keptStepCount);
+  const risk = steps.reduce<KeptStep | null>((last, step) => (step.isRisk && (last === null || step.at >= last.at) ? step : last), null);
+  return risk === null || newest.includes(risk) ? newest : [risk, ...newest.slice(1)];
 }
 
 function evolveStep(state: CaseState, entry: CaseEntry & { kind: 'step.logged' }): CaseState {
   const step: KeptStep = { seq: entry.seq, at: entry.eventAt, since: entry.body.since, isRisk: entry.body.isRisk };
-  const steps = [...state.steps, step].slice(-keptStepCount);
+  const steps = keptSteps([...state.steps, step]);
   if (!entry.body.voidsDistances) return { ...state, steps };
   const nerveIds = state.plan.nerves.filter((nerve) => nerve.role === 'at-risk').map((nerve) => nerve.id);
   const voided = Object.fromEntries(nerveIds.map((id) => [id, entry.eventAt]));

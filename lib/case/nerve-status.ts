@@ -1,6 +1,7 @@
 import type { Nerve, Path } from '@/lib/alert/nerve-plan';
 import { smallestChange } from '@/lib/change/smallest-change';
-import type { CaseState, ComparedRecord, KeptStep, PathRecord } from '@/lib/case/case-state';
+import type { Baseline, CaseState, ComparedRecord, KeptStep, PathRecord } from '@/lib/case/case-state';
+import { watchedOf, type Watched } from '@/lib/case/watched-of';
 import { msOfMoment } from '@/lib/units/ms-of-moment';
 
 /** Facts of one nerve at one moment, from its required paths. What is said of them is decided elsewhere. */
@@ -17,7 +18,8 @@ export interface NerveStatus {
   readonly oldestComparedAt: string | null;
   readonly lowest: { readonly percentOfBaseline: number; readonly at: string; readonly siteId: string } | null;
   readonly highest: { readonly percentOfBaseline: number; readonly isBeyondNoise: boolean } | null;
-  readonly watched: ComparedRecord | null;
+  /** The worst that moved or is past a limit without an open notice or alert: nobody may call it calm. */
+  readonly watched: Watched | null;
   readonly notCompared: PathRecord | null;
   readonly isNotMonitorable: boolean;
   readonly setAfterPercent: number | null;
@@ -27,7 +29,7 @@ export interface NerveStatus {
  * What is known of a nerve now.
  *
  * Method: a site counts as fresh only when every required path from it has a comparable run made after the last risk
- * step and not older than the freshness limit. Several channels of a site count once.
+ * step, with its amplitude read and not older than the freshness limit. Several channels of a site count once.
  *
  * @param state the case
  * @param nerve one of its nerves
@@ -60,12 +62,15 @@ export function nerveStatus(state: CaseState, nerve: Nerve, nowMs: number): Nerv
     oldestComparedAt: times[0] ?? null,
     lowest: lowestOf(state, required),
     highest: highestOf(compared),
-    watched: compared.find((record) => record.findings.some((finding) => finding.priority === 'watch')) ?? null,
-    notCompared: records.find(isNewestNotCompared) ?? null,
-    isNotMonitorable: required.some((path) => baselinesOf(state, path).some((baseline) => isTooNoisy(state, baseline))),
+    watched: watchedOf(state, nerve),
+    notCompared: records.find((record) => record.lastNotCompared !== null) ?? null,
+    isNotMonitorable: required.some((path) => isTooNoisy(state, newestBaseline(state, path))),
     setAfterPercent: setAfter(state, required),
   };
 }
+
+/** A run dated further ahead than this comes from a wrong clock and keeps nothing fresh. House rule. */
+const clockToleranceMs = 5_000;
 
 function later(latest: KeptStep | null, step: KeptStep): KeptStep {
   return latest === null || step.at >= latest.at ? step : latest;
@@ -73,16 +78,22 @@ function later(latest: KeptStep | null, step: KeptStep): KeptStep {
 
 function isFreshPath(state: CaseState, path: Path, step: KeptStep | null, nowMs: number): boolean {
   const compared = state.paths[path.id]?.compared ?? null;
-  if (compared === null) return false;
+  if (compared === null || compared.change.percentOfBaseline === null) return false;
   if (step !== null && compared.at <= step.at) return false;
-  return nowMs - msOfMoment(compared.at) <= state.plan.rules.freshnessMinutes * 60_000;
+  const ageMs = nowMs - msOfMoment(compared.at);
+  return ageMs <= state.plan.rules.freshnessMinutes * 60_000 && ageMs >= -clockToleranceMs;
 }
 
 function baselinesOf(state: CaseState, path: Path) {
   return Object.values(state.baselines).filter((baseline) => baseline.pathId === path.id);
 }
 
-function isTooNoisy(state: CaseState, baseline: { amplitudeScatter: number; runSeqs: readonly number[] }): boolean {
+function newestBaseline(state: CaseState, path: Path): Baseline | null {
+  return baselinesOf(state, path).reduce<Baseline | null>((newest, baseline) => (newest === null || baseline.seq > newest.seq ? baseline : newest), null);
+}
+
+function isTooNoisy(state: CaseState, baseline: Baseline | null): boolean {
+  if (baseline === null) return false;
   const smallest = smallestChange({
     coefficientOfVariation: baseline.amplitudeScatter,
     baselineRunCount: baseline.runSeqs.length,
@@ -108,10 +119,6 @@ function highestOf(compared: readonly ComparedRecord[]): NerveStatus['highest'] 
     const gain = change.percentOfBaseline - 100;
     return { percentOfBaseline: change.percentOfBaseline, isBeyondNoise: gain > 2 * (change.amplitudeErrorPercent ?? 0) };
   }, null);
-}
-
-function isNewestNotCompared(record: PathRecord): boolean {
-  return record.lastNotCompared !== null && record.lastAt > (record.compared?.at ?? '');
 }
 
 function setAfter(state: CaseState, required: readonly Path[]): number | null {

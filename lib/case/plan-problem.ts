@@ -1,6 +1,8 @@
 import type { Nerve } from '@/lib/alert/nerve-plan';
 import type { CasePlan } from '@/lib/case/plan';
 import { pathIdOf } from '@/lib/case/keys';
+import { spacingProblem } from '@/lib/case/spacing-problem';
+import type { RuleSet } from '@/lib/alert/rule-set';
 import { consoleKeys, isConsoleKey } from '@/lib/reference/templates/console-keys';
 
 /**
@@ -13,7 +15,7 @@ import { consoleKeys, isConsoleKey } from '@/lib/reference/templates/console-key
  * planProblem(plan) // => null
  */
 export function planProblem(plan: CasePlan): string | null {
-  return idProblem(plan) ?? siteProblem(plan) ?? pathProblem(plan) ?? keyProblem(plan);
+  return idProblem(plan) ?? siteProblem(plan) ?? pathProblem(plan) ?? keyProblem(plan) ?? rulesProblem(plan.rules);
 }
 
 function twice(values: readonly string[]): string | null {
@@ -40,13 +42,15 @@ function idProblem(plan: CasePlan): string | null {
 
 function siteProblem(plan: CasePlan): string | null {
   for (const nerve of plan.nerves) {
-    const isRising = nerve.sites.every((site, index) => index === 0 || site.positionMm > (nerve.sites[index - 1]?.positionMm ?? 0));
-    if (!isRising) return `Sites of ${nerve.name} out of order: positions must rise from proximal to distal, in mm`;
+    const spacing = spacingProblem(nerve.name, nerve.sites.map((site) => site.positionMm));
+    if (spacing !== null) return spacing;
     const behind = plan.channels.find((channel) => channel.nerveId === nerve.id && channel.positionMm <= lastPosition(nerve));
     if (behind !== undefined && behind.kind === 'muscle') {
       return `Channel ${behind.name} at ${behind.positionMm} mm lies before the last site of ${nerve.name}: a muscle lies distal to every site`;
     }
   }
+  const stray = plan.channels.find((channel) => !plan.nerves.some((nerve) => nerve.id === channel.nerveId));
+  if (stray !== undefined) return `Channel ${stray.name} names no nerve of the plan: ${stray.nerveId}`;
   if (!plan.nerves.some((nerve) => nerve.role === 'at-risk')) return 'No nerve at risk: at least one nerve must be monitored';
   return null;
 }
@@ -83,5 +87,18 @@ function keyProblem(plan: CasePlan): string | null {
   if (notDigit !== undefined) return `Key of a site must be a digit: ${notDigit}`;
   const reserved = stepKeys.find((stepKey) => /^[0-9]$/.test(stepKey) || isConsoleKey(stepKey));
   if (reserved !== undefined) return `Key of a step taken: ${reserved}. The console needs ${Object.keys(consoleKeys).join(', ')} and the digits`;
+  return null;
+}
+
+/** Limits that contradict one another: a loss that no limit reaches, or a recovery that no response can reach. */
+function rulesProblem(rules: RuleSet): string | null {
+  const { amplitudeWatchFallPercent: watch, amplitudeNoticeFallPercent: notice, recoveryMarginPercent: margin } = rules;
+  if (watch > notice) return `Limits out of order: the watch at −${watch} % must not lie beyond the notice at −${notice} %`;
+  if (100 - notice < rules.lostBelowPercent) {
+    return `Limits out of order: lost under ${rules.lostBelowPercent} % of baseline must lie beyond the notice at −${notice} %`;
+  }
+  if (margin >= notice || margin >= rules.onsetNoticeRisePercent) {
+    return `Recovery margin of ${margin} % too wide: it must be smaller than the limits for amplitude and onset`;
+  }
   return null;
 }

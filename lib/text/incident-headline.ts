@@ -1,5 +1,6 @@
 import type { CaseState, Incident } from '@/lib/case/case-state';
 import { metresPerSecond, milliseconds, percent } from '@/lib/text/format';
+import { insideSentence, nerveTitle } from '@/lib/text/nerve-title';
 
 /** % of baseline that the paths of an incident show now: the lowest newest comparable run. @returns % or null @source house rule */
 export function percentNow(state: CaseState, incident: Incident): number | null {
@@ -16,22 +17,27 @@ export function percentNow(state: CaseState, incident: Incident): number | null 
  * @accuracy whole percent; tests/lib/text/theatre-view.test.ts
  */
 export function incidentHeadline(state: CaseState, incident: Incident): string {
-  const name = state.plan.nerves.find((nerve) => nerve.id === incident.nerveId)?.name ?? incident.nerveId;
+  const name = nerveTitle(state.plan, incident.nerveId);
   const now = percentNow(state, incident);
   if (incident.recoveredAt !== null) return now === null ? `${name} back inside its limits` : `${name} back at ${percent(now)} of baseline`;
-  if (now !== null && now < state.plan.rules.lostBelowPercent) return `No ${name.toLowerCase()} response`;
+  if (now !== null && now < state.plan.rules.lostBelowPercent) return `No ${insideSentence(name)} response`;
+  if (needsMoreCurrent(state, incident)) return `${name} needs more current`;
   switch (incident.finding) {
     case 'segment-slowed':
       return slowedHeadline(state, incident, name);
     case 'onset-late':
       return lateHeadline(state, incident, name);
-    case 'threshold-rise':
-      return `${name} needs more current`;
     case 'ratio-fall':
       return `${name} lower proximally`;
     default:
       return now === null ? `${name} changed` : `${name} at ${percent(now)} of baseline`;
   }
+}
+
+/** Back, but only at a higher current: its % of baseline would claim too much. */
+function needsMoreCurrent(state: CaseState, incident: Incident): boolean {
+  const now = incident.badPathIds.map((pathId) => state.paths[pathId]?.compared ?? null).filter((record) => record !== null);
+  return now.some((record) => record.findings.some((finding) => finding.kind === 'threshold-rise'));
 }
 
 function slowedHeadline(state: CaseState, incident: Incident, name: string): string {

@@ -69,13 +69,12 @@ function bracketWords(incident: Incident, timeZone: string): string {
 function notComparedSince(state: CaseState, incident: Incident, timeZone: string): string | null {
   const record = incident.pathIds
     .map((pathId) => state.paths[pathId])
-    .find((path) => path !== undefined && path.lastNotCompared !== null && path.lastAt > (path.compared?.at ?? ''));
+    .find((path) => path !== undefined && path.lastNotCompared !== null);
   if (record === undefined || record.lastNotCompared === null) return null;
   return `Not compared since ${clockTime(record.lastAt, timeZone)}, ${notComparedWords[record.lastNotCompared]}`;
 }
 
 function lateWords(incident: Incident, timeZone: string): string | null {
-  if (incident.level === 'alert' && incident.isRepeated) return null;
-  if (msOfMoment(incident.raisedAt) - msOfMoment(incident.firstBadAt) < lateAfterMs) return null;
-  return `From ${clockTime(incident.firstBadAt, timeZone)}, received ${clockTime(incident.raisedAt, timeZone)}`;
+  if (msOfMoment(incident.receivedAt) - msOfMoment(incident.firstBadAt) < lateAfterMs) return null;
+  return `From ${clockTime(incident.firstBadAt, timeZone)}, received ${clockTime(incident.receivedAt, timeZone)}`;
 }

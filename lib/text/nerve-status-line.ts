@@ -1,6 +1,9 @@
 import type { CaseState } from '@/lib/case/case-state';
 import type { NerveStatus } from '@/lib/case/nerve-status';
-import { clockTime, durationWords, percent, signed } from '@/lib/text/format';
+import type { Watched } from '@/lib/case/watched-of';
+import { fitHeadline } from '@/lib/text/fit-headline';
+import { clockTime, durationWords, nonBreakingSpace, percent, signed } from '@/lib/text/format';
+import { insideSentence } from '@/lib/text/nerve-title';
 import { notComparedWords } from '@/lib/text/reason-words';
 import type { TheatreKind, TheatreLine } from '@/lib/text/theatre-line';
 import { msOfMoment } from '@/lib/units/ms-of-moment';
@@ -38,11 +41,14 @@ export function nerveStatusLine(state: CaseState, status: NerveStatus, nowMs: nu
   if (status.isNotMonitorable) {
     return line('not-monitorable', `${nerve.name} not monitorable by amplitude`, 'Its baseline scatters as much as the limit.');
   }
-  if (status.watched !== null && status.lowest !== null) {
-    const detail = `Inside the limit of ${signed(-state.plan.rules.amplitudeNoticeFallPercent, 0)} %, at ${clockTime(status.lowest.at, timeZone)}.`;
-    return line('watch', `${nerve.name} at ${percent(status.lowest.percentOfBaseline)} of baseline`, detail);
+  if (status.watched !== null) return line('watch', ...watchWords(state, nerve.name, status.watched, timeZone));
+  if (status.untestedSiteIds.length > 0) {
+    const { since, short, detail } = notTestedWords(state, status, nowMs, timeZone);
+    const isAlone = state.plan.nerves.filter((candidate) => candidate.role === 'at-risk').length === 1;
+    // With several nerves each statement names its nerve.
+    const headlines = isAlone ? [since, short] : [`${nerve.name}: ${lower(since)}`, `${nerve.name}: ${lower(short)}`];
+    return line('not-tested', fitHeadline(headlines), detail);
   }
-  if (status.untestedSiteIds.length > 0) return line('not-tested', ...notTestedWords(state, status, nowMs, timeZone));
   const tested = testedWords(status, timeZone);
   if (status.highest !== null && status.highest.isBeyondNoise) {
     return line('improved', `${nerve.name} improved, ${percent(status.highest.percentOfBaseline)} of baseline`, tested);
@@ -54,6 +60,18 @@ function upper(text: string): string {
   return text.charAt(0).toUpperCase() + text.slice(1);
 }
 
+function lower(text: string): string {
+  return text.charAt(0).toLowerCase() + text.slice(1);
+}
+
+function watchWords(state: CaseState, name: string, watched: Watched, timeZone: string): [string, string] {
+  const at = clockTime(watched.at, timeZone);
+  const share = watched.percentOfBaseline;
+  const headline = watched.isLost ? `No ${insideSentence(name)} response` : share === null ? `${name} slower than baseline` : `${name} at ${percent(share)} of baseline`;
+  if (watched.isPastLimit) return [headline, `Past its limit at ${at}, no alert open.`];
+  return [headline, `Inside the limit of ${signed(-state.plan.rules.amplitudeNoticeFallPercent, 0)}${nonBreakingSpace}%, at ${at}.`];
+}
+
 function siteCount(count: number, status: NerveStatus): string {
   return `${count} of ${status.siteCount} sites`;
 }
@@ -63,23 +81,29 @@ function lastWords(status: NerveStatus, timeZone: string): string {
   return `Last compared ${clockTime(status.newestComparedAt, timeZone)}.`;
 }
 
-function notTestedWords(state: CaseState, status: NerveStatus, nowMs: number, timeZone: string): [string, string] {
+/** What was not tested since when, the same without since, and the rest of it. */
+interface NotTestedWords {
+  readonly since: string;
+  readonly short: string;
+  readonly detail: string;
+}
+
+function notTestedWords(state: CaseState, status: NerveStatus, nowMs: number, timeZone: string): NotTestedWords {
   const step = status.lastRiskStep;
   const before = status.newestComparedAt === null ? 'Baseline only.' : `Last test ${clockTime(status.newestComparedAt, timeZone)}.`;
+  const isNone = status.freshSiteCount === 0;
+  const tested = isNone ? 'Not tested' : `${siteCount(status.freshSiteCount, status)} tested`;
   const isStepNewer = step !== null && (status.oldestComparedAt === null || status.oldestComparedAt <= step.at);
-  if (step !== null && isStepNewer) {
-    const since = clockTime(step.at, timeZone);
-    if (status.freshSiteCount === 0) return [`Not tested since ${step.since}`, `${upper(step.since)} ${since}. ${before}`];
-    return [`${siteCount(status.freshSiteCount, status)} tested since ${step.since}`, `${upper(step.since)} ${since}. ${before}`];
+  if (isStepNewer) {
+    return { since: `${tested} since ${step.since}`, short: tested, detail: `${upper(step.since)} ${clockTime(step.at, timeZone)}. ${before}` };
   }
   if (status.oldestComparedAt === null || status.newestComparedAt === null) {
-    return ['Not tested since baseline', `Baseline at ${siteCount(status.baselineSiteCount, status)}.`];
+    return { since: `${tested} since baseline`, short: tested, detail: `Baseline at ${siteCount(status.baselineSiteCount, status)}.` };
   }
-  if (!status.isEverySiteCompared) return [`${siteCount(status.freshSiteCount, status)} tested since baseline`, before];
+  if (!status.isEverySiteCompared) return { since: `${tested} since baseline`, short: tested, detail: before };
+  if (isNone) return { since: `${tested} for ${durationWords(nowMs - msOfMoment(status.newestComparedAt))}`, short: tested, detail: before };
   const age = durationWords(nowMs - msOfMoment(status.oldestComparedAt));
-  if (status.freshSiteCount === 0) return [`Not tested for ${durationWords(nowMs - msOfMoment(status.newestComparedAt))}`, before];
-  const limit = `${state.plan.rules.freshnessMinutes} min`;
-  return [`${siteCount(status.freshSiteCount, status)} tested in the last ${limit}`, `Oldest ${age} ago. ${before}`];
+  return { since: `${tested} in the last ${state.plan.rules.freshnessMinutes}${nonBreakingSpace}min`, short: tested, detail: `Oldest ${age} ago. ${before}` };
 }
 
 function testedWords(status: NerveStatus, timeZone: string): string {

@@ -41,7 +41,7 @@ function distanceFacts(state: CaseState): readonly string[] {
 function toldFacts(state: CaseState, timeZone: string): readonly string[] {
   return Object.values(state.incidents)
     .filter((incident) => incident.toldAt !== null)
-    .map((incident) => `Surgeon told ${clockTime(incident.toldAt ?? '', timeZone)}`);
+    .map((incident) => `Told ${clockTime(incident.toldAt ?? '', timeZone)}`);
 }
 
 function nextFacts(state: CaseState, nowMs: number, timeZone: string): readonly string[] {

@@ -1,5 +1,5 @@
 import { cannotBeJudged } from '@/lib/case/cannot-be-judged';
-import type { CaseState, Incident } from '@/lib/case/case-state';
+import type { CaseState } from '@/lib/case/case-state';
 import { nerveStatus } from '@/lib/case/nerve-status';
 import { clockTime, durationWords } from '@/lib/text/format';
 import { incidentLine } from '@/lib/text/incident-line';
@@ -51,13 +51,13 @@ function theatreLines(state: CaseState, nowMs: number, timeZone: string): Theatr
   if (state.status === 'closed') {
     return [plain('closed', `Case closed ${clockTime(state.closedAt ?? state.phaseAt, timeZone)}`, 'Not monitored.')];
   }
-  if (state.status === 'planned') return [plain('set-up', 'Set-up', 'Case not opened yet. Not monitored.')];
   const incidents = Object.values(state.incidents);
   const lines = incidents.map((incident) => incidentLine(state, incident, timeZone));
+  if (state.status === 'planned') return [...lines, plain('set-up', 'Set-up', 'Case not opened yet. Not monitored.')];
   lines.push(...withdrawnLines(state, nowMs), ...judgeLines(state, nowMs, timeZone), ...cuffLines(state, nowMs));
   const phase = phaseLine(state, timeZone);
   if (phase !== null) return [...lines, phase];
-  return [...lines, ...nerveLines(state, incidents, nowMs, timeZone)];
+  return [...lines, ...nerveLines(state, nowMs, timeZone)];
 }
 
 function phaseLine(state: CaseState, timeZone: string): TheatreLine | null {
@@ -75,21 +75,13 @@ function phaseLine(state: CaseState, timeZone: string): TheatreLine | null {
   }
 }
 
-function nerveLines(state: CaseState, incidents: readonly Incident[], nowMs: number, timeZone: string): readonly TheatreLine[] {
-  const quiet = state.plan.nerves.filter(
-    (nerve) => nerve.role === 'at-risk' && !incidents.some((incident) => incident.nerveId === nerve.id),
-  );
-  const lines = quiet.map((nerve) => nerveStatusLine(state, nerveStatus(state, nerve, nowMs), nowMs, timeZone));
-  if (quiet.length < 2) return lines;
-  // With several nerves each statement names its nerve.
-  return lines.map((line) => {
-    const name = quiet.find((nerve) => nerve.id === line.nerveId)?.name ?? '';
-    return line.headline.startsWith(name) || line.kind === 'stable' ? line : { ...line, headline: `${name}: ${lower(line.headline)}` };
+/** Every nerve at risk without an open change; one that is back inside its limits has to be tested on like the others. */
+function nerveLines(state: CaseState, nowMs: number, timeZone: string): readonly TheatreLine[] {
+  const quiet = state.plan.nerves.filter((nerve) => {
+    const incident = state.incidents[nerve.id];
+    return nerve.role === 'at-risk' && (incident === undefined || incident.recoveredAt !== null);
   });
-}
-
-function lower(text: string): string {
-  return text.charAt(0).toLowerCase() + text.slice(1);
+  return quiet.map((nerve) => nerveStatusLine(state, nerveStatus(state, nerve, nowMs), nowMs, timeZone));
 }
 
 function withdrawnLines(state: CaseState, nowMs: number): readonly TheatreLine[] {

@@ -15,6 +15,12 @@ export function decidePlan(state: CaseState, command: PlanCommand): readonly Ent
     const { reference, identityCommitment, plan } = command;
     return [draft('case.planned', { reference, identityCommitment, plan })];
   }
+  if (state.timeoutAt !== null && command.plan.side !== state.plan.side) {
+    return {
+      code: 'side-fixed',
+      message: `Side fixed: the time-out confirmed ${state.plan.side}. Close this case and plan another for the ${command.plan.side} side`,
+    };
+  }
   if (state.runCount > 0) {
     return {
       code: 'plan-in-use',

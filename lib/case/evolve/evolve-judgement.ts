@@ -24,7 +24,10 @@ export function evolveJudgement(state: CaseState, entry: CaseEntry & { kind: 'ru
   }
   const segments = { ...state.segments };
   for (const segment of entry.body.segments) {
-    segments[segmentKey(segment.channelId, segment.proximalSiteId, segment.distalSiteId)] = segment;
+    const key = segmentKey(segment.channelId, segment.proximalSiteId, segment.distalSiteId);
+    const before = segments[key];
+    const isOlder = before !== undefined && (before.proximalAt > segment.proximalAt || before.distalAt > segment.distalAt);
+    if (!isOlder) segments[key] = segment;
   }
   const judged = { ...state, paths, segments };
   return { ...judged, incidents: incidentsAfter(judged, entry.body, kept) };

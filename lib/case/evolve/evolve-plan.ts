@@ -11,7 +11,8 @@ export function evolvePlan(state: CaseState, entry: PlanEntry): CaseState {
       // A wall does not receive the reference.
       return { ...state, plan: entry.body.plan, reference: entry.body.reference ?? '', phaseAt: entry.eventAt };
     case 'plan.revised':
-      return { ...state, plan: entry.body.plan };
+      // Its positions were measured for it.
+      return { ...state, plan: entry.body.plan, distancesVoidSince: {} };
     case 'distances.measured': {
       const { nerveId, positions } = entry.body;
       const nerves = state.plan.nerves.map((nerve) => (nerve.id === nerveId ? moved(nerve, positions) : nerve));
