@@ -13,7 +13,7 @@ import { textWidth } from '@/lib/chart/text-width';
  * @source house rule
  * @accuracy tests/lib/chart/shorten-text.test.ts
  * @example
- * shortenText('Above elbow', 10, 40) // => 'Above…'
+ * shortenText('Above elbow', 10, 46) // => 'Above…'
  */
 export function shortenText(text: string, sizePx: number, roomPx: number): string {
   if (textWidth(text, sizePx, false) <= roomPx) return text;

@@ -1,0 +1,18 @@
+import { describe, expect, it } from 'vitest';
+
+import { nerveLineView } from '@/lib/chart/nerve-line-view';
+import { notMonitoredView } from '@/lib/chart/not-monitored-view';
+import { momentAt } from '@/tests/support/theatre-gallery/case-script';
+import { ulnarStable } from '@/tests/support/theatre-gallery/ulnar-case';
+
+describe('notMonitoredView', () => {
+  const live = nerveLineView(ulnarStable().state, 'ulnar', Date.parse(momentAt('10:39:30')));
+  const view = notMonitoredView(live);
+
+  it('leaves nothing that looks calm', () => {
+    expect(live.segments.some((segment) => segment.isUntested)).toBe(false);
+    expect(view.segments.every((segment) => segment.isUntested && segment.isDim)).toBe(true);
+    expect(view.sites.every((site) => site.isDim)).toBe(true);
+  });
+  it('hides no value', () => expect(view.sites.map((site) => site.text)).toEqual(live.sites.map((site) => site.text)));
+});
