@@ -1,12 +1,12 @@
 import { assertFinite } from '@/lib/units/assert-finite';
 
-/** A billionth of a step: far above binary noise of any quantity here, far below what a screen shows. */
-const nudgeSteps = 1e-9;
+/** Ten times the binary noise of ten million steps, which is the longest row here, and far below what a screen shows. */
+const nudgeSteps = 1e-8;
 
 /**
  * Rounds a quantity to its resolution, halves away from zero.
  *
- * Method: the value is counted in steps of the resolution; a count within a billionth of a half
+ * Method: the value is counted in steps of the resolution; a count within a hundred-millionth of a half
  * is taken as the half that a person would have written, so 1.005 rounds to 1.01 although its
  * binary form lies a hair below. Minus zero becomes zero. It does not choose the resolution.
  *
@@ -15,7 +15,7 @@ const nudgeSteps = 1e-9;
  * @returns the nearest whole number of steps, in the same unit
  * @throws {RangeError} when a number is not finite, the resolution not above 0, or the value too large for its step
  * @source house rule
- * @accuracy within half a step and a billionth; tests/lib/units/round-to.test.ts
+ * @accuracy within half a step and a hundred-millionth, every half up to ten million steps; tests/lib/units/round-to.test.ts
  * @example
  * roundTo(1.005, 0.01) // => 1.01
  * roundTo(-0.25, 0.1) // => -0.3
@@ -35,7 +35,7 @@ export function roundTo(value: number, resolution: number): number {
   if (steps > Number.MAX_SAFE_INTEGER) {
     throw new RangeError(`Cannot round: ${value} is too large for a resolution of ${resolution}`);
   }
-  const wholeSteps = Math.floor(steps + 0.5 + nudgeSteps + steps * 2 * Number.EPSILON);
+  const wholeSteps = Math.floor(steps + 0.5 + nudgeSteps);
   const size = isFraction ? wholeSteps / wholeStepsPerUnit : wholeSteps * resolution;
   return size === 0 ? 0 : Math.sign(value) * size;
 }
