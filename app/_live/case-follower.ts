@@ -102,7 +102,7 @@ export class CaseFollower {
   end(reason: EndedMessage['reason']): void {
     this.isStopped = true;
     this.lastPulse = null;
-    this.parts.publish({ ended: reason, checkedAt: null });
+    this.parts.publish({ ended: reason });
   }
 
   /** A new connection: the old pulse proves nothing, and what was refused may be allowed now. */
@@ -202,7 +202,7 @@ export class CaseFollower {
 
   private fail(problem: FeedProblem): 'done' {
     this.problem = problem;
-    this.parts.publish({ problem, checkedAt: null });
+    this.parts.publish({ problem });
     return 'done';
   }
 }

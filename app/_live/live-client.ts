@@ -2,7 +2,7 @@ import { v7 as uuidv7 } from 'uuid';
 
 import { CaseFollower } from '@/app/_live/case-follower';
 import { DeskIdentity, type AskSession } from '@/app/_live/desk-identity';
-import { readCommand } from '@/app/_live/read-command';
+import { readCommand, type GivenCommand } from '@/app/_live/read-command';
 import type { LiveSocket, OpenSocket, SocketListener, Viewer } from '@/app/_live/live-socket';
 import type { LiveStorage } from '@/app/_live/live-storage';
 import { emptyFeed, emptyLiveStore, type CaseFeed, type LiveStore } from '@/app/_live/live-store';
@@ -11,7 +11,6 @@ import { PulseReader } from '@/app/_live/pulse-reader';
 import type { ExclusiveLock, TabChannel } from '@/app/_live/tabs';
 import { WaitingQueue } from '@/app/_live/waiting-queue';
 import { endedMessageSchema, entriesMessageSchema, type PulseMessage } from '@/lib/contracts/channel/messages';
-import type { PersonCommand } from '@/lib/contracts/http/commands';
 import type { CommandReply, WireEntry } from '@/lib/contracts/http/replies';
 
 const replyWithinMs = 4000;
@@ -30,7 +29,10 @@ export interface LiveClientParts {
 }
 
 /** A reply of the server, or word that the command is kept and waits. */
-export type SendOutcome = CommandReply | { readonly kind: 'waiting' };
+export type SendOutcome = (CommandReply | { readonly kind: 'waiting' }) & {
+  /** Null when the command broke the contract and was not kept. */
+  readonly commandId: string | null;
+};
 
 const wait = (ms: number) => new Promise<void>((resolve) => setTimeout(resolve, ms));
 
@@ -97,16 +99,17 @@ export class LiveClient {
   }
 
   /** Keeps a command, sends it in order, and answers with the server's reply or with "waiting". */
-  async send(caseId: string, command: PersonCommand, atMs: number = this.nowMs()): Promise<SendOutcome> {
+  async send(caseId: string, command: GivenCommand, atMs: number = this.nowMs()): Promise<SendOutcome> {
     const read = readCommand(command);
-    if (read.kind === 'refused') return read;
+    if (read.kind === 'refused') return { ...read, commandId: null };
     const { isMeasured, offsetMs } = this.pulses.clock;
     const commandId = uuidv7();
     const settled = this.queue.whenSettled(commandId);
     await this.queue.add({ commandId, caseId, eventAt: new Date(atMs).toISOString(), offsetMs, isOffsetMeasured: isMeasured, command: read.command });
     this.connect();
-    if (!this.isConnected()) return { kind: 'waiting' };
-    return Promise.race([settled, wait(replyWithinMs).then(() => ({ kind: 'waiting' as const }))]);
+    if (!this.isConnected()) return { kind: 'waiting', commandId };
+    const outcome = await Promise.race([settled, wait(replyWithinMs).then(() => ({ kind: 'waiting' as const }))]);
+    return { ...outcome, commandId };
   }
 
   /** Confirms to the server that this wall painted an entry. */

@@ -20,7 +20,7 @@ export interface CaseFeed {
   readonly headSeq: number;
   readonly problem: FeedProblem | null;
   readonly ended: EndedMessage['reason'] | null;
-  /** Time of the newest database check whose head this feed held completely; null before the first. */
+  /** Time of the newest database check whose head this feed held completely; null before the first. Stays as "last live" when a problem comes. */
   readonly checkedAt: string | null;
   readonly deskConnected: boolean;
   readonly deskSince: string | null;
@@ -71,6 +71,11 @@ export interface LiveStore {
   readonly isStorageDurable: boolean;
   /** Whether this page loads without a link; null before the service worker answered. */
   readonly isPageKept: boolean | null;
+}
+
+/** The check that this feed may call itself live by, as it ages; null when nothing, a problem or the server's end forbids it. */
+export function checkThatCounts(feed: CaseFeed | undefined): string | null {
+  return feed === undefined || feed.problem !== null || feed.ended !== null ? null : feed.checkedAt;
 }
 
 /** A feed before anything came. */

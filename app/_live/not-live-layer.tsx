@@ -2,7 +2,7 @@
 
 import { useEffect, useRef, type ReactNode } from 'react';
 
-import { useLiveStore } from '@/app/_live/live-store';
+import { checkThatCounts, useLiveStore } from '@/app/_live/live-store';
 import { liveForMs } from '@/app/_live/pulse-reader';
 import { useIsLive } from '@/app/_live/use-is-live';
 import { serverNowMs } from '@/app/_live/use-now';
@@ -30,10 +30,10 @@ export function NotLiveLayer({ caseId, className, children }: { readonly caseId:
       // Playing from the very end would start over, as if a check had come.
       if (checkedAt === null || layerTimeMs(checkedAt) >= liveForMs) animation.finish();
     };
-    let held = useLiveStore.getState().feeds[caseId]?.checkedAt ?? null;
+    let held = checkThatCounts(useLiveStore.getState().feeds[caseId]);
     restart(held);
     const unsubscribe = useLiveStore.subscribe((store) => {
-      const checkedAt = store.feeds[caseId]?.checkedAt ?? null;
+      const checkedAt = checkThatCounts(store.feeds[caseId]);
       if (checkedAt === held) return;
       held = checkedAt;
       restart(checkedAt);

@@ -1,15 +1,15 @@
 'use client';
 
 import type { SendOutcome } from '@/app/_live/live-client';
+import type { GivenCommand } from '@/app/_live/read-command';
 import { tabClient } from '@/app/_live/tab-client';
-import type { PersonCommand } from '@/lib/contracts/http/commands';
 
 /**
  * Keeps a command in this browser, then sends it in its order. Answers with the server's reply when it comes within 4 s,
  * else `waiting`: the command is kept and goes up by itself, however often the page is loaded again.
  * `eventAtMs` is on the server's clock, as `useNow` tells it; now when it is left out.
  */
-export async function sendCommand(caseId: string, command: PersonCommand, options: { readonly eventAtMs?: number } = {}): Promise<SendOutcome> {
+export async function sendCommand(caseId: string, command: GivenCommand, options: { readonly eventAtMs?: number } = {}): Promise<SendOutcome> {
   return (await tabClient()).send(caseId, command, options.eventAtMs);
 }
 

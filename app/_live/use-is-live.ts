@@ -1,12 +1,12 @@
 'use client';
 
-import { useLiveStore } from '@/app/_live/live-store';
+import { checkThatCounts, useLiveStore } from '@/app/_live/live-store';
 import { liveForMs } from '@/app/_live/pulse-reader';
 import { useNow } from '@/app/_live/use-now';
 
 /** Whether a case is live here: its newest database check is younger than 3 s, all it saw is held, and nothing is odd. */
 export function useIsLive(caseId: string): boolean {
   const nowMs = useNow(250);
-  const checkedAt = useLiveStore((store) => store.feeds[caseId]?.checkedAt ?? null);
-  return checkedAt !== null && nowMs - Date.parse(checkedAt) < liveForMs;
+  const checkedAt = useLiveStore((store) => checkThatCounts(store.feeds[caseId]));
+  return checkedAt !== null && nowMs > 0 && nowMs - Date.parse(checkedAt) < liveForMs;
 }

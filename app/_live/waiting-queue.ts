@@ -141,10 +141,7 @@ export class WaitingQueue {
 
   private async settle(command: WaitingCommand, reply: CommandReply): Promise<void> {
     const { commandId, caseId, personId } = command;
-    if (reply.kind === 'refused') {
-      const { code, message, field } = reply;
-      await this.parts.store.replace({ ...command, status: 'refused', refusal: { code, message, field } });
-    }
+    if (reply.kind === 'refused') await this.parts.store.replace(refused(command, reply));
     this.tellAuthor(commandId, caseId, reply);
     if (reply.kind === 'committed') await this.forget(command);
     this.parts.tabs.tell({ kind: 'settled', personId, commandId, caseId, reply });
@@ -154,6 +151,7 @@ export class WaitingQueue {
   private tellAuthor(commandId: string, caseId: string, reply: CommandReply): void {
     // Entries first: the committed state replaces the provisional one in the same breath.
     if (reply.kind === 'committed') this.parts.committed(caseId, reply.entries);
+    else this.show(this.commands.map((one) => (one.commandId === commandId ? refused(one, reply) : one)));
     this.settled.get(commandId)?.(reply);
     this.settled.delete(commandId);
   }
@@ -176,4 +174,8 @@ export class WaitingQueue {
     this.commands = byOrder;
     this.parts.publish(byOrder);
   }
+}
+
+function refused(command: WaitingCommand, { code, message, field }: Extract<CommandReply, { kind: 'refused' }>): WaitingCommand {
+  return { ...command, status: 'refused', refusal: { code, message, field } };
 }

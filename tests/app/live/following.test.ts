@@ -1,5 +1,6 @@
 import { afterEach, describe, expect, it } from 'vitest';
 
+import { checkThatCounts } from '@/app/_live/live-store';
 import { applyEntry } from '@/lib/case/apply-entry';
 import { initialState } from '@/lib/case/initial-state';
 import { freshBrowser, openTab, until, type Tab } from '@/tests/app/live/desk-tab';
@@ -83,9 +84,12 @@ describe('LiveClient follows a case', () => {
     server.pulse();
     expect(tab.feed(caseId).checkedAt).not.toBeNull();
     server.tell('entries', { caseId, entries: [{ ...entries.at(-2)!, hash: 'f'.repeat(64) }] });
-    expect(tab.feed(caseId)).toMatchObject({ problem: 'fork', checkedAt: null });
+    expect(tab.feed(caseId)).toMatchObject({ problem: 'fork' });
+    expect(checkThatCounts(tab.feed(caseId))).toBeNull();
+    const { checkedAt } = tab.feed(caseId);
+    server.nowMs = () => Date.now() + 500;
     server.pulse();
-    expect(tab.feed(caseId).checkedAt).toBeNull();
+    expect(tab.feed(caseId).checkedAt).toBe(checkedAt);
   });
 
   it.each([
@@ -116,6 +120,7 @@ describe('LiveClient follows a case', () => {
     server.tell('entries', { caseId, entries: [unknown] });
     server.pulse();
     expect(tab.feed(caseId)).toMatchObject({ problem: 'newer-version', checkedAt: null });
+    expect(checkThatCounts(tab.feed(caseId))).toBeNull();
     expect(tab.feed(caseId).state?.seq).toBe(entries.length);
   });
 
@@ -133,7 +138,8 @@ describe('LiveClient follows a case', () => {
     server.pulse();
     server.tell('ended', { caseId, reason: 'revoked' });
     server.pulse();
-    expect(tab.feed(caseId)).toMatchObject({ ended: 'revoked', checkedAt: null });
+    expect(tab.feed(caseId)).toMatchObject({ ended: 'revoked', problem: null });
+    expect(checkThatCounts(tab.feed(caseId))).toBeNull();
   });
 
   it('confirms what a wall painted, again after a lost connection', async () => {

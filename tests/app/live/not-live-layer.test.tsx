@@ -87,11 +87,18 @@ describe('NotLiveLayer', () => {
 
   it.each([
     ['a check that is 3 s old', startMs - 3000],
-    ['a feed with a problem, which has no check', null],
+    ['a feed that was never checked', null],
   ])('covers for %s', (_, checkedAtMs) => {
     const animation = renderLayer();
     check(startMs);
     check(checkedAtMs);
+    expect(animation).toMatchObject({ currentTime: 3000, playState: 'finished' });
+  });
+
+  it.each([{ problem: 'fork' as const }, { problem: 'newer-version' as const }, { ended: 'revoked' as const }])('covers at once for %o, whatever the check', (change) => {
+    const animation = renderLayer();
+    check(startMs);
+    useLiveStore.setState(({ feeds }) => ({ feeds: { [caseId]: { ...feeds[caseId]!, ...change } } }));
     expect(animation).toMatchObject({ currentTime: 3000, playState: 'finished' });
   });
 

@@ -71,6 +71,7 @@ describe('LiveClient sends commands', () => {
     const tab = await desk(browser, server);
     const [bad, good] = await Promise.all([tab.client.send(caseId, say('Bad')), tab.client.send(caseId, say('Good'))]);
     expect([bad.kind, good.kind]).toEqual(['refused', 'committed']);
+    expect(tab.store().waiting).toMatchObject([{ commandId: bad.commandId, status: 'refused' }]);
     const again = await desk(browser, server);
     expect(again.store().waiting).toMatchObject([{ status: 'refused', refusal: { message: 'Refused: not this one' } }]);
     await again.client.queue.dismiss(again.store().waiting[0]!.commandId);
@@ -87,12 +88,12 @@ describe('LiveClient without a link', () => {
     const before = await desk(browser, server);
     await until(() => before.feed(caseId).state?.seq === entries.length);
     server.stop();
-    expect(await before.client.send(caseId, say('1'))).toEqual({ kind: 'waiting' });
+    expect(await before.client.send(caseId, say('1'))).toMatchObject({ kind: 'waiting' });
     before.kill();
     const after = await desk(browser, server);
     await until(() => after.feed(caseId).state?.seq === entries.length);
     expect(after.store().session).toEqual({ status: 'unconfirmed', personId: 'person-1', displayName: 'Neurophysiologist' });
-    expect(await after.client.send(caseId, say('2'))).toEqual({ kind: 'waiting' });
+    expect(await after.client.send(caseId, say('2'))).toMatchObject({ kind: 'waiting' });
     expect(after.feed(caseId).checkedAt).toBeNull();
     const ids = after.store().waiting.map((one) => one.commandId);
     server.start();
