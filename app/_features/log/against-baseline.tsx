@@ -1,0 +1,47 @@
+import { joinClasses } from '@/app/_ui/join-classes';
+import type { Finding, PathJudgement, SegmentJudgement } from '@/lib/alert/judgement';
+import { decimal, percent, signed } from '@/lib/text/format';
+import { notComparedWords } from '@/lib/text/reason-words';
+
+/** What the judge would say of one channel of the run in the form. */
+export interface ChannelPreview {
+  readonly path: PathJudgement;
+  readonly segment: SegmentJudgement | null;
+}
+
+/** The run in the form against its baseline, before it is logged: the same judge as the log's. */
+export function AgainstBaseline({ preview }: { readonly preview: ChannelPreview | null }) {
+  if (preview === null || (preview.path.kind === 'not-compared' && preview.path.reason === 'not-read')) return <span />;
+  const { path, segment } = preview;
+  return (
+    <span className="flex min-h-9 flex-wrap items-center gap-x-3 font-mono">
+      {path.kind === 'compared' ? <ChangeWords path={path} /> : <span className="font-sans text-sm text-second">{`Not compared, ${notComparedWords[path.reason]}`}</span>}
+      {segment?.velocity.kind === 'velocity' ? (
+        <span className={segment.velocity.isImplausible ? 'font-bold' : 'text-second'}>
+          {`${decimal(Math.round(segment.velocity.velocityMps), 0)}\u00a0±${Math.ceil(segment.velocity.standardErrorMps)}\u00a0m/s`}
+        </span>
+      ) : null}
+    </span>
+  );
+}
+
+function ChangeWords({ path }: { readonly path: PathJudgement & { kind: 'compared' } }) {
+  const { onsetChangeMs, percentOfBaseline } = path.change;
+  const isNotice = path.findings.some((finding) => finding.priority === 'notice');
+  const said = isNotice ? ', past a limit' : '';
+  return (
+    <>
+      {onsetChangeMs === null ? null : <span className={toneOf(path.findings, ['onset-late', 'amplitude-and-onset'])}>{`${signed(onsetChangeMs, 2)}\u00a0ms`}</span>}
+      {percentOfBaseline === null ? null : (
+        <span className={toneOf(path.findings, ['amplitude-fall', 'amplitude-and-onset', 'response-lost', 'amplitude-watch'])}>{percent(percentOfBaseline)}</span>
+      )}
+      {said === '' ? null : <span className="font-sans text-sm font-semibold">{said.slice(2)}</span>}
+    </>
+  );
+}
+
+function toneOf(findings: readonly Finding[], kinds: readonly Finding['kind'][]): string {
+  const found = findings.filter((finding) => kinds.includes(finding.kind));
+  if (found.some((finding) => finding.priority === 'notice')) return 'font-bold text-medium-text';
+  return joinClasses(found.length > 0 && 'text-low');
+}

@@ -1,0 +1,73 @@
+'use client';
+
+import { incidentsInOrder } from '@/app/_features/log/worst-incident';
+import { useLogCase } from '@/app/_features/log/log-context';
+import { useNow } from '@/app/_live/use-now';
+import { Band } from '@/app/_ui/band';
+import { Button } from '@/app/_ui/button';
+import { PriorityMark } from '@/app/_ui/priority-mark';
+import type { Incident } from '@/lib/case/case-state';
+import { actionNames } from '@/lib/text/action-names';
+import { clockTime, durationWords } from '@/lib/text/format';
+import { incidentLine } from '@/lib/text/incident-line';
+import { sayThis } from '@/lib/text/say-this';
+import { msOfMoment } from '@/lib/units/ms-of-moment';
+
+/** Every open notice and alert, the most needed first; the keys stand on the first. */
+export function AlertBlocks() {
+  const { state } = useLogCase();
+  const incidents = incidentsInOrder(state);
+  return (
+    <div aria-live="assertive" aria-atomic="false">
+      {incidents.map((incident, index) => <AlertBlock key={incident.alertId} incident={incident} hasKeys={index === 0} />)}
+    </div>
+  );
+}
+
+function AlertBlock({ incident, hasKeys }: { readonly incident: Incident; readonly hasKeys: boolean }) {
+  const { state, timeZone, head, openDialog } = useLogCase();
+  const nowMs = useNow(1000);
+  const line = incidentLine(state, incident, timeZone);
+  const key = (letter: string) => (hasKeys ? letter : null);
+  const open = (kind: 'told' | 'read-back' | 'action' | 'end') => () => openDialog({ kind, alertId: incident.alertId });
+  return (
+    <Band priority={line.priority ?? 'none'} aria-label={line.headline} className="border-b border-rule px-5 py-3.5">
+      <h2 className="flex items-center gap-2.5 text-xl font-bold">
+        {line.priority === null ? null : <PriorityMark kind={line.priority} className="size-5 shrink-0" />}
+        {line.headline}
+      </h2>
+      <p className="mt-1 text-sm font-semibold">{`${incident.level === 'alert' ? 'Alert' : 'Notice'} since ${clockTime(incident.raisedAt, timeZone)}, ${durationWords(nowMs - msOfMoment(incident.raisedAt))}`}</p>
+      <p className="mt-1">{line.detail}</p>
+      <SayLine words={sayThis(state, incident)} />
+      <p className="mb-2.5 text-sm font-semibold">{handlingWords(incident, timeZone)}</p>
+      {head.mayWrite ? (
+        <div className="flex flex-wrap gap-2">
+          <Button variant={incident.toldAt === null ? 'primary' : 'quiet'} hotkey={key('T')} onClick={open('told')}>{actionNames.told}</Button>
+          <Button hotkey={key('B')} onClick={open('read-back')} disabled={incident.toldAt === null}>{actionNames.readBack}</Button>
+          <Button hotkey={key('A')} onClick={open('action')}>{actionNames.acted}</Button>
+          <Button hotkey={key('E')} onClick={open('end')}>{actionNames.ended}</Button>
+        </div>
+      ) : null}
+    </Band>
+  );
+}
+
+/** The sentence to say aloud, on the page's own ground so that it is read first. */
+function SayLine({ words }: { readonly words: string }) {
+  return (
+    <p data-theme="theatre" className="my-2.5 rounded px-3 py-2">
+      <span className="sr-only">Say this: </span>
+      {`“${words}”`}
+    </p>
+  );
+}
+
+function handlingWords(incident: Incident, timeZone: string): string {
+  const done = [
+    incident.toldAt === null ? 'Not told yet' : `Told ${clockTime(incident.toldAt, timeZone)}`,
+    incident.readBackAt === null ? null : `read back ${clockTime(incident.readBackAt, timeZone)}`,
+    incident.actedAt === null ? null : `${incident.action ?? 'action'} ${clockTime(incident.actedAt, timeZone)}`,
+    incident.recoveredAt === null ? null : `back ${clockTime(incident.recoveredAt, timeZone)}`,
+  ];
+  return done.filter((words) => words !== null).join(', ');
+}

@@ -1,0 +1,93 @@
+'use client';
+
+import { useCallback, useEffect, useMemo, useRef, useState } from 'react';
+
+import { askBack } from '@/app/_features/log/ask-back';
+import { useLogCase } from '@/app/_features/log/log-context';
+import { channelsOf, draftFor, isTouched, purposeFor, settingsFor, sitesOf, type ChannelDraft, type RunDraft } from '@/app/_features/log/run-draft';
+import { runFromDraft, type FieldSentences } from '@/app/_features/log/run-from-draft';
+import { serverNowMs } from '@/app/_live/use-now';
+import { judgeInCase } from '@/lib/case/judge-in-case';
+import { momentOfMs } from '@/lib/units/moment-of-ms';
+
+/** A second Enter so soon after a run is the same hand, not a second run. */
+const sameHandMs = 800;
+/** Where the focus goes once the form stands as it was asked. */
+export type FocusWish = 'site' | 'reading' | 'error' | { readonly field: string };
+
+/** The next run: what is typed, what it would mean, and logging it exactly once. */
+export function useRunForm() {
+  const { state, give } = useLogCase();
+  const [draft, setDraft] = useState<RunDraft>(() => draftFor(state, sitesOf(state)[0]?.id ?? '', purposeFor(state)));
+  const [sentences, setSentences] = useState<FieldSentences>({});
+  const [question, setQuestion] = useState<string | null>(null);
+  const [hint, setHint] = useState<string | null>(null);
+  const focusWish = useRef<FocusWish | null>(null);
+  const isLocked = useRef(false);
+  const loggedAtMs = useRef(-Infinity);
+  const channels = useMemo(() => channelsOf(state, draft.settings.siteId), [state, draft.settings.siteId]);
+  const read = useMemo(() => runFromDraft(draft, channels), [draft, channels]);
+  const judged = useMemo(
+    () => (read.kind === 'run' ? judgeInCase(state, { at: momentOfMs(serverNowMs()), run: read.run }) : null),
+    [read, state],
+  );
+
+  const phasePurpose = purposeFor(state);
+  useEffect(() => setDraft((now) => ({ ...now, purpose: phasePurpose })), [phasePurpose]);
+  useEffect(() => {
+    isLocked.current = false;
+  }, [draft]);
+
+  const change = useCallback((next: RunDraft) => {
+    setDraft(next);
+    setSentences({});
+    setQuestion(null);
+    setHint(null);
+  }, []);
+
+  const chooseSite = (siteId: string, wish: FocusWish) => {
+    const kept = channelsOf(state, siteId).map((channel) => channel.id);
+    const left = channels.find((channel) => isTouched(draft.channels[channel.id]) && !kept.includes(channel.id));
+    if (left !== undefined) {
+      setHint(`${left.name} has values and is not recorded from that site: log or clear them first`);
+      return;
+    }
+    focusWish.current = wish;
+    change({ ...draft, settings: settingsFor(state, siteId) });
+  };
+  const typeChannel = (channelId: string, typed: ChannelDraft) => change({ ...draft, channels: { ...draft.channels, [channelId]: typed } });
+  const sameSettings = () => {
+    const last = state.runs.at(-1);
+    if (last === undefined) setHint('No run yet to take the settings from');
+    else if (channels.some((channel) => isTouched(draft.channels[channel.id]))) setHint('Readings are typed already: log or clear them before the settings change');
+    else chooseSite(last.run.siteId, 'reading');
+  };
+  const log = (isConfirmed: boolean) => {
+    if (isLocked.current) return;
+    if (read.kind === 'wrong') {
+      setSentences(read.sentences);
+      focusWish.current = 'error';
+      return;
+    }
+    if (read.kind === 'nothing-read') {
+      if (performance.now() - loggedAtMs.current > sameHandMs) setHint('Nothing read yet: type onset or amplitude, or mark no response');
+      return;
+    }
+    const odd = isConfirmed || judged === null ? null : askBack(judged.segments, state.plan);
+    if (odd !== null) {
+      setQuestion(odd);
+      return;
+    }
+    isLocked.current = true;
+    loggedAtMs.current = performance.now();
+    const sent = draft;
+    focusWish.current = 'site';
+    change({ ...draft, channels: {}, note: '' });
+    void give({ name: 'log-run', run: { ...read.run, readings: [...read.run.readings] } }).then((outcome) => {
+      if (outcome.kind !== 'refused') return;
+      setDraft(sent);
+      setHint(outcome.message);
+    });
+  };
+  return { draft, channels, sentences, question, hint, judged, focusWish, change, chooseSite, typeChannel, sameSettings, log, setQuestion, setHint };
+}
