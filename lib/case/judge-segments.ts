@@ -2,7 +2,7 @@ import type { PathJudgement, SegmentJudgement } from '@/lib/alert/judgement';
 import { judgeSegment, type SegmentEnd } from '@/lib/alert/judge-segment';
 import type { Nerve, Site } from '@/lib/alert/nerve-plan';
 import type { CaseState } from '@/lib/case/case-state';
-import { baselineKey, pathIdOf, segmentKey } from '@/lib/case/keys';
+import { baselineKey, pathIdOf } from '@/lib/case/keys';
 import type { RunBody } from '@/lib/case/run-body';
 import type { RunToJudge } from '@/lib/case/run-to-judge';
 import { amplitudeOf } from '@/lib/response/amplitude-of';
@@ -75,26 +75,20 @@ function segmentWith(
     proximal: side === 'proximal' ? partner : own,
     distal: side === 'proximal' ? own : partner,
     distanceMm: isVoid ? null : Math.abs(site.positionMm - neighbour.positionMm),
-    spansRiskStep: isSplit(state, nerve.id, keyOf(own, partner, channelId, side), [partner.at, at]),
+    spansRiskStep: isSplit(state, nerve.id, [partner.at, at]),
     rules: state.plan.rules,
   });
 }
 
-function keyOf(own: SegmentEnd, partner: SegmentEnd, channelId: string, side: 'proximal' | 'distal'): string {
-  const [proximal, distal] = side === 'proximal' ? [partner, own] : [own, partner];
-  return segmentKey(channelId, proximal.siteId, distal.siteId);
-}
-
 /**
  * A risk step, or the first abnormal run of an open alert, between the two runs: together they are no evidence.
- * The repeat that a notice of this very segment asks for may use the partner that the notice used.
+ * The repeat that a notice asks for is held against the partner that the notice was raised with.
  */
-function isSplit(state: CaseState, nerveId: string, key: string, ends: readonly [string, string]): boolean {
+function isSplit(state: CaseState, nerveId: string, ends: readonly [string, string]): boolean {
   const [from, to] = ends[0] < ends[1] ? ends : [ends[1], ends[0]];
   if (state.steps.some((step) => step.isRisk && step.at >= from && step.at <= to)) return true;
   const incident = state.incidents[nerveId];
-  if (incident === undefined || incident.firstBadAt <= from || incident.firstBadAt > to) return false;
-  return incident.level === 'alert' || !incident.badSegments.some((segment) => segment.key === key);
+  return incident?.level === 'alert' && incident.firstBadAt > from && incident.firstBadAt <= to;
 }
 
 function partnerEnd(state: CaseState, siteId: string, channelId: string): SegmentEnd | null {

@@ -68,7 +68,7 @@ function watchWords(state: CaseState, name: string, watched: Watched, timeZone: 
   const at = clockTime(watched.at, timeZone);
   const share = watched.percentOfBaseline;
   const headline = watched.isLost ? `No ${insideSentence(name)} response` : share === null ? `${name} slower than baseline` : `${name} at ${percent(share)} of baseline`;
-  if (watched.isPastLimit) return [headline, `Past its limit at ${at}, no alert open.`];
+  if (watched.isPastLimit) return [headline, `Past its limit at ${at}.`];
   return [headline, `Inside the limit of ${signed(-state.plan.rules.amplitudeNoticeFallPercent, 0)}${nonBreakingSpace}%, at ${at}.`];
 }
 

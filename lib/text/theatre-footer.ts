@@ -1,6 +1,6 @@
 import type { CaseState } from '@/lib/case/case-state';
 import { nerveStatus } from '@/lib/case/nerve-status';
-import { clockTime, durationWords, signed } from '@/lib/text/format';
+import { clockTime, durationWords, nonBreakingSpace, signed } from '@/lib/text/format';
 import { siteName } from '@/lib/text/site-name';
 import { momentOfMs } from '@/lib/units/moment-of-ms';
 import { msOfMoment } from '@/lib/units/ms-of-moment';
@@ -31,7 +31,7 @@ function baselineFacts(state: CaseState, nowMs: number): readonly string[] {
   return atRisk(state)
     .map((nerve) => nerveStatus(state, nerve, nowMs).setAfterPercent)
     .filter((value) => value !== null)
-    .map((value) => `Baseline set after ${signed(value, 0)} %`);
+    .map((value) => `Baseline set after ${signed(value, 0)}${nonBreakingSpace}%`);
 }
 
 function distanceFacts(state: CaseState): readonly string[] {

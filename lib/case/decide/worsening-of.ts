@@ -8,8 +8,8 @@ import { channelOfPath } from '@/lib/case/keys';
 /**
  * In which ways an open alert got worse since it was last raised.
  *
- * Method: against what it was raised with. A finding that is a notice at most makes no alert worse, save after its
- * recovery. A late entry from before the recovery is no return.
+ * Method: against what it was raised with. A finding that is a notice at most makes no alert worse. A late entry from
+ * before the recovery is no return.
  *
  * @param state the case with the run's judgement
  * @param nerve the nerve
@@ -26,7 +26,7 @@ export function worseningOf(
   abnormal: AbnormalRun,
   evidence: AlertEvidence,
 ): readonly Worsening[] {
-  if (incident.recoveredAt !== null) return abnormal.at > incident.recoveredAt ? ['returned'] : [];
+  if (incident.recoveredAt !== null) return abnormal.mayBecomeAlert && abnormal.at > incident.recoveredAt ? ['returned'] : [];
   const ways: Worsening[] = [];
   if (abnormal.finding === 'response-lost' && !incident.isLost) ways.push('lost');
   if (isPointsWorse(state, incident, abnormal)) ways.push('twenty-points');

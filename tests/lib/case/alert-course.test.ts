@@ -35,8 +35,9 @@ describe('decide, from notice to alert', () => {
   });
 
   it('decide settles a notice by a repeat inside limit and margin, not by one inside the limit alone', () => {
-    const script = monitoredUlnar().at('10:41');
-    script.run('above-elbow', { adm: adm('above-elbow', 0.38) });
+    const script = monitoredUlnar().at('10:40');
+    script.step('nerve-lifted');
+    script.at('10:41').run('above-elbow', { adm: adm('above-elbow', 0.38) });
     // Limit 50 % and margin 5 %: 54.9 % is not enough, 55 % is.
     expect(script.wait(5000).run('above-elbow', { adm: adm('above-elbow', 0.549) })).toEqual([]);
     expect(incidentOf(script)).toMatchObject({ level: 'notice', repeatDueAt: null });
@@ -210,6 +211,14 @@ describe('decide, worsening', () => {
 });
 
 describe('decide, recovery', () => {
+  it('decide keeps a notice whose repeat is inside the limit for amplitude and not inside that for the ratio', () => {
+    // Above elbow at 55 % against below elbow at 100 %, seven minutes before and with no step between: −45 %.
+    const script = monitoredUlnar().at('10:37');
+    script.run('above-elbow', { adm: adm('above-elbow', 0.38) });
+    expect(script.wait(5000).run('above-elbow', { adm: adm('above-elbow', 0.55) })).toEqual([]);
+    expect(script.wait(5000).run('above-elbow', { adm: adm('above-elbow', 0.81) })).toEqual(['notice.settled']);
+  });
+
   it('decide needs two comparable runs inside limit and margin, and only a person ends', () => {
     const script = alerted();
     expect(script.wait(5000).run('above-elbow', { adm: adm('above-elbow', 0.56) })).toEqual([]);
