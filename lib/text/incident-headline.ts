@@ -34,8 +34,14 @@ export function incidentHeadline(state: CaseState, incident: Incident): string {
   }
 }
 
-/** Back, but only at a higher current: its % of baseline would claim too much. */
-function needsMoreCurrent(state: CaseState, incident: Incident): boolean {
+/**
+ * Whether a response is back, but only at a higher current: its % of baseline would claim too much.
+ * @param state the case
+ * @param incident an open notice or alert
+ * @returns true while the newest comparable run of one of its paths says so
+ * @source product rule: comes back at a higher current is a threshold rise
+ */
+export function needsMoreCurrent(state: CaseState, incident: Incident): boolean {
   const now = incident.badPathIds.map((pathId) => state.paths[pathId]?.compared ?? null).filter((record) => record !== null);
   return now.some((record) => record.findings.some((finding) => finding.kind === 'threshold-rise'));
 }

@@ -1,6 +1,6 @@
 import type { CaseState, Incident } from '@/lib/case/case-state';
 import { decimal } from '@/lib/text/format';
-import { percentNow } from '@/lib/text/incident-headline';
+import { needsMoreCurrent, percentNow } from '@/lib/text/incident-headline';
 import { siteName, siteNames } from '@/lib/text/site-name';
 
 /**
@@ -19,7 +19,7 @@ export function sayThis(state: CaseState, incident: Incident): string {
   const muscles = [...new Set(incident.pathIds.map((pathId) => channelName(state, pathId)))].join(' and ');
   const parts = [nerve, muscles, amountWords(state, incident), whereWords(state, incident), sinceWords(incident)];
   const said = `${parts.filter((part) => part !== null && part !== '').join(', ')}.`;
-  if (incident.level === 'notice') return `${said} Once, being repeated.`;
+  if (incident.level === 'notice') return incident.repeatDueAt === null ? said : `${said} Once, being repeated.`;
   return incident.isRepeated ? said : `${said} Not repeated.`;
 }
 
@@ -31,8 +31,8 @@ function channelName(state: CaseState, pathId: string): string {
 function amountWords(state: CaseState, incident: Incident): string {
   const now = percentNow(state, incident);
   if (now !== null && now < state.plan.rules.lostBelowPercent) return 'no response';
+  if (needsMoreCurrent(state, incident)) return 'needs more current than at baseline';
   if (incident.finding === 'onset-late' || incident.finding === 'segment-slowed') return 'slower than baseline';
-  if (incident.finding === 'threshold-rise') return 'needs more current than at baseline';
   return now === null ? 'changed from baseline' : `at ${decimal(Math.round(now), 0)} per cent of baseline`;
 }
 

@@ -123,6 +123,13 @@ export class CaseBuilder {
     this.give({ name: 'log-step', stepId, label: null }, options);
   }
 
+  /** The same case from here on, played another way. */
+  fork(): CaseBuilder {
+    const other = new CaseBuilder(this.plan);
+    other.entries.push(...this.entries);
+    return Object.assign(other, { state: this.state, nowMs: this.nowMs, head: this.head, commandCount: this.commandCount });
+  }
+
   view(nowMs = this.nowMs): TheatreView {
     return theatreView(this.state, nowMs, 'UTC');
   }

@@ -33,7 +33,13 @@ const deed: fc.Arbitrary<Deed> = fc.oneof(
 );
 const gapMs = fc.oneof({ weight: 8, arbitrary: fc.integer({ min: 1, max: 20_000 }) }, { weight: 1, arbitrary: fc.constantFrom(29_999, 30_000, 89_999, 90_000, 290_000, 300_001) });
 
-function begin(): CaseBuilder {
+/** More cases in the exhaustive form of the tests. */
+const effort = process.env['FASCICLE_TEST_FULL'] === '1' ? 20 : 1;
+
+const opening = begun();
+const monitored = monitoredUlnar();
+
+function begun(): CaseBuilder {
   const script = openedCase(plan).at('10:05');
   sites.forEach((site, index) => {
     const { onsetMs, amplitudeUv } = ulnarBaseline[site];
@@ -91,7 +97,7 @@ describe('theatreView against a second computation', () => {
     const reached = new Set<string>();
     fc.assert(
       fc.property(fc.array(fc.tuple(gapMs, deed), { minLength: 5, maxLength: 40 }), (deeds) => {
-        const script = begin();
+        const script = opening.fork();
         const oracle = new TheatreOracle(sites.map((site) => ulnarBaseline[site].onsetMs));
         for (const [gap, one] of deeds) {
           script.wait(gap);
@@ -104,7 +110,7 @@ describe('theatreView against a second computation', () => {
           reached.add(script.view().lead.kind);
         }
       }),
-      { numRuns: 300 },
+      { numRuns: 120 * effort },
     );
     // The draw reaches every state that this plan can show; else the agreement above would say little.
     expect([...reached].sort()).toEqual(
@@ -114,7 +120,7 @@ describe('theatreView against a second computation', () => {
 
   it('theatreView agrees with the second computation only because both are right: a wrong limit is found', () => {
     // The control: a share of 51 % given as 49 % to the second computation alone must break the agreement.
-    const script = begin();
+    const script = opening.fork();
     const oracle = new TheatreOracle(sites.map((site) => ulnarBaseline[site].onsetMs));
     play(script, { kind: 'run', site: 0, response: { share: 0.51, laterMs: 0 } });
     oracle.take({ kind: 'run', site: 0, response: { share: 0.49, laterMs: 0 } }, script.nowMs);
@@ -128,7 +134,7 @@ describe('theatreView without an injury', () => {
     const round = fc.tuple(jitter, jitter, jitter, jitter);
     fc.assert(
       fc.property(fc.array(round, { minLength: 1, maxLength: 6 }), (rounds) => {
-        const script = monitoredUlnar();
+        const script = monitored.fork();
         for (const responses of rounds) {
           script.wait(60_000);
           responses.forEach((one, index) => script.wait(15_000).run(ulnarSites[index]!, { adm: adm(ulnarSites[index]!, one.share, one.laterMs) }));
@@ -137,7 +143,7 @@ describe('theatreView without an injury', () => {
           expect(script.view().lead.kind).toBe('stable');
         }
       }),
-      { numRuns: 100 },
+      { numRuns: 40 * effort },
     );
   });
 
@@ -145,7 +151,7 @@ describe('theatreView without an injury', () => {
     const one = fc.record({ site: fc.integer({ min: 0, max: 3 }), share: fc.double({ min: 0.6, max: 1.3, noNaN: true }), laterMs: fc.double({ min: -0.2, max: 1, noNaN: true }) });
     fc.assert(
       fc.property(fc.array(one, { minLength: 1, maxLength: 12 }), (runs) => {
-        const script = monitoredUlnar();
+        const script = monitored.fork();
         const newest = ulnarSites.map(() => ({ share: 1, laterMs: 0 }));
         for (const { site, share: kept, laterMs: later } of runs) {
           script.wait(2000).run(ulnarSites[site]!, { adm: adm(ulnarSites[site]!, kept, later) });
@@ -161,7 +167,7 @@ describe('theatreView without an injury', () => {
         fc.pre(isClear);
         expect(script.view().lead.isCalm).toBe(false);
       }),
-      { numRuns: 200 },
+      { numRuns: 60 * effort },
     );
   });
 });
