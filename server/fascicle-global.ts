@@ -48,11 +48,11 @@ export type Reply<Answer> =
   | { readonly isOk: false; readonly status: number; readonly body: FailureReply; readonly cookies: readonly string[] };
 
 /** The one seam between Next's bundles and the server that serves them. */
-export interface Fascicle {
+export interface FascicleGlobal {
   execute<Name extends keyof CommandDoors>(name: Name, input: CommandDoors[Name]['input'], source: RequestSource): Promise<Reply<CommandDoors[Name]['answer']>>;
   query<Name extends keyof QueryDoors>(name: Name, input: QueryDoors[Name]['input'], source: RequestSource): Promise<Reply<QueryDoors[Name]['answer']>>;
 }
 
 declare global {
-  var fascicle: Fascicle;
+  var fascicle: FascicleGlobal;
 }

@@ -6,7 +6,7 @@ import { makeListener } from '@/db/listener';
 import { makeRateLimit } from '@/server/auth/rate-limit';
 import { runTimers } from '@/server/commands/run-timers';
 import { makeFascicle } from '@/server/doors/make-fascicle';
-import type { Fascicle } from '@/server/fascicle-global';
+import type { FascicleGlobal } from '@/server/fascicle-global';
 import type { AllowedOrigins } from '@/server/http/allowed-origins';
 import { makeBellRinger } from '@/server/live/bell-ringer';
 import { everySecond } from '@/server/live/every-second';
@@ -18,7 +18,7 @@ import { watchEventLoop } from '@/server/telemetry/event-loop';
 
 /** Everything of the server but its pages. */
 export interface House {
-  readonly fascicle: Fascicle;
+  readonly fascicle: FascicleGlobal;
   stop(): Promise<void>;
 }
 

@@ -2,10 +2,10 @@ import { commandDoors } from '@/server/doors/command-doors';
 import type { Answered, Door, DoorParts } from '@/server/doors/door-parts';
 import { queryDoors } from '@/server/doors/query-doors';
 import { isFailure, notReadable, notSaved, type Failure } from '@/server/failure';
-import type { Fascicle, Reply, RequestSource } from '@/server/fascicle-global';
+import type { FascicleGlobal, Reply, RequestSource } from '@/server/fascicle-global';
 
 /** The seam as the routes see it: every door answers, whatever happens behind it. */
-export function makeFascicle(parts: DoorParts): Fascicle {
+export function makeFascicle(parts: DoorParts): FascicleGlobal {
   return {
     execute: (name, input, source) => pass(parts, name, commandDoors[name] as Door<unknown, never>, input, source, notSaved),
     query: (name, input, source) => pass(parts, name, queryDoors[name] as Door<unknown, never>, input, source, notReadable),

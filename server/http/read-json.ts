@@ -2,17 +2,21 @@ import { failure } from '@/server/failure';
 import { largestBodyBytes } from '@/server/http/guard-request';
 import { problemOf, type ContractIssue } from '@/server/http/problem-of';
 
-/** A contract: anything that reads an unknown value and says what is wrong with it. */
+/** A contract: it reads an unknown value, or throws with the issues it found. */
 export interface Contract<Value> {
-  safeParse(value: unknown): { success: true; data: Value } | { success: false; error: { issues: readonly ContractIssue[] } };
+  parse(value: unknown): Value;
 }
 
 /** The body of a request as its contract reads it; fails with the field and a sentence. */
 export async function readJson<Value>(request: Request, contract: Contract<Value>): Promise<Value> {
-  const read = contract.safeParse(await parseBody(request));
-  if (read.success) return read.data;
-  const { field, message } = problemOf(read.error.issues);
-  throw failure('bad-request', 'bad-request', message, field);
+  const value = await parseBody(request);
+  try {
+    return contract.parse(value);
+  } catch (thrown) {
+    if (typeof thrown !== 'object' || thrown === null || !('issues' in thrown)) throw thrown;
+    const { field, message } = problemOf(thrown.issues as readonly ContractIssue[]);
+    throw failure('bad-request', 'bad-request', message, field);
+  }
 }
 
 async function parseBody(request: Request): Promise<unknown> {

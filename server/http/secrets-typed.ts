@@ -6,11 +6,11 @@ const longest = { password: 256, code: 10 } as const;
 
 /** Password and code of someone who gives them again: exactly these two texts. */
 export const secretsTyped: Contract<{ password: string; code: string }> = {
-  safeParse(value) {
+  parse(value) {
     const issue = firstIssue(value);
-    if (issue !== null) return { success: false, error: { issues: [issue] } };
+    if (issue !== null) throw Object.assign(new Error(issue.message), { issues: [issue] });
     const { password, code } = value as { password: string; code: string };
-    return { success: true, data: { password, code } };
+    return { password, code };
   },
 };
 

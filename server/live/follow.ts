@@ -1,3 +1,5 @@
+import { noteScreenSeen } from '@/db/repositories/screens/note-screen-seen';
+import { withinHospitals } from '@/db/within-hospitals';
 import { followRequestSchema, type FollowReply } from '@/lib/contracts/channel/messages';
 import { contractVersion } from '@/lib/contracts/contract-version';
 import { isFailure, notReadable } from '@/server/failure';
@@ -41,6 +43,7 @@ export async function follow(parts: FollowParts, socket: LiveSocket, message: un
     parts.pump.watch(caseId, page.headSeq);
     socket.data.caseIds.add(caseId);
     if (isNew) parts.presence.arrive(caseId, socket.id, { desk: isDesk, screenId: visitor.kind === 'screen' ? visitor.screenId : null });
+    if (visitor.kind === 'screen') noteSeen(parts.context, visitor);
     return { kind: 'entries', ...page };
   } catch (cause) {
     if (isNew) await socket.leave(roomOf(caseId, socket.data.visitor.kind));
@@ -48,6 +51,10 @@ export async function follow(parts: FollowParts, socket: LiveSocket, message: un
     parts.context.log.warn({ err: cause, caseId }, 'A viewer could not follow.');
     return { kind: 'refused', code: 'not-saved', message: notReadable().message };
   }
+}
+
+function noteSeen({ database, log }: ServerContext, { screenId, hospitalId }: { screenId: string; hospitalId: string }): void {
+  withinHospitals(database.app, [hospitalId], (transaction) => noteScreenSeen(transaction, screenId)).catch((cause: unknown) => log.warn({ err: cause, screenId }, 'It was not noted that a wall is there.'));
 }
 
 function isOtherVersion(message: unknown): boolean {

@@ -14,8 +14,8 @@ import { notePainted } from '@/server/live/note-painted';
 import { makePaintedAlerts } from '@/server/live/painted-alerts';
 import type { Presence } from '@/server/cases/presence';
 import { makePump, type Pump } from '@/server/live/pump';
-import { pulseOnce } from '@/server/live/pulse';
-import { sweepOnce } from '@/server/live/sweep';
+import { pulseOnce } from '@/server/live/pulse-once';
+import { sweepOnce } from '@/server/live/sweep-once';
 import type { ServerContext } from '@/server/server-context';
 
 /** The live channel of one process. */

@@ -6,7 +6,7 @@ import { findCredentialsByEmail } from '@/db/repositories/people/find-credential
 import { DEMO_PASSWORD } from '@/db/seeds/demo-people';
 import { deriveSecret } from '@/server/auth/derive-secret';
 import { nextCode } from '@/server/auth/second-factor';
-import type { Fascicle } from '@/server/fascicle-global';
+import type { FascicleGlobal } from '@/server/fascicle-global';
 import { allowedOrigins } from '@/server/http/allowed-origins';
 import { serveRequests } from '@/server/http/serve-requests';
 import { chooseFreePort } from '@/server/setup/free-port';
@@ -38,7 +38,7 @@ export async function openTestHouse(options: { database?: TestDatabase; logLines
   const allowed = allowedOrigins(url, port);
   const settings = { publicUrl: url, secret: database.secret, demo: true, databaseUrlApp: database.appUrl, databaseUrlFeed: database.feedUrl, databaseUrlAudit: database.auditUrl };
   const house = startHouse({ settings, log, httpServer, allowed });
-  const before = globalThis.fascicle as Fascicle | undefined;
+  const before = globalThis.fascicle as FascicleGlobal | undefined;
   globalThis.fascicle = house.fascicle;
   httpServer.on('request', serveRequests({ allowed, publicUrl: url, isDevelopment: false, log, handle: serveRoutes }));
   await new Promise<void>((resolve) => httpServer.listen(port, '127.0.0.1', resolve));

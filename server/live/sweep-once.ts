@@ -19,8 +19,8 @@ type Context = Pick<ServerContext, 'database' | 'memory'>;
  */
 export async function sweepOnce(context: Context, io: LiveServer, departures: Departures): Promise<void> {
   const sockets = [...io.of('/').sockets.values()] as LiveSocket[];
-  const sessionIds = sockets.flatMap(({ data }) => data.sessionId ?? []);
-  const screenIds = sockets.flatMap(({ data }) => (data.visitor.kind === 'screen' ? data.visitor.screenId : []));
+  const sessionIds = sockets.flatMap((socket) => socket.data.sessionId ?? []);
+  const screenIds = sockets.flatMap((socket) => (socket.data.visitor.kind === 'screen' ? socket.data.visitor.screenId : []));
   const [sessions, screens] = await Promise.all([
     findLiveSessions(context.database.app, [...new Set(sessionIds)]),
     liveScreenIds(context.database.feed, [...new Set(screenIds)]),
@@ -35,12 +35,12 @@ export async function sweepOnce(context: Context, io: LiveServer, departures: De
     if (session === undefined) departures.cut(socket, 'signed-out');
     else socket.data.visitor = actorOf(session);
   }
-  await endFollowing(context, sockets.filter(({ connected, data }) => connected && data.visitor.kind === 'person'), departures);
+  await endFollowing(context, sockets.filter((socket) => socket.connected && socket.data.visitor.kind === 'person'), departures);
 }
 
 async function endFollowing(context: Context, sockets: readonly LiveSocket[], departures: Departures): Promise<void> {
-  const caseIds = [...new Set(sockets.flatMap(({ data }) => [...data.caseIds]))];
-  const resources = await describeCases(context, caseIds, [...new Set(sockets.flatMap(({ data }) => hospitalsOf(data.visitor)))]);
+  const caseIds = [...new Set(sockets.flatMap((socket) => [...socket.data.caseIds]))];
+  const resources = await describeCases(context, caseIds, [...new Set(sockets.flatMap((socket) => hospitalsOf(socket.data.visitor)))]);
   for (const socket of sockets) {
     const actor: Actor = socket.data.visitor;
     for (const caseId of [...socket.data.caseIds]) {

@@ -1,0 +1,56 @@
+import { afterAll, beforeAll, describe, expect, test } from 'vitest';
+
+import type { PersonCommand } from '@/lib/contracts/http/commands';
+import { runTimers } from '@/server/commands/run-timers';
+
+import { openSecondServer, type SecondServer } from './house/second-server';
+import { commit, planCaseAs, runCommand } from './house/client';
+import { openTestHouse, type TestHouse } from './house/open-test-house';
+
+const desk = 'desk@demo.example';
+let house: TestHouse;
+let later: { ms: number };
+const servers: SecondServer[] = [];
+
+beforeAll(async () => {
+  house = await openTestHouse();
+  later = { ms: 0 };
+  for (let count = 0; count < 3; count += 1) servers.push(openSecondServer(house, { nowMs: () => Date.now() + later.ms }));
+});
+afterAll(async () => {
+  await Promise.all(servers.map((server) => server.close()));
+  await house.close();
+});
+
+/** A case with a notice that waits for its repeat: a baseline, then a run at a fifth of its amplitude. */
+async function caseWithNotice(): Promise<string> {
+  const caseId = await planCaseAs(house, desk);
+  const commands: PersonCommand[] = [
+    { name: 'open-case', clockOffsetMs: null },
+    { name: 'confirm-timeout', side: 'left', text: null },
+    { name: 'change-phase', phase: 'baseline', reason: null },
+    ...Array.from({ length: 3 }, () => runCommand('wrist', 8_000, 'baseline')),
+    { name: 'accept-baseline', family: 'exposed', electrodeId: 'surface', reason: 'No train-of-four at hand' },
+    { name: 'change-phase', phase: 'monitoring', reason: null },
+    runCommand('wrist', 1_600),
+  ];
+  for (const command of commands) await commit(house, desk, caseId, command);
+  return caseId;
+}
+
+const kindsOf = async (caseId: string) => (await house.admin('entries').where({ case_id: caseId }).orderBy('seq').select('kind')).map(({ kind }: { kind: string }) => kind);
+
+describe('runTimers', () => {
+  test('raises the alert of a notice that was not repeated: once, by any number of servers, and not before its time', async () => {
+    const caseId = await caseWithNotice();
+    expect(await kindsOf(caseId)).toContain('notice.raised');
+    await Promise.all(servers.map(({ context }) => runTimers(context)));
+    expect(await kindsOf(caseId)).not.toContain('alert.raised');
+    later.ms = 120_000;
+    await Promise.all([...servers, ...servers].map(({ context }) => runTimers(context)));
+    const kinds = await kindsOf(caseId);
+    expect(kinds.filter((kind) => kind === 'alert.raised')).toEqual(['alert.raised']);
+    const raised = await house.admin('entries').where({ case_id: caseId, kind: 'alert.raised' }).first('author_role', 'command_id', 'body');
+    expect(raised).toMatchObject({ author_role: 'timer', command_id: expect.stringMatching(/^repeat\/ulnar-1\/\d+$/), body: { isRepeated: false } });
+  });
+});
