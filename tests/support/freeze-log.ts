@@ -15,5 +15,7 @@ const file = path.join(folder, `${name}.json`);
 if (existsSync(file)) throw new Error(`${name} stands already: a frozen log is never written again`);
 mkdirSync(folder, { recursive: true });
 const { entries } = everyKindCase();
-writeFileSync(file, `${JSON.stringify({ facts: replayedFacts(entries), entries }, null, 1)}\n`);
+// One entry a line, so that a person can read and compare it.
+const lines = entries.map((entry) => JSON.stringify(entry)).join(',\n');
+writeFileSync(file, `{"facts": ${JSON.stringify(replayedFacts(entries))},\n"entries": [\n${lines}\n]}\n`);
 process.stdout.write(`${entries.length} entries\n`);

@@ -14,6 +14,7 @@ export type WholeProduct = Readonly<{
   url: string;
   port: number;
   installation: Installation;
+  /** Throws while one of them is not running: a number 0 would mean this very group of programs to `kill`. */
   pids: () => { starter: number; server: number; database: number };
   /** What `npm start` printed so far. */
   printed: () => string;
@@ -74,7 +75,9 @@ export async function startWholeProduct(environment: Readonly<Record<string, str
 
 function pidsOf(stateFolder: string): { starter: number; server: number; database: number } {
   const record = readRunning(stateFolder);
-  return { starter: record?.starter.pid ?? 0, server: record?.server?.pid ?? 0, database: databaseProgram(stateFolder)?.pid ?? 0 };
+  const database = databaseProgram(stateFolder);
+  if (record?.server == null || database === null) throw new Error(`The product has no ${database === null ? 'database' : 'server'} running.`);
+  return { starter: record.starter.pid, server: record.server.pid, database: database.pid };
 }
 
 /** Known by its command line too: the number in the file may belong to somebody else by now. */

@@ -62,6 +62,9 @@ for (const theme of themes) {
         const wall = document.querySelector('.wall');
         return wall === null ? 'no wall' : `${wall.scrollWidth - wall.clientWidth},${wall.scrollHeight - wall.clientHeight}`;
       });
+      const neededPx = await tab.evaluate(() => document.querySelector<HTMLElement>('.wall')?.style.getPropertyValue('--needed') ?? '');
+      const parts = await tab.evaluate(() => [...(document.querySelector('.wall')?.children ?? [])].map((child) => Math.round(child.getBoundingClientRect().height)).join(' '));
+      process.stdout.write(`${state} ${theme} ${width}: needed ${neededPx}, heights ${parts}\n`);
       if (cut !== '0,0') process.stdout.write(`${state} ${theme} ${width}: cut by ${cut}\n`);
       await tab.screenshot({ path: path.join(folder, `${state}-${theme}-${width}${query === '' ? '' : `-${query.replaceAll(/\W/g, '-')}`}.png`) });
     }
