@@ -1,6 +1,8 @@
+import { SetupFailure } from '@/server/setup/setup-failure.mjs';
 import { duration, step } from '@/server/setup/step.mjs';
 import { ensureChromium } from './chromium';
 import { buildForTests } from './product-build';
+import { openRunFolder } from './run-folder';
 import { addTallies, exitStatusOf, nothing, tallySentence, type Tally } from './tally';
 import { programLevel, vitestLevel, workLevel, type TestLevel } from './test-level';
 import { startThrowawayCluster, type ThrowawayCluster } from './throwaway-cluster';
@@ -19,10 +21,11 @@ const withoutDatabase = new Set(['types', 'lint', 'arrows', 'architecture', 'lib
 /** Runs the levels that are wanted (all when none is named) and gives the exit status. */
 export async function runLevels(options: { only: readonly string[]; full: boolean; stop: AbortSignal }): Promise<number> {
   const unknown = options.only.filter((name) => !levels.some((level) => level.name === name));
-  if (unknown.length > 0) throw new Error(`There is no level "${unknown[0]}"; there are ${levels.map(({ name }) => name).join(', ')}.`);
+  if (unknown.length > 0) throw new SetupFailure('wrongSetting', `There is no level "${unknown[0]}"; there are ${levels.map(({ name }) => name).join(', ')}.`);
   const wanted = levels.filter(({ name }) => options.only.length === 0 || options.only.includes(name));
   if (options.full) process.env.FASCICLE_TEST_FULL = '1';
   if (wanted.some(({ name }) => name === 'e2e' || name === 'live' || name === 'faults')) await step('Chromium', ensureChromium);
+  const runFolder = openRunFolder();
   const cluster: { own: ThrowawayCluster | null } = { own: null };
   try {
     if (wanted.some(({ name }) => !withoutDatabase.has(name))) {
@@ -30,11 +33,12 @@ export async function runLevels(options: { only: readonly string[]; full: boolea
       process.env.FASCICLE_TEST_ADMIN_URL = cluster.own?.adminUrl ?? '';
     }
     const tally = await runEach(wanted, options.stop);
-    if (options.stop.aborted) throw new Error('The tests were stopped before their end.');
+    if (options.stop.aborted) throw new SetupFailure('unexpected', 'The tests were stopped before their end.');
     process.stdout.write(`\n${tallySentence(tally)}\n`);
     return exitStatusOf(tally);
   } finally {
     await cluster.own?.remove();
+    await runFolder.remove();
   }
 }
 
