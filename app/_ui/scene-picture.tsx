@@ -48,7 +48,15 @@ function ShapeElement({ shape }: { readonly shape: Shape }) {
         />
       );
     case 'node':
-      return <circle className={joinClasses(tone, 'scene-node')} cx={shape.x} cy={shape.y} r={shape.radiusPx} strokeWidth={shape.strokePx} />;
+      return (
+        <circle
+          className={joinClasses(tone, shape.strokePx === null ? 'scene-fill' : 'scene-node')}
+          cx={shape.x}
+          cy={shape.y}
+          r={shape.radiusPx}
+          strokeWidth={shape.strokePx ?? undefined}
+        />
+      );
     case 'text':
       return (
         <text

@@ -1,11 +1,11 @@
 import { labelsBelow } from '@/lib/chart/labels-below';
 import { lineScale } from '@/lib/chart/line-scale';
 import type { NerveLineView } from '@/lib/chart/nerve-line';
-import { nerveLineSizes, type NerveLineOptions, type NerveLineSizes } from '@/lib/chart/nerve-line-sizes';
+import { nerveLineSizes, type NerveLineOptions } from '@/lib/chart/nerve-line-sizes';
+import { nodeShapes } from '@/lib/chart/node-shapes';
 import type { Scene, Shape } from '@/lib/chart/scene';
 import { segmentShapes } from '@/lib/chart/segment-shapes';
 import { siteLabels } from '@/lib/chart/site-labels';
-import { toneOf } from '@/lib/chart/tone-of';
 
 /**
  * The nerve line as shapes: the nerve to scale, its responses above, its velocities and their ages below.
@@ -34,19 +34,11 @@ export function nerveLineScene(view: NerveLineView, options: NerveLineOptions): 
     ...view.segments.flatMap((segment) =>
       segmentShapes(segment, toX(segment.fromMm) + sizes.radiusPx, toX(segment.toMm) - sizes.radiusPx, sizes),
     ).map((shape) => moved(shape, middle)),
-    ...nodes(view, sizes, toX, middle),
+    ...nodeShapes(view, sizes, toX).map((shape) => moved(shape, middle)),
     ...below.shapes.map((shape) => moved(shape, middle + sizes.thicknessPx * 0.75)),
   ];
   const heightPx = Math.ceil(middle + sizes.thicknessPx * 0.75 + below.heightPx + sizes.textPx * 0.25);
   return { widthPx: sizes.widthPx, heightPx, description: view.description, shapes };
-}
-
-function nodes(view: NerveLineView, sizes: NerveLineSizes, toX: (positionMm: number) => number, y: number): readonly Shape[] {
-  const node = (key: string, positionMm: number, tone: Extract<Shape, { kind: 'node' }>['tone']): Shape => ({
-    kind: 'node', key: `node-${key}`, role: 'node', tone, x: toX(positionMm), y, radiusPx: sizes.radiusPx, strokePx: sizes.strokePx,
-  });
-  const sites = view.sites.map((site) => node(site.siteId, site.positionMm, toneOf(site.priority, site.isDim ? 'second' : 'ink')));
-  return view.end === null ? sites : [...sites, node('end', view.end.positionMm, 'second')];
 }
 
 function moved(shape: Shape, byPx: number): Shape {

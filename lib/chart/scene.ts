@@ -1,5 +1,8 @@
-/** Colour by meaning; the renderer knows the theme. Priority tones are for notice and alert, nothing else. */
-export type Tone = 'ink' | 'second' | 'rule' | 'ghost' | 'ground' | 'high' | 'medium' | 'medium-edge' | 'low';
+/**
+ * Colour by meaning; the renderer knows the theme. Priority tones are for watch, notice and alert, nothing else. On paper
+ * yellow needs an edge around what is drawn and a ground behind what is written; both are nothing in the dark.
+ */
+export type Tone = 'ink' | 'second' | 'rule' | 'ghost' | 'ground' | 'high' | 'medium' | 'medium-edge' | 'medium-back' | 'low';
 
 /** One shape, in px of the scene, x to the right and y down. `role` names what it stands for; roles may repeat. */
 export type Shape =
@@ -36,7 +39,8 @@ export type Shape =
       readonly x: number;
       readonly y: number;
       readonly radiusPx: number;
-      readonly strokePx: number;
+      /** Null fills the circle; a number draws its edge on the ground. */
+      readonly strokePx: number | null;
     }
   | {
       readonly kind: 'text';

@@ -82,7 +82,7 @@ function draw(blocks: readonly PlacedBlock[], sizes: NerveLineSizes): SiteLabels
   const rows = Math.max(...blocks.map((block) => block.place.row), 0) + 1;
   const shapes = blocks.flatMap((block) => {
     const valueY = -clearPx - block.place.row * rowHeightPx;
-    const value: Shape = {
+    const value: Extract<Shape, { kind: 'text' }> = {
       ...blockText(block, `value-${block.key}`, 'response', block.value, valueY),
       tone: block.tone,
       sizePx: block.valueSizePx,
@@ -98,9 +98,16 @@ function draw(blocks: readonly PlacedBlock[], sizes: NerveLineSizes): SiteLabels
       isMono: false,
       isBold: false,
     }));
-    return [...leader(block, blocks, valueY, sizes), value, ...names];
+    return [...leader(block, blocks, valueY, sizes), ...ground(value), value, ...names];
   });
   return { shapes, heightPx: clearPx + rows * rowHeightPx };
+}
+
+/** What yellow words stand on where they cannot stand on white. */
+function ground(value: Extract<Shape, { kind: 'text' }>): readonly Shape[] {
+  if (value.tone !== 'medium') return [];
+  const { x, y, widthPx, sizePx } = value;
+  return [{ kind: 'rect', key: `ground-${value.key}`, role: 'ground', tone: 'medium-back', x: x - widthPx / 2, y: y - sizePx * 0.78, widthPx, heightPx: sizePx * 0.9, strokePx: null, dashPx: null }];
 }
 
 function blockText(block: PlacedBlock, key: string, role: string, text: string, y: number) {

@@ -1,6 +1,7 @@
 import { theatreMark } from '@/app/_features/theatre/theatre-marks';
 import { joinClasses } from '@/app/_ui/join-classes';
 import { PriorityMark } from '@/app/_ui/priority-mark';
+import { nonBreakingSpace } from '@/lib/text/format';
 import type { TheatreLine } from '@/lib/text/theatre-line';
 
 /**
@@ -15,12 +16,12 @@ export function LeadBand({ line }: { readonly line: TheatreLine }) {
       return <MediumBand line={line} />;
     case 'low':
       return (
-        <section className="border-y border-rule px-(--edge-room) py-[0.8em] text-(length:--needed)">
+        <section className="border-y border-rule px-(--edge-room) py-[0.55em] text-(length:--needed)">
           <div className="flex w-fit max-w-full items-center gap-[0.35em] border-[0.06em] border-low px-[0.35em] py-[0.12em] text-[calc(var(--headline)*0.85)] text-low">
             <PriorityMark kind={theatreMark(line)} className="size-[0.8em] shrink-0" />
             <Headline text={line.headline} />
           </div>
-          <Detail text={line.detail} className="mt-[0.6em] text-ink" />
+          <Detail text={line.detail} className="mt-[0.4em] text-ink" />
         </section>
       );
     case null:
@@ -60,7 +61,7 @@ function MediumBand({ line }: { readonly line: TheatreLine }) {
         <PriorityMark kind="medium" className="size-[0.85em] shrink-0" />
         <Headline text={line.headline} />
       </div>
-      <Detail text={line.detail} className="px-(--edge-room) py-[0.7em] text-ink" />
+      <Detail text={line.detail} className="px-(--edge-room) py-[0.5em] text-ink" />
     </section>
   );
 }
@@ -81,5 +82,7 @@ function Headline({ text }: { readonly text: string }) {
 }
 
 function Detail({ text, className }: { readonly text: string; readonly className: string }) {
-  return text === '' ? null : <p className={joinClasses('leading-[1.25] text-balance wrap-anywhere', className)}>{text}</p>;
+  // A time or a count never stands alone at the start of a line.
+  const words = text.replaceAll(/ (?=\d)/g, nonBreakingSpace);
+  return text === '' ? null : <p className={joinClasses('leading-[1.25] text-balance wrap-anywhere', className)}>{words}</p>;
 }

@@ -1,4 +1,3 @@
-import { joinClasses } from '@/app/_ui/join-classes';
 import { ScenePicture } from '@/app/_ui/scene-picture';
 import type { NerveLineView } from '@/lib/chart/nerve-line';
 import { nerveLineScene } from '@/lib/chart/nerve-line-scene';
@@ -15,13 +14,19 @@ interface NerveLinesProps {
 export function NerveLines({ views, widthPx, textPx, hasAges, emphasis }: NerveLinesProps) {
   const isAlone = views.length === 1;
   return (
-    <div className="flex flex-1 shrink-0 flex-col justify-evenly gap-[0.6em] px-(--edge-room) py-[0.5em] text-(length:--needed)">
+    <div className="flex flex-1 shrink-0 flex-col justify-evenly gap-[0.35em] px-(--edge-room) py-[0.35em] text-(length:--needed)">
       {views.map((view) => (
-        <figure key={view.nerveId}>
-          <figcaption className={joinClasses('leading-none font-bold', isAlone && 'sr-only')}>{view.nerveName}</figcaption>
-          <ScenePicture scene={nerveLineScene(view, { widthPx, textPx, hasAges, emphasis: isAlone ? emphasis : 1 })} className="block" />
-        </figure>
+        <ScenePicture
+          key={view.nerveId}
+          scene={nerveLineScene(isAlone ? view : named(view), { widthPx, textPx, hasAges, emphasis: isAlone ? emphasis : 1 })}
+          className="block"
+        />
       ))}
     </div>
   );
+}
+
+/** Beside another nerve, the name stands at the end of the line, over the channel. */
+function named(view: NerveLineView): NerveLineView {
+  return view.end === null ? view : { ...view, end: { ...view.end, caption: view.nerveName } };
 }

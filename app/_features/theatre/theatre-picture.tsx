@@ -40,7 +40,7 @@ export function TheatrePicture({ place, procedure, clock, isLive, deskWords, vie
       {view.footer.length === 0 ? null : (
         <footer className="border-t border-rule px-(--edge-room) py-[0.55em] text-(length:--needed) leading-[1.2] text-second">
           <ul className="flex flex-wrap gap-x-[1.4em] gap-y-[0.2em]">
-            {view.footer.map((fact) => (
+            {view.footer.slice(0, type.factCount).map((fact) => (
               <li key={fact}>{fact}</li>
             ))}
           </ul>

@@ -8,6 +8,8 @@ import type { ScreenReply } from '@/lib/contracts/http/replies';
 
 /** How often a wall asks how it stands. Revocation comes over the live channel at once; this is its second way. */
 const askEveryMs = 2000;
+/** Set in a browser that has been a wall. */
+const askedKey = 'fascicle-wall-asked';
 
 /** How this wall stands: waiting with its code, paired, or not known; with what ended before. */
 export interface ScreenStanding {
@@ -49,16 +51,39 @@ export function useScreen(): ScreenStanding {
 
 async function askStanding(): Promise<ScreenStanding> {
   try {
-    const reply = await readScreen().catch((failure: unknown) => {
-      const isUnknown = failure instanceof ApiFailure && (failure.kind === 'not-found' || failure.kind === 'not-signed-in');
-      if (isUnknown) return askForScreen();
-      throw failure;
-    });
+    const reply = hasAskedBefore() ? await readKnownScreen() : await askForScreen();
+    rememberAsking();
     if (reply.kind !== 'ended') return { reply, ended: null, problem: null };
     const next = await askForScreen();
     return { reply: next.kind === 'ended' ? null : next, ended: reply, problem: null };
   } catch (failure) {
     const problem = failure instanceof ApiFailure ? failure.message : 'No answer: this screen asks again';
     return { reply: null, ended: null, problem };
+  }
+}
+
+/** A wall that the server does not know any more asks like a new one. */
+async function readKnownScreen(): Promise<ScreenReply> {
+  return readScreen().catch((failure: unknown) => {
+    const isUnknown = failure instanceof ApiFailure && (failure.kind === 'not-found' || failure.kind === 'not-signed-in');
+    if (isUnknown) return askForScreen();
+    throw failure;
+  });
+}
+
+/** A browser that never was a wall is not asked after first: the server would not find it, and the console would call that an error. */
+function hasAskedBefore(): boolean {
+  try {
+    return window.localStorage.getItem(askedKey) !== null;
+  } catch {
+    return true;
+  }
+}
+
+function rememberAsking(): void {
+  try {
+    window.localStorage.setItem(askedKey, 'yes');
+  } catch {
+    // A wall without storage asks after itself each time; its cookie decides.
   }
 }

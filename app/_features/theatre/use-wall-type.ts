@@ -3,7 +3,7 @@
 import { useLayoutEffect, useState, type RefObject } from 'react';
 import { flushSync } from 'react-dom';
 
-import { useFontStatus, useWindowSize } from '@/app/_features/theatre/use-window-size';
+import { useFontArrivals, useWindowSize } from '@/app/_features/theatre/use-window-size';
 import type { WallSettings } from '@/app/_features/theatre/wall-settings';
 import { theatreTypeScale } from '@/lib/chart/theatre-type-scale';
 
@@ -14,6 +14,8 @@ export interface WallType {
   readonly roomPx: number;
   readonly hasAges: boolean;
   readonly emphasis: number;
+  /** How many of the facts at the foot there is room for, most needed first. */
+  readonly factCount: number;
 }
 
 /**
@@ -21,15 +23,16 @@ export interface WallType {
  * down to 16 minutes of arc, the least that the ergonomics standard allows (from memory): smaller words before cut words.
  */
 const steps = [
-  { headline: 1.8, needed: 1, hasAges: true, emphasis: 1.8 },
-  { headline: 1.5, needed: 1, hasAges: true, emphasis: 1.4 },
-  { headline: 1.2, needed: 1, hasAges: true, emphasis: 1 },
-  { headline: 1, needed: 1, hasAges: true, emphasis: 1 },
-  { headline: 1, needed: 1, hasAges: false, emphasis: 1 },
-  { headline: 0.95, needed: 0.93, hasAges: false, emphasis: 1 },
-  { headline: 0.9, needed: 0.86, hasAges: false, emphasis: 1 },
-  { headline: 0.85, needed: 0.79, hasAges: false, emphasis: 1 },
-  { headline: 0.8, needed: 0.73, hasAges: false, emphasis: 1 },
+  { headline: 1.8, needed: 1, hasAges: true, emphasis: 1.8, factCount: 6 },
+  { headline: 1.5, needed: 1, hasAges: true, emphasis: 1.4, factCount: 6 },
+  { headline: 1.2, needed: 1, hasAges: true, emphasis: 1, factCount: 6 },
+  { headline: 1, needed: 1, hasAges: true, emphasis: 1, factCount: 6 },
+  { headline: 1, needed: 1, hasAges: false, emphasis: 1, factCount: 6 },
+  { headline: 1, needed: 1, hasAges: false, emphasis: 1, factCount: 2 },
+  { headline: 0.95, needed: 0.93, hasAges: false, emphasis: 1, factCount: 2 },
+  { headline: 0.9, needed: 0.86, hasAges: false, emphasis: 1, factCount: 2 },
+  { headline: 0.85, needed: 0.79, hasAges: false, emphasis: 1, factCount: 2 },
+  { headline: 0.8, needed: 0.73, hasAges: false, emphasis: 1, factCount: 2 },
 ] as const;
 
 /** Side margin of the wall in needed sizes; the same as `--edge-room` in globals.css. */
@@ -43,8 +46,8 @@ const edgeRoom = 1.15;
 export function useWallType(root: RefObject<HTMLElement | null>, settings: WallSettings, words: string): WallType {
   const { distanceM, diagonalInch } = settings;
   const { widthPx, heightPx } = useWindowSize();
-  const fontStatus = useFontStatus();
-  const fitKey = [fontStatus, words.replaceAll(/\d/g, '0'), widthPx, heightPx, distanceM, diagonalInch].join('|');
+  const fontArrivals = useFontArrivals();
+  const fitKey = [fontArrivals, words.replaceAll(/\d/g, '0'), widthPx, heightPx, distanceM, diagonalInch].join('|');
   const [fit, setFit] = useState({ key: fitKey, step: 0 });
   const index = fit.key === fitKey ? fit.step : 0;
   const step = steps[index] ?? steps[0];
@@ -63,5 +66,6 @@ export function useWallType(root: RefObject<HTMLElement | null>, settings: WallS
     if (isCut && index < steps.length - 1) queueMicrotask(() => flushSync(() => setFit({ key: fitKey, step: index + 1 })));
   }, [root, neededPx, statePx, step.headline, index, fitKey]);
 
-  return { neededPx, roomPx: Math.floor(widthPx - 2 * edgeRoom * neededPx), hasAges: step.hasAges, emphasis: step.emphasis };
+  const { hasAges, emphasis, factCount } = step;
+  return { neededPx, roomPx: Math.floor(widthPx - 2 * edgeRoom * neededPx), hasAges, emphasis, factCount };
 }

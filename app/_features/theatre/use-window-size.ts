@@ -10,14 +10,20 @@ function onResize(listener: () => void): () => void {
   return () => window.removeEventListener('resize', listener);
 }
 
+let arrivals = 0;
+
 function onFonts(listener: () => void): () => void {
-  document.fonts.addEventListener('loadingdone', listener);
-  return () => document.fonts.removeEventListener('loadingdone', listener);
+  const count = () => {
+    arrivals += 1;
+    listener();
+  };
+  document.fonts.addEventListener('loadingdone', count);
+  return () => document.fonts.removeEventListener('loadingdone', count);
 }
 
-/** Whether the faces have arrived: words take another room in them than in their stand-ins. */
-export function useFontStatus(): string {
-  return useSyncExternalStore(onFonts, () => document.fonts.status, () => 'loading');
+/** Grows whenever a face has arrived: words take another room in it than in its stand-in. */
+export function useFontArrivals(): number {
+  return useSyncExternalStore(onFonts, () => arrivals, () => 0);
 }
 
 /** Width and height of the window in px; never so small that no type could be chosen for it. */
