@@ -1,5 +1,6 @@
+import { Client } from 'pg';
 import type { Browser } from 'playwright-core';
-import { afterAll, beforeAll, describe, expect, test } from 'vitest';
+import { afterAll, beforeAll, describe, expect, test, vi } from 'vitest';
 
 import { signInAsDemo } from '@/tests/live/sign-in-as';
 import { envelope, planRequest, send } from '@/tests/server/house/client';
@@ -9,7 +10,6 @@ import { startProduct, type Product } from '@/tests/support/start-product';
 import { findLosses, type LogRow } from './find-losses';
 import { startWriter, type Writer } from './journal';
 import { openWatchedWall, type WatchedWall } from './watched-wall';
-import { Client } from 'pg';
 
 /** Twenty of each in the full form; the short form shows the same on a few. */
 const killCount = process.env.FASCICLE_TEST_FULL === '1' ? 20 : 4;
@@ -22,6 +22,7 @@ let product: Product;
 let browser: Browser;
 let wall: WatchedWall;
 let writer: Writer;
+let isWriting = false;
 let caseId: string;
 
 beforeAll(async () => {
@@ -34,10 +35,11 @@ beforeAll(async () => {
   wall = await openWatchedWall(browser, product, { cookie, caseId });
   await wall.waitUntilLive(20_000);
   writer = startWriter({ url: product.url, cookie, caseId });
-  await expect.poll(() => writer.acknowledged().length, { timeout: 20_000 }).toBeGreaterThan(3);
+  isWriting = true;
+  await vi.waitUntil(() => writer.acknowledged().length > 3, { timeout: 20_000 });
 });
 afterAll(async () => {
-  await writer.stop();
+  if (isWriting) await writer.stop();
   await browser.close();
   await product.stop();
 });

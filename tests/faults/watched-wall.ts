@@ -30,7 +30,7 @@ export async function openWatchedWall(browser: Browser, product: Pick<Product, '
   await pair(false);
   const paired = await pair(true);
   if (paired.status !== 200) throw new Error(`Pairing answered ${paired.status}: ${JSON.stringify(paired.body)}`);
-  await page.waitForSelector('[data-live]');
+  await page.waitForSelector('[data-live]', { state: 'attached' });
   await page.evaluate(() => {
     const samples: { atMs: number; cover: number; isLoaded: boolean }[] = [];
     Object.assign(window, { wallSamples: samples });
