@@ -10,7 +10,7 @@ interface CellProps {
 /** A table with its caption for those who do not see it; it scrolls sideways by itself on a narrow screen. */
 export function Table({ caption, className, children, ...rest }: ComponentProps<'table'> & { readonly caption: string }) {
   return (
-    <div className="overflow-x-auto" role="region" aria-label={caption} tabIndex={0}>
+    <div className="overflow-x-auto" role="region" aria-label={`Table: ${caption}`} tabIndex={0}>
       <table className={joinClasses('w-full border-collapse text-left', className)} {...rest}>
         <caption className="sr-only">{caption}</caption>
         {children}

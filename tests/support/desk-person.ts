@@ -1,5 +1,6 @@
 import type { Browser, BrowserContextOptions, Locator, Page } from 'playwright-core';
 
+import { takeSession } from '@/tests/support/demo-session';
 import { plain, withoutRunningTime } from '@/tests/support/wall-screen';
 import { openWatchedPage, watchPage, type WatchedPage } from '@/tests/support/watched-page';
 
@@ -16,6 +17,13 @@ export class DeskPerson {
   static async open(browser: Browser, url: string, options: BrowserContextOptions = {}): Promise<DeskPerson> {
     const watched = await openWatchedPage(browser, options);
     return new DeskPerson(watched, url);
+  }
+
+  /** A browser in which this demo person signed in before. */
+  static async openSignedIn(browser: Browser, url: string, email = 'desk@demo.example', options: BrowserContextOptions = {}): Promise<DeskPerson> {
+    const person = await DeskPerson.open(browser, url, options);
+    await takeSession(person.watched.context, { url }, email);
+    return person;
   }
 
   /** Another tab of the same browser. */

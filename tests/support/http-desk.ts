@@ -5,9 +5,9 @@ import type { RunBody } from '@/lib/case/run-body';
 import type { PersonCommand } from '@/lib/contracts/http/commands';
 import type { CommandReply, WireEntry } from '@/lib/contracts/http/replies';
 import type { Reading } from '@/lib/response/reading';
-import { signInAsDemo } from '@/tests/live/sign-in-as';
 import { send, type HttpAnswer } from '@/tests/server/house/client';
-import { apb, adm, ulnarSites, type UlnarSite } from '@/tests/support/ulnar-case';
+import { demoSession } from '@/tests/support/demo-session';
+import { adm, apb, ulnarSites, type UlnarSite } from '@/tests/support/ulnar-case';
 
 type Run = PersonCommand & { name: 'log-run' };
 /** Seconds before now at which something happened; an entry may come late. */
@@ -24,7 +24,7 @@ export class HttpDesk {
 
   /** Signs in and plans a case. */
   static async plan(product: { readonly url: string }, plan: CasePlan, email = 'desk@demo.example'): Promise<HttpDesk> {
-    const cookie = (await signInAsDemo(product, email)).header;
+    const cookie = await demoSession(product, email);
     const body = { commandId: newId(), eventAt: new Date().toISOString(), plan, identity: { patientLabel: 'Invented patient', recordNumber: 'DEMO-1' } };
     const { status, body: reply } = await send(product, 'POST', '/api/cases', { cookie, body });
     if (status !== 200) throw new Error(`Planning answered ${status}: ${JSON.stringify(reply)}`);
@@ -78,7 +78,7 @@ export class HttpDesk {
     await this.give({ name: 'change-phase', phase: 'monitoring', reason: null }, ago);
   }
 
-  /** Every ulnar site once, each at the same share of its baseline. */
+  /** Every ulnar site once, each at the same share of its baseline. A fall is read from distal to proximal: the other way round it begins as a proximal one. */
   async testUlnar(share = 1, ago: Ago = {}, sites: readonly UlnarSite[] = ulnarSites): Promise<void> {
     for (const site of sites) await this.run(site, { adm: adm(site, share) }, {}, ago);
   }

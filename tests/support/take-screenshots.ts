@@ -102,7 +102,7 @@ async function shootDesk(browser: Browser, product: Product): Promise<void> {
     await desk.typeRun('4', [['290', '9400']]);
     await desk.page.keyboard.press('Enter');
   });
-  await each('record', async (desk) => (await desk.goTo(`/cases/${http.caseId}/record`), desk.page.getByRole('heading', { name: 'Record' }).first().waitFor()));
+  await each('record', async (desk) => (await desk.goTo(`/cases/${http.caseId}/record`), desk.page.getByRole('heading', { name: 'Entries' }).waitFor()));
   for (const { theme, desk } of desks) await desk.page.screenshot({ path: path.join(folder, `record-whole-${theme}.png`), fullPage: true });
   process.stdout.write(desks.flatMap(({ desk }) => desk.watched.errors()).map((error) => `${error}\n`).join(''));
 }

@@ -31,10 +31,7 @@ const twice = async (desk: HttpDesk, sites: readonly (keyof typeof lost)[]) => {
 };
 const lost = { axilla: { adm: absent(30) }, 'above-elbow': { adm: absent(30) }, 'below-elbow': { adm: absent(30) }, wrist: { adm: absent(30) }, 'median-wrist': { apb: absent(30) } } as const;
 
-const end = async (desk: HttpDesk, alertId: string) => {
-  await desk.give({ name: 'end-alert', alertId, outcome: 'full', cause: 'surgical', text: null });
-  await back(desk);
-};
+const end = (desk: HttpDesk, alertId: string) => desk.give({ name: 'end-alert', alertId, outcome: 'full', cause: 'surgical', text: null });
 
 /** The states in the order in which one operation can meet them, from the planned case to the closed one. */
 export const wallCourse: readonly WallLeg[] = [
@@ -43,7 +40,7 @@ export const wallCourse: readonly WallLeg[] = [
   { name: 'not-tested-since-baseline', lead: /^Not tested since baseline$/, play: (desk) => desk.ulnarBaseline({ agoS: 2100 }) },
   { name: 'stable', lead: /^Stable$/, play: async (desk) => (await desk.step('nerve-lifted', { agoS: 240 }), back(desk)) },
   { name: 'improved', lead: /^Ulnar improved, 142 % of baseline$/, play: (desk) => desk.testUlnar(1.42) },
-  { name: 'watch', lead: /^Ulnar at 62 % of baseline$/, play: (desk) => desk.testUlnar(0.62) },
+  { name: 'watch', lead: /^Ulnar at 62 % of baseline$/, play: (desk) => desk.testUlnar(0.62, {}, [...ulnarSites].reverse()) },
   { name: 'not-compared', lead: /^Ulnar not compared since /, play: async (desk) => (await desk.testUlnar(), desk.run('above-elbow', { adm: adm('above-elbow', 0.7) }, { intensityMa: 9, isSupramaximal: false })) },
   { name: 'tourniquet-up', lead: /^Tourniquet up 2 min$/, play: async (desk) => (await desk.testUlnar(), cuff(desk, true, 125)) },
   { name: 'paused', lead: /^Paused$/, play: async (desk) => (await cuff(desk, false), phase(desk, 'paused', 'Cautery')) },
@@ -52,8 +49,8 @@ export const wallCourse: readonly WallLeg[] = [
   { name: 'alert', lead: /^Ulnar at 36 % of baseline$/, play: lesion },
   { name: 'told', lead: /^Ulnar at 36 % of baseline$/, play: (desk) => desk.give({ name: 'tell-alert', alertId: 'ulnar-1', whom: 'surgeon', how: 'aloud', words: 'Ulnar at 36 per cent of baseline' }) },
   { name: 'recovered', lead: /^Ulnar back at 92 % of baseline$/, play: async (desk) => (await desk.testUlnar(0.92), desk.testUlnar(0.92)) },
-  { name: 'lost', lead: /^No ulnar response$/, play: async (desk) => (await end(desk, 'ulnar-1'), await twice(desk, ['above-elbow', 'axilla']), desk.testUlnar(0.98, {}, ['below-elbow', 'wrist'])) },
+  { name: 'lost', lead: /^No ulnar response$/, play: async (desk) => (await end(desk, 'ulnar-1'), await back(desk), await twice(desk, ['above-elbow', 'axilla']), desk.testUlnar(0.98, {}, ['below-elbow', 'wrist'])) },
   { name: 'cannot-be-judged', lead: /^No ulnar response$/, play: (desk) => twice(desk, [...ulnarSites, 'median-wrist']) },
   { name: 'take-down', lead: /^No ulnar response$/, play: (desk) => phase(desk, 'take-down') },
-  { name: 'closed', lead: /^Case closed \d\d:\d\d$/, play: (desk) => desk.give({ name: 'close-case', text: null }) },
+  { name: 'closed', lead: /^Case closed \d\d:\d\d$/, play: async (desk) => (await end(desk, 'ulnar-2'), desk.give({ name: 'close-case', text: null })) },
 ];

@@ -30,7 +30,7 @@ export function SitesTable({ nerveIndex }: { readonly nerveIndex: number }) {
   };
   return (
     <>
-      <Table caption="Sites from proximal to distal" className="max-w-4xl">
+      <Table caption={`Sites of nerve ${nerveIndex + 1} from proximal to distal`} className="max-w-4xl">
         <thead>
           <tr>
             <HeadCell>Site</HeadCell>
