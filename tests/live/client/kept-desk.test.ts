@@ -36,8 +36,9 @@ const heldByWorker = (page: Page) =>
   });
 
 const say = async (text: string) => {
-  await desk.page.getByLabel('Message').fill(text);
-  await desk.page.getByLabel('Message').press('Enter');
+  const line = desk.page.getByRole('textbox', { name: 'Message' });
+  await line.fill(text);
+  await line.press('Enter');
 };
 
 async function committedTexts(): Promise<unknown[]> {
@@ -77,6 +78,7 @@ describe('a desk whose server goes away', () => {
   });
 
   test('forgets page and case at sign-out', async () => {
+    await desk.goTo('/cases');
     await desk.signOut();
     await desk.waitFor(async () => (await heldByWorker(desk.page)).filter((url) => url.startsWith('/cases/')).length === 0, 10_000, 'no page is kept');
     const rows = await desk.page.evaluate(
@@ -99,6 +101,7 @@ describe('a wall whose server goes away', () => {
   test('is covered within 3 s and uncovered by itself when the server is back', async () => {
     const wall = await WallScreen.open(browser, product.url);
     await http.pair(await wall.code());
+    await wall.waitForLead(/^Ulnar: no baseline yet$/);
     await desk.waitFor(async () => !(await wall.isCovered()), 10_000, 'the wall is live');
     wall.watched.expectError(/./);
     await product.kill9();
