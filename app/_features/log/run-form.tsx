@@ -1,6 +1,6 @@
 'use client';
 
-import { useEffect, useRef, type FormEvent, type KeyboardEvent } from 'react';
+import { useRef, type FormEvent, type KeyboardEvent } from 'react';
 
 import { useLogCase } from '@/app/_features/log/log-context';
 import { QuestionStrip } from '@/app/_features/log/question-strip';
@@ -8,6 +8,7 @@ import { ReadingRow } from '@/app/_features/log/reading-row';
 import { isTouched, notReadDraft } from '@/app/_features/log/run-draft';
 import { SettingsFields } from '@/app/_features/log/settings-fields';
 import { SiteGroup } from '@/app/_features/log/site-group';
+import { focusOn, useFocusWish } from '@/app/_features/log/use-focus-wish';
 import { useHotkeys } from '@/app/_features/log/use-hotkeys';
 import { useRunForm } from '@/app/_features/log/use-run-form';
 import { Button } from '@/app/_ui/button';
@@ -16,22 +17,11 @@ import { Field } from '@/app/_ui/field';
 /** The next run, by keyboard: site, readings, Enter. Nothing is logged twice, nothing unread is blank. */
 export function RunForm({ areKeysOn }: { readonly areKeysOn: boolean }) {
   const { state, openDialog } = useLogCase();
-  const form = useRunForm();
-  const { draft, channels, sentences, focusWish } = form;
   const frame = useRef<HTMLFormElement>(null);
-  const group = useRef<HTMLDivElement>(null);
   const focusedChannel = useRef<string | null>(null);
-  const focusSite = () => group.current?.querySelector<HTMLElement>('[aria-checked="true"]')?.focus();
-
-  useEffect(() => {
-    const wish = focusWish.current;
-    if (wish === null) return;
-    focusWish.current = null;
-    if (wish === 'site') focusSite();
-    else if (wish === 'reading') frame.current?.querySelector<HTMLElement>('[data-channel] [data-numeric]')?.focus();
-    else if (wish === 'error') frame.current?.querySelector<HTMLElement>('[aria-invalid="true"]')?.focus();
-    else frame.current?.querySelector<HTMLElement>(`[data-field="${wish.field}"]`)?.focus();
-  });
+  const wishFocus = useFocusWish(frame);
+  const form = useRunForm(wishFocus);
+  const { draft, channels, sentences } = form;
 
   const noResponse = () => {
     const isHere = frame.current?.contains(document.activeElement) === true;
@@ -42,14 +32,14 @@ export function RunForm({ areKeysOn }: { readonly areKeysOn: boolean }) {
       form.setHint(`${channel.name} has values: clear them before no response is marked`);
       return;
     }
-    focusWish.current = { field: `${channel.id}.highest` };
+    wishFocus({ field: `${channel.id}.highest` });
     form.typeChannel(channel.id, { kind: 'absent', highest: draft.settings.intensity });
   };
   useHotkeys(
     {
       n: noResponse,
       r: form.sameSettings,
-      s: focusSite,
+      s: () => focusOn(frame.current, 'site'),
       u: () => {
         const last = state.runs.at(-1);
         if (last !== undefined) openDialog({ kind: 'correct', runSeq: last.seq });
@@ -71,7 +61,7 @@ export function RunForm({ areKeysOn }: { readonly areKeysOn: boolean }) {
   };
   return (
     <form ref={frame} method="post" noValidate aria-label="Next run" onKeyDown={handleKey} onSubmit={handleSubmit} className="flex flex-col gap-3 border-y border-rule bg-raised px-5 py-3">
-      <SiteGroup nerves={state.plan.nerves} siteId={draft.settings.siteId} groupRef={group} onChoose={(siteId, isByKey) => form.chooseSite(siteId, isByKey ? 'reading' : 'site')} />
+      <SiteGroup nerves={state.plan.nerves} siteId={draft.settings.siteId} onChoose={(siteId, isByKey) => form.chooseSite(siteId, isByKey ? 'reading' : 'site')} />
       <SettingsFields plan={state.plan} draft={draft} sentences={sentences} onDraft={form.change} />
       <div className="overflow-x-auto">
         <div className="grid grid-cols-[5.5rem_repeat(3,minmax(5.5rem,7rem))_8.5rem_minmax(9rem,1fr)] gap-2 pb-1 text-sm text-second" aria-hidden="true">
@@ -116,7 +106,7 @@ export function RunForm({ areKeysOn }: { readonly areKeysOn: boolean }) {
           question={form.question}
           onCorrect={() => {
             form.setQuestion(null);
-            focusWish.current = 'reading';
+            wishFocus('reading');
           }}
           onConfirm={() => form.log(true)}
         />

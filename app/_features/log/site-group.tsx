@@ -1,6 +1,6 @@
 'use client';
 
-import type { KeyboardEvent, RefObject } from 'react';
+import type { KeyboardEvent } from 'react';
 
 import { joinClasses } from '@/app/_ui/join-classes';
 import { Kbd } from '@/app/_ui/kbd';
@@ -9,13 +9,12 @@ import type { Nerve } from '@/lib/alert/nerve-plan';
 interface SiteGroupProps {
   readonly nerves: readonly Nerve[];
   readonly siteId: string;
-  readonly groupRef: RefObject<HTMLDivElement | null>;
   /** `isByKey`: a digit chose it, the hand goes on to the readings. */
   readonly onChoose: (siteId: string, isByKey: boolean) => void;
 }
 
 /** Where the nerve is stimulated. Only while it has the focus does a digit choose a site. */
-export function SiteGroup({ nerves, siteId, groupRef, onChoose }: SiteGroupProps) {
+export function SiteGroup({ nerves, siteId, onChoose }: SiteGroupProps) {
   const sites = nerves.flatMap((nerve) => nerve.sites);
   const handleKey = (event: KeyboardEvent) => {
     if (event.ctrlKey || event.metaKey || event.altKey) return;
@@ -32,7 +31,7 @@ export function SiteGroup({ nerves, siteId, groupRef, onChoose }: SiteGroupProps
     }
   };
   return (
-    <div ref={groupRef} role="radiogroup" aria-label="Site" onKeyDown={handleKey} className="flex flex-wrap gap-x-5 gap-y-2">
+    <div role="radiogroup" aria-label="Site" onKeyDown={handleKey} className="flex flex-wrap gap-x-5 gap-y-2">
       {nerves.map((nerve) => (
         <div key={nerve.id} className="min-w-0">
           <p className="mb-1 text-sm text-second">{nerve.name}</p>

@@ -3,6 +3,7 @@
 import { useCallback, useEffect, useMemo, useRef, useState } from 'react';
 
 import { askBack } from '@/app/_features/log/ask-back';
+import type { FocusWish } from '@/app/_features/log/use-focus-wish';
 import { useLogCase } from '@/app/_features/log/log-context';
 import { channelsOf, draftFor, isTouched, purposeFor, settingsFor, sitesOf, type ChannelDraft, type RunDraft } from '@/app/_features/log/run-draft';
 import { runFromDraft, type FieldSentences } from '@/app/_features/log/run-from-draft';
@@ -12,17 +13,14 @@ import { momentOfMs } from '@/lib/units/moment-of-ms';
 
 /** A second Enter so soon after a run is the same hand, not a second run. */
 const sameHandMs = 800;
-/** Where the focus goes once the form stands as it was asked. */
-export type FocusWish = 'site' | 'reading' | 'error' | { readonly field: string };
-
 /** The next run: what is typed, what it would mean, and logging it exactly once. */
-export function useRunForm() {
+export function useRunForm(wishFocus: (wish: FocusWish) => void) {
   const { state, give } = useLogCase();
   const [draft, setDraft] = useState<RunDraft>(() => draftFor(state, sitesOf(state)[0]?.id ?? '', purposeFor(state)));
+  const [phaseSeen, setPhaseSeen] = useState(state.phase);
   const [sentences, setSentences] = useState<FieldSentences>({});
   const [question, setQuestion] = useState<string | null>(null);
   const [hint, setHint] = useState<string | null>(null);
-  const focusWish = useRef<FocusWish | null>(null);
   const isLocked = useRef(false);
   const loggedAtMs = useRef(-Infinity);
   const channels = useMemo(() => channelsOf(state, draft.settings.siteId), [state, draft.settings.siteId]);
@@ -32,8 +30,11 @@ export function useRunForm() {
     [read, state],
   );
 
-  const phasePurpose = purposeFor(state);
-  useEffect(() => setDraft((now) => ({ ...now, purpose: phasePurpose })), [phasePurpose]);
+  // A new phase brings its own purpose; until then the person's choice stands.
+  if (phaseSeen !== state.phase) {
+    setPhaseSeen(state.phase);
+    setDraft({ ...draft, purpose: purposeFor(state) });
+  }
   useEffect(() => {
     isLocked.current = false;
   }, [draft]);
@@ -52,7 +53,7 @@ export function useRunForm() {
       setHint(`${left.name} has values and is not recorded from that site: log or clear them first`);
       return;
     }
-    focusWish.current = wish;
+    wishFocus(wish);
     change({ ...draft, settings: settingsFor(state, siteId) });
   };
   const typeChannel = (channelId: string, typed: ChannelDraft) => change({ ...draft, channels: { ...draft.channels, [channelId]: typed } });
@@ -66,7 +67,7 @@ export function useRunForm() {
     if (isLocked.current) return;
     if (read.kind === 'wrong') {
       setSentences(read.sentences);
-      focusWish.current = 'error';
+      wishFocus('error');
       return;
     }
     if (read.kind === 'nothing-read') {
@@ -81,7 +82,7 @@ export function useRunForm() {
     isLocked.current = true;
     loggedAtMs.current = performance.now();
     const sent = draft;
-    focusWish.current = 'site';
+    wishFocus('site');
     change({ ...draft, channels: {}, note: '' });
     void give({ name: 'log-run', run: { ...read.run, readings: [...read.run.readings] } }).then((outcome) => {
       if (outcome.kind !== 'refused') return;
@@ -89,5 +90,5 @@ export function useRunForm() {
       setHint(outcome.message);
     });
   };
-  return { draft, channels, sentences, question, hint, judged, focusWish, change, chooseSite, typeChannel, sameSettings, log, setQuestion, setHint };
+  return { draft, channels, sentences, question, hint, judged, change, chooseSite, typeChannel, sameSettings, log, setQuestion, setHint };
 }

@@ -2,10 +2,12 @@
 
 import { useQuery } from '@tanstack/react-query';
 import { signOut } from 'next-auth/react';
+import { useRouter } from 'next/navigation';
 import { useState } from 'react';
 
 import { readSession } from '@/app/_live/api';
 import { forgetDesk, signOutWarning } from '@/app/_live/sign-out';
+import { useDeskSession } from '@/app/_live/use-desk-session';
 import { Button } from '@/app/_ui/button';
 import { Dialog } from '@/app/_ui/dialog';
 import { ThemeToggle } from '@/app/_ui/theme-toggle';
@@ -13,11 +15,14 @@ import { ThemeToggle } from '@/app/_ui/theme-toggle';
 /** Who is signed in, the theme, and the way out. Waiting entries are named before a person leaves them behind. */
 export function AccountAside() {
   const session = useQuery({ queryKey: ['session'], queryFn: () => readSession() });
+  // What waits goes up from every page, and is known before a person leaves.
+  useDeskSession();
+  const router = useRouter();
   const [warning, setWarning] = useState<string | null>(null);
   const leave = async () => {
     await forgetDesk();
     await signOut({ redirect: false });
-    window.location.assign('/sign-in');
+    router.replace('/sign-in');
   };
   const handleSignOut = () => {
     const waiting = signOutWarning();
