@@ -5,7 +5,7 @@ import type { RunBody } from '@/lib/case/run-body';
 /**
  * What of a run does not fit the plan, or is no measurement.
  *
- * Method: an amplitude that rounds to 0 is no measured response. No response is its own value and needs the highest
+ * Method: a current that rounds to 0 is no stimulus, an amplitude that rounds to 0 no measured response. No response is its own value and needs the highest
  * current tried.
  *
  * @param state the case
@@ -21,6 +21,9 @@ export function runProblem(state: CaseState, run: RunBody): Refusal | null {
   if (stranger !== undefined) return unknown('channel', stranger.channelId, channels);
   const electrodes = state.plan.electrodes.map((electrode) => electrode.id);
   if (!electrodes.includes(run.electrodeId)) return unknown('electrode', run.electrodeId, electrodes);
+  if (run.intensityMa === 0 || run.maximalResponseMa === 0) {
+    return { code: 'current-zero', message: 'Current 0 mA: a stimulus, and the one of the largest response, is above 0 mA' };
+  }
   const zero = run.readings.find(({ reading }) => reading.kind === 'measured' && reading.amplitudeUv === 0);
   if (zero === undefined) return null;
   return { code: 'amplitude-zero', message: `Amplitude 0 on ${zero.channelId}: log "no response" with the highest current tried` };

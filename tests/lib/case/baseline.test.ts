@@ -36,8 +36,8 @@ describe('accept-baseline', () => {
 
   it.each([
     ['train-of-four unknown', (): void => undefined, 'Train-of-four unknown'],
-    ['train-of-four 3', (script: CaseBuilder) => void script.give(trainOfFour(3)), 'Train-of-four 3 of 4'],
-    ['cuff up', (script: CaseBuilder) => {
+    ['train-of-four 3', (script: CaseBuilder): void => void script.give(trainOfFour(3)), 'Train-of-four 3 of 4'],
+    ['cuff up', (script: CaseBuilder): void => {
       script.give(trainOfFour(4));
       script.give({ name: 'log-condition', condition: { kind: 'tourniquet', isUp: true, pressureMmHg: 250 }, reportedBy: null });
     }, 'Tourniquet is up'],

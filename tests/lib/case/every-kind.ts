@@ -1,5 +1,5 @@
 import { absent, CaseBuilder } from '@/tests/support/case-builder';
-import { adm, apb, fdiAt, openedCase, testAll, ulnarSites } from '@/tests/support/ulnar-case';
+import { adm, apb, fdiAt, testAll, ulnarSites } from '@/tests/support/ulnar-case';
 import { ulnarAtElbow } from '@/lib/reference/templates/ulnar-at-elbow';
 
 /** A whole case in which every entry kind stands at least once: a left ulnar nerve, lifted, changed, back, changed again, closed. */
