@@ -2,14 +2,14 @@ import { DEMO_PASSWORD, DEMO_PEOPLE } from '@/db/seeds/demo-people';
 import { duration } from './step.mjs';
 
 /** What a person needs next: the address, who can sign in, how a wall is paired, how to stop. */
-export function printWelcome(place: { url: string; isDemo: boolean; afterMs: number; logFile: string }): void {
+export function printWelcome(place: { url: string; isDemo: boolean; hasOwnDatabase: boolean; afterMs: number; logFile: string }): void {
   const lines = [
     `\nFascicle is ready after ${duration(place.afterMs)}: ${place.url}\n`,
     ...(place.isDemo ? demoLines() : []),
     `Theatre screen: open ${place.url}/screen on the wall's computer. It needs no sign-in and shows a code and two words;`,
     '  compare them at the desk, in the case that the screen shall show, and confirm.\n',
     `The server's log: ${place.logFile}`,
-    'Ctrl-C stops the server and its database.\n',
+    `Ctrl-C stops the server${place.hasOwnDatabase ? ' and its database' : '; the database goes on'}.\n`,
   ];
   process.stdout.write(`${lines.join('\n')}\n`);
 }

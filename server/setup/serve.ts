@@ -33,7 +33,7 @@ export async function serve({ root, stateFolder, stop, settings, secret, source,
     },
     onFirstListening: () => {
       updateRunning(stateFolder, { url: settings.publicUrl });
-      printWelcome({ url: settings.publicUrl, isDemo: settings.demo, afterMs: performance.now(), logFile });
+      printWelcome({ url: settings.publicUrl, isDemo: settings.demo, hasOwnDatabase: source.cluster !== null, afterMs: performance.now(), logFile });
     },
     say: (sentence) => process.stderr.write(`${new Date().toISOString()} ${sentence}\n`),
   });

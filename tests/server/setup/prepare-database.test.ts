@@ -1,5 +1,5 @@
 import { Client } from 'pg';
-import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
+import { afterAll, beforeAll, beforeEach, describe, expect, it, vi } from 'vitest';
 import { prepareDatabase } from '@/server/setup/database/prepare-database';
 import { databaseAddress, testSecret as secret } from '@/tests/support/template-database';
 import { startThrowawayCluster, type ThrowawayCluster } from '@/tests/support/throwaway-cluster';
@@ -17,6 +17,12 @@ async function ask(url: string, statement: string): Promise<unknown> {
   } finally {
     await client.end();
   }
+}
+
+async function setForServer(name: string, value: string): Promise<void> {
+  await ask(cluster.adminUrl, `alter system set ${name} = ${value}`);
+  await ask(cluster.adminUrl, 'select pg_reload_conf()');
+  await vi.waitUntil(async () => (await ask(cluster.adminUrl, `show ${name}`)) === value, { timeout: 5_000 });
 }
 
 describe('prepareDatabase', () => {
@@ -53,6 +59,20 @@ describe('prepareDatabase', () => {
     await prepareDatabase({ adminUrl, secret });
     await ask(adminUrl, `alter database prepared_${count} set synchronous_commit = off`);
     await expect(prepareDatabase({ adminUrl, secret })).rejects.toThrow('The database server lacks synchronous_commit = on');
+  });
+
+  it.each([
+    ['fsync', 'refuses', /^The database server lacks fsync = on/],
+    ['full_page_writes', 'notes', null],
+  ] as const)('%s = off: %s', async (name, _answer, refusal) => {
+    await setForServer(name, 'off');
+    try {
+      const prepared = prepareDatabase({ adminUrl, secret });
+      if (refusal !== null) await expect(prepared).rejects.toThrow(refusal);
+      else expect((await prepared).noted).toEqual(['full_page_writes = on (a torn page after a power cut is not repaired)']);
+    } finally {
+      await setForServer(name, 'on');
+    }
   });
 
   it('sees a role that is told not to wait for the disk', async () => {
