@@ -3,7 +3,7 @@ import type { CasePlan } from '@/lib/case/plan';
 import { pathIdOf } from '@/lib/case/keys';
 import { spacingProblem } from '@/lib/case/spacing-problem';
 import type { RuleSet } from '@/lib/alert/rule-set';
-import { consoleKeys, isConsoleKey } from '@/lib/reference/templates/console-keys';
+import { consoleKeys, isConsoleKey } from '@/lib/case/console-keys';
 
 /**
  * What does not fit together in a plan, as a sentence.

@@ -1,5 +1,5 @@
 import { entriesAfter } from '@/db/repositories/entries/entries-after';
-import { wallEntry } from '@/lib/contracts/channel/wall';
+import { wallEntry } from '@/lib/contracts/channel/wall-entry';
 import type { WireEntry } from '@/lib/contracts/http/replies';
 import type { ChainHead } from '@/lib/record/entry';
 import { toWireEntry } from '@/server/cases/to-wire-entry';

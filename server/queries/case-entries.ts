@@ -1,7 +1,7 @@
 import { entriesAfter } from '@/db/repositories/entries/entries-after';
 import { headOf } from '@/db/repositories/entries/head-of';
 import type { EntriesReply, WireEntry } from '@/lib/contracts/http/replies';
-import { wallEntry } from '@/lib/contracts/channel/wall';
+import { wallEntry } from '@/lib/contracts/channel/wall-entry';
 import { EMPTY_HEAD } from '@/lib/record/entry';
 import { toWireEntry } from '@/server/cases/to-wire-entry';
 import { openCase, type Visitor } from '@/server/queries/open-case';

@@ -1,14 +1,14 @@
 import Link from 'next/link';
 
 import { Cell } from '@/app/_ui/table';
-import type { CaseListItem } from '@/lib/contracts/http/replies';
+import type { CaseLine } from '@/lib/contracts/http/replies';
 import { clockTime, durationWords } from '@/lib/text/format';
 
 const stateNames = { planned: 'Planned', open: 'Open', closed: 'Closed' } as const;
 const link = 'inline-flex min-h-9 items-center font-semibold text-stain underline underline-offset-4';
 
 interface CaseRowProps {
-  readonly row: CaseListItem;
+  readonly row: CaseLine;
   readonly nowMs: number;
   readonly isHospitalShown: boolean;
 }
@@ -39,7 +39,7 @@ export function CaseRow({ row, nowMs, isHospitalShown }: CaseRowProps) {
   );
 }
 
-function lastEntryTime(row: CaseListItem, ageMs: number): string {
+function lastEntryTime(row: CaseLine, ageMs: number): string {
   const time = clockTime(row.lastEntryAt, row.timeZone);
   if (ageMs < 12 * 3_600_000) return time;
   const day = new Intl.DateTimeFormat('en-GB', { timeZone: row.timeZone, day: 'numeric', month: 'short' }).format(new Date(row.lastEntryAt));

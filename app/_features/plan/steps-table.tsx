@@ -8,7 +8,7 @@ import type { PlanForm } from '@/app/_features/plan/plan-form';
 import { Section } from '@/app/_features/plan/section';
 import { Button } from '@/app/_ui/button';
 import { Cell, HeadCell, Table } from '@/app/_ui/table';
-import { consoleKeys, isConsoleKey } from '@/lib/reference/templates/console-keys';
+import { consoleKeys, isConsoleKey } from '@/lib/case/console-keys';
 
 const mostSteps = 20;
 

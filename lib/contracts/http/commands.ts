@@ -2,7 +2,7 @@ import { z } from 'zod';
 
 import type { CaseCommand } from '@/lib/case/commands';
 import { planSchema } from '@/lib/contracts/http/plan-schema';
-import { quantity } from '@/lib/contracts/quantity-schemas';
+import { quantity } from '@/lib/contracts/quantity';
 import { alertSlug, boundedText, moment, slug, uuid } from '@/lib/contracts/text-schemas';
 
 const text = (max: number) => boundedText(max).nullable();

@@ -1,7 +1,7 @@
 import { z } from 'zod';
 
 import type { CasePlan } from '@/lib/case/plan';
-import { quantity } from '@/lib/contracts/quantity-schemas';
+import { quantity } from '@/lib/contracts/quantity';
 import { boundedText, pathSlug, slug } from '@/lib/contracts/text-schemas';
 
 const hotkey = z.string().regex(/^[a-z0-9]$/, 'Not a key: one lower-case letter or digit').nullable();

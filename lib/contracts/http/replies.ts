@@ -34,7 +34,7 @@ export const entriesReplySchema = z.strictObject({
 });
 
 /** One line of the list of cases. */
-export const caseListItemSchema = z.strictObject({
+export const caseLineSchema = z.strictObject({
   caseId: z.string(),
   reference: z.string(),
   title: z.string(),
@@ -50,7 +50,7 @@ export const caseListItemSchema = z.strictObject({
 });
 
 /** The cases a person may see. */
-export const caseListReplySchema = z.strictObject({ cases: z.array(caseListItemSchema) });
+export const caseListReplySchema = z.strictObject({ cases: z.array(caseLineSchema) });
 
 /** The head of one case for its page: what is not in the log, for people who may read it. */
 export const caseHeadReplySchema = z.strictObject({
@@ -102,7 +102,7 @@ export const failureReplySchema = z.strictObject({
 export type WireEntry = z.infer<typeof wireEntrySchema>;
 export type CommandReply = z.infer<typeof commandReplySchema>;
 export type EntriesReply = z.infer<typeof entriesReplySchema>;
-export type CaseListItem = z.infer<typeof caseListItemSchema>;
+export type CaseLine = z.infer<typeof caseLineSchema>;
 export type CaseListReply = z.infer<typeof caseListReplySchema>;
 export type CaseHeadReply = z.infer<typeof caseHeadReplySchema>;
 export type SessionReply = z.infer<typeof sessionReplySchema>;

@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 
 import { applyEntry } from '@/lib/case/apply-entry';
 import { initialState } from '@/lib/case/initial-state';
-import { wallEntry } from '@/lib/contracts/channel/wall';
+import { wallEntry } from '@/lib/contracts/channel/wall-entry';
 import { theatreView } from '@/lib/text/theatre-view';
 import { everyKindCase } from '@/tests/lib/case/every-kind';
 

@@ -3,7 +3,7 @@
 import { useLogCase } from '@/app/_features/log/log-context';
 import { Dialog } from '@/app/_ui/dialog';
 import { Kbd } from '@/app/_ui/kbd';
-import { consoleKeys } from '@/lib/reference/templates/console-keys';
+import { consoleKeys } from '@/lib/case/console-keys';
 
 /** Every key with what it does. */
 export function KeysDialog({ onClose }: { readonly onClose: () => void }) {

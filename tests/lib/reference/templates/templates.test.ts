@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 
 import { planSchema } from '@/lib/contracts/http/plan-schema';
-import { consoleKeys, isConsoleKey } from '@/lib/reference/templates/console-keys';
+import { consoleKeys, isConsoleKey } from '@/lib/case/console-keys';
 import { templates } from '@/lib/reference/templates/templates';
 
 const hotkeysOf = (plan: (typeof templates)[number]) =>
