@@ -8,7 +8,7 @@ import { serveRequests } from '@/server/http/serve-requests';
 import { deriveSecret } from '@/server/auth/derive-secret';
 import { serverSettings, type ServerSettings } from '@/server/settings/server-settings';
 import { exitStatuses } from '@/server/setup/exit-statuses.mjs';
-import { createLogger } from '@/server/telemetry/logger';
+import { createLogger } from '@/server/telemetry/create-logger';
 
 const isDevelopment = process.env.NODE_ENV !== 'production';
 

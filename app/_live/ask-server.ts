@@ -1,10 +1,6 @@
 import { ApiFailure } from '@/app/_live/api-failure';
+import type { Contract } from '@/lib/contracts/contract';
 import { failureReplySchema } from '@/lib/contracts/http/replies';
-
-/** A contract as far as reading needs it. */
-export interface Contract<Answer> {
-  safeParse(value: unknown): { readonly success: true; readonly data: Answer } | { readonly success: false };
-}
 
 /** How to ask. */
 export interface Question {

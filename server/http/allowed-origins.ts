@@ -1,4 +1,4 @@
-import { isLoopback } from '@/server/settings/loopback';
+import { isLoopback } from '@/server/settings/is-loopback';
 
 /** The origins and hosts that this server answers to. */
 export interface AllowedOrigins {

@@ -1,6 +1,6 @@
 import type { IncomingMessage } from 'node:http';
 
-import { isLoopback } from '@/server/settings/loopback';
+import { isLoopback } from '@/server/settings/is-loopback';
 
 /**
  * The address a request came from, for throttling. Behind the https proxy on this machine it is the last address that

@@ -5,7 +5,7 @@ import { nextCode } from '@/server/auth/second-factor';
 import { failure } from '@/server/failure';
 import type { DemoPeopleReply } from '@/server/replies';
 import type { ServerContext } from '@/server/server-context';
-import { isLoopback } from '@/server/settings/loopback';
+import { isLoopback } from '@/server/settings/is-loopback';
 
 /** Demo people with their present codes: in demo mode only, asked from this machine only, over its own address only. */
 export async function demoPeople(context: ServerContext, address: string): Promise<DemoPeopleReply> {

@@ -1,4 +1,4 @@
-import { isLoopback } from './loopback';
+import { isLoopback } from './is-loopback';
 import { parseEnvironment, type Environment } from './parse-environment';
 import { SettingsFailure } from './settings-failure';
 import { settingsSchema } from './settings-schema';

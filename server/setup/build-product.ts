@@ -1,6 +1,6 @@
 import path from 'node:path';
 import { buildFolders } from './build-folders';
-import { buildWhenChanged } from './build';
+import { buildWhenChanged } from './build-when-changed';
 import { reportFailure } from './setup-failure.mjs';
 import { step } from './step.mjs';
 

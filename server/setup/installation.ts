@@ -2,7 +2,7 @@ import path from 'node:path';
 import type { Settings } from '@/server/settings/settings';
 import { readClusterFiles } from './database/cluster-files';
 import { roleAddresses, type DatabaseAddresses } from './database/prepare-database';
-import { ensureSecret } from './secret';
+import { ensureSecret } from './ensure-secret';
 import { SetupFailure } from './setup-failure.mjs';
 import { chooseStateFolder } from './state-folder.mjs';
 

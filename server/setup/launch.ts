@@ -1,12 +1,12 @@
 import { parseSettings, type Settings } from '@/server/settings/settings';
-import { buildWhenChanged } from './build';
+import { buildWhenChanged } from './build-when-changed';
 import { buildFolders } from './build-folders';
 import { openClusterSource, type ClusterSource } from './database/cluster-source';
 import { migrateDatabase } from './database/migrate-database';
 import { prepareDatabase } from './database/prepare-database';
 import { whyPortIsTaken } from './free-port';
 import { seedWhenEmpty } from './seed-when-empty';
-import { ensureSecret } from './secret';
+import { ensureSecret } from './ensure-secret';
 import { serve } from './serve';
 import { serveDevelopment } from './serve-development';
 import { SetupFailure } from './setup-failure.mjs';

@@ -1,7 +1,7 @@
 // Plain JavaScript: at the first start there are no packages yet.
 import { fileURLToPath } from 'node:url';
-import { assertNodeVersion } from './node-version.mjs';
-import { installPackages } from './packages.mjs';
+import { assertNodeVersion } from './assert-node-version.mjs';
+import { installPackages } from './install-packages.mjs';
 import { readEnvironmentFile } from './read-environment-file.mjs';
 import { claimRunning, removeRunning, updateRunning } from './running-record.mjs';
 import { endRunningPrograms, watchPrograms } from './run-program.mjs';

@@ -1,8 +1,8 @@
 // Plain JavaScript: at the first run there are no packages yet. Installs them, then runs the TypeScript file that is named.
 import path from 'node:path';
 import { fileURLToPath, pathToFileURL } from 'node:url';
-import { assertNodeVersion } from './node-version.mjs';
-import { installPackages } from './packages.mjs';
+import { assertNodeVersion } from './assert-node-version.mjs';
+import { installPackages } from './install-packages.mjs';
 import { endRunningPrograms } from './run-program.mjs';
 import { reportFailure } from './setup-failure.mjs';
 import { step } from './step.mjs';

@@ -2,7 +2,7 @@ import { mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 import { setTimeout as pause } from 'node:timers/promises';
 import { buildFolders, type BuildFolders } from '@/server/setup/build-folders';
-import { buildWhenChanged } from '@/server/setup/build';
+import { buildWhenChanged } from '@/server/setup/build-when-changed';
 
 export const root = path.resolve(import.meta.dirname, '../..');
 const buildFolder = 'tests/.out/build';

@@ -10,7 +10,7 @@ import { alertSlug, moment, uuid } from '@/lib/contracts/text-schemas';
  * applies an entry only if its number is last + 1 and its previousHash is the hash it holds; otherwise it follows again.
  * Following and following again are one call. `pulse` comes once a second and only after a query of the database was
  * answered; `checkedAt` is the database's own time of that answer. Without a pulse for 3 s a screen is not live.
- * A wall receives every number, hash and previousHash, and bodies only of the kinds in `channel/wall`.
+ * A wall receives every number, hash and previousHash, and bodies only of the kinds in `channel/wall-entry`.
  */
 
 /** Viewer to server: give me what comes after this number. */

@@ -7,7 +7,7 @@ import { SetupFailure } from '../setup-failure.mjs';
 import { endProgram, findStartedProgram, isStillRunning, type StartedProgram } from '../started-program.mjs';
 import { ensureClusterFiles, writeClusterRecord, type ClusterFiles } from './cluster-files';
 import { answersQueries } from './answers-queries';
-import { findLeftPostmaster } from './left-postmaster';
+import { findLeftPostmaster } from './find-left-postmaster';
 import type { PostgresAccount } from './postgres-account';
 import { postgresEnvironment } from './postgres-environment';
 

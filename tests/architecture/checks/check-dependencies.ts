@@ -16,6 +16,8 @@ const usedByItself: Readonly<Record<string, RegExp>> = {
   'react-dom': /from 'next[/']/,
   vite: /from 'vitest[/']/,
   jsdom: /environment:? '?jsdom/,
+  // Its peer: it brings the queries.
+  '@testing-library/dom': /from '@testing-library\/react'/,
 };
 
 /** Packages that nothing imports, starts or reads. */

@@ -67,6 +67,13 @@ describe('decide, a slowed segment', () => {
     expect(script.wait(1000).run('below-elbow', { adm: adm('below-elbow') })).toEqual(['notice.raised']);
   });
 
+  it('decide takes no pair whose older run was made at the very time of the risk step', () => {
+    const script = monitoredUlnar().at('10:41');
+    script.step('nerve-lifted');
+    script.run('below-elbow', { adm: adm('below-elbow') });
+    expect(script.wait(1000).run('above-elbow', { adm: slow })).toEqual([]);
+  });
+
   it('decide lets a distal run that only completes the pair confirm nothing', () => {
     const script = monitoredUlnar().at('10:41');
     script.step('nerve-lifted');

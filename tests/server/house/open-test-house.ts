@@ -11,7 +11,7 @@ import { allowedOrigins } from '@/server/http/allowed-origins';
 import { serveRequests } from '@/server/http/serve-requests';
 import { chooseFreePort } from '@/server/setup/free-port';
 import { startHouse } from '@/server/start-house';
-import { createLogger } from '@/server/telemetry/logger';
+import { createLogger } from '@/server/telemetry/create-logger';
 import { createTestDatabase, type TestDatabase } from '@/tests/support/database';
 
 import { serveRoutes } from './serve-routes';

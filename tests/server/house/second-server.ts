@@ -7,7 +7,7 @@ import { commandDigest } from '@/lib/record/command-digest';
 import { appendCommand } from '@/server/commands/append-command';
 import { makeServerContext, type ContextParts } from '@/server/make-server-context';
 import type { ServerContext } from '@/server/server-context';
-import { createLogger } from '@/server/telemetry/logger';
+import { createLogger } from '@/server/telemetry/create-logger';
 
 import type { TestHouse } from './open-test-house';
 

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { createLogger } from '@/server/telemetry/logger';
+import { createLogger } from '@/server/telemetry/create-logger';
 
 function logged(fields: object): string {
   const lines: string[] = [];
