@@ -1,4 +1,5 @@
-import { askServer, type Contract, type Question } from '@/app/_live/ask-server';
+import { askServer, type Question } from '@/app/_live/ask-server';
+import type { Contract } from '@/lib/contracts/contract';
 import type { CommandRequest, PlanCaseRequest } from '@/lib/contracts/http/commands';
 import {
   caseHeadReplySchema,
