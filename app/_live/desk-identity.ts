@@ -26,6 +26,8 @@ export class DeskIdentity {
   private displayName = '';
   private started: Promise<KeptSession | null> | null = null;
   private round = 0;
+  /** Counts sign-outs: an answer that was asked for before one is nobody's. */
+  private generation = 0;
   private offsetKeptAt = -Infinity;
 
   constructor(private readonly parts: IdentityParts) {}
@@ -62,6 +64,7 @@ export class DeskIdentity {
   /** Signed out: nobody works here. */
   async forget(): Promise<void> {
     this.unconfirm();
+    this.generation += 1;
     this.started = null;
     this.personId = null;
     this.parts.publish({ status: 'signed-out' });
@@ -77,8 +80,10 @@ export class DeskIdentity {
   }
 
   private async begin(): Promise<KeptSession | null> {
+    const { generation } = this;
     const kept = await this.parts.storage.readSession().catch(() => null);
     const answer = await this.parts.ask();
+    if (generation !== this.generation) return null;
     if (answer.kind !== 'no-answer') await this.take(answer, kept);
     else if (kept !== null) {
       this.personId = kept.personId;
@@ -96,13 +101,16 @@ export class DeskIdentity {
       return;
     }
     const { personId, displayName } = answer;
+    const { generation } = this;
     const before = this.personId ?? kept?.personId ?? null;
     if (before !== null && before !== personId) await this.parts.storage.forgetReadings().catch(() => undefined);
+    if (generation !== this.generation) return;
     const isNew = this.personId !== personId;
     this.personId = personId;
     this.displayName = displayName;
     const offsetMs = kept?.personId === personId ? kept.offsetMs : null;
     if (isNew) await this.parts.storage.writeSession({ personId, displayName, offsetMs }).catch(() => undefined);
+    if (generation !== this.generation) return;
     this.parts.publish({ status: 'signed-in', personId, displayName });
     if (isNew) await this.parts.personChanged(personId);
   }

@@ -13,7 +13,7 @@ import { Dialog } from '@/app/_ui/dialog';
 import { ThemeToggle } from '@/app/_ui/theme-toggle';
 
 /** Who is signed in, the theme, and the way out. Waiting entries are named before a person leaves them behind. */
-export function AccountAside() {
+export function AccountAside({ hasTheme = true }: { readonly hasTheme?: boolean }) {
   const session = useQuery({ queryKey: ['session'], queryFn: () => readSession() });
   // What waits goes up from every page, and is known before a person leaves.
   useDeskSession();
@@ -32,7 +32,7 @@ export function AccountAside() {
   return (
     <>
       <span className="text-second">{session.data?.displayName ?? ''}</span>
-      <ThemeToggle />
+      {hasTheme ? <ThemeToggle /> : null}
       <Button onClick={handleSignOut}>Sign out</Button>
       <Dialog isOpen={warning !== null} onOpenChange={(isOpen) => (isOpen ? undefined : setWarning(null))} title="Entries are waiting" description={warning ?? ''}>
         <div className="flex flex-wrap gap-3">

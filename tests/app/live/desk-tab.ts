@@ -18,6 +18,8 @@ export interface Browser {
   readonly lock: ExclusiveLock;
   readonly ears: Set<(message: TabMessage) => void>;
   session: SessionAnswer;
+  /** Stands in for the question who is signed in. */
+  ask?: () => Promise<SessionAnswer>;
   clockMs: () => number;
 }
 
@@ -71,7 +73,7 @@ export async function openTab(browser: Browser, server: FakeServer): Promise<Tab
     storage,
     lock: (name, work) => (isKilled ? new Promise<never>(() => undefined) : browser.lock(name, work)),
     tabs,
-    askSession: async () => (server.isUp ? browser.session : { kind: 'no-answer' }),
+    askSession: () => browser.ask?.() ?? Promise.resolve(server.isUp ? browser.session : { kind: 'no-answer' as const }),
     nowMs: () => browser.clockMs(),
     store,
   });

@@ -1,5 +1,8 @@
 import { afterEach, describe, expect, it } from 'vitest';
 
+import type { SessionAnswer } from '@/app/_live/desk-identity';
+import { openLiveDatabase } from '@/app/_live/live-database';
+import { openLiveStorage } from '@/app/_live/live-storage';
 import { provisionalState } from '@/app/_live/provisional-state';
 import type { PersonCommand } from '@/lib/contracts/http/commands';
 import { freshBrowser, openTab, until, type Browser, type Tab } from '@/tests/app/live/desk-tab';
@@ -213,6 +216,40 @@ describe('LiveClient between two people', () => {
     await after.client.startDesk();
     expect(after.store().session.status).toBe('unknown');
     expect(after.feed(caseId).state).toBeNull();
+  });
+
+  it('sends nothing on a new connection before the server said whose it is', async () => {
+    const browser = freshBrowser();
+    const server = new FakeServer(caseId, entries);
+    const tab = await desk(browser, server);
+    server.stop();
+    await tab.client.send(caseId, say('Mine'));
+    const asked: ((session: SessionAnswer) => void)[] = [];
+    browser.ask = () => new Promise((resolve) => void asked.push(resolve));
+    server.start();
+    await until(() => asked.length === 1);
+    await tab.client.send(caseId, say('Also mine'));
+    expect(server.arrived).toEqual([]);
+    asked[0]?.(browser.session);
+    await until(() => tab.store().waiting.length === 0);
+    expect(texts(server)).toEqual(['Mine', 'Also mine']);
+  });
+
+  it('does not remember a person whose sign-out overtook the answer to who is signed in', async () => {
+    const browser = freshBrowser();
+    const server = new FakeServer(caseId, entries);
+    const asked: ((session: SessionAnswer) => void)[] = [];
+    browser.ask = () => new Promise((resolve) => void asked.push(resolve));
+    const tab = await openTab(browser, server);
+    tabs.push(tab);
+    const started = tab.client.startDesk();
+    await until(() => asked.length === 1);
+    await tab.client.signOut();
+    asked[0]?.(browser.session);
+    await started;
+    expect(tab.store().session.status).toBe('signed-out');
+    expect(tab.client.queue.person).toBeNull();
+    expect(await (await openLiveStorage(() => openLiveDatabase(browser.databaseName))).readSession()).toBeNull();
   });
 
   it('takes the case of the one before off the screen when another person turns out to be signed in', async () => {
