@@ -10,7 +10,8 @@ import type {
   ScreenReply,
   SessionReply,
 } from '@/lib/contracts/http/replies';
-import type { DemoPeopleReply, HealthReply, ReauthenticateReply, ScreenListReply, SignInRequest, SignInReply } from '@/server/replies';
+import type { DemoPeopleReply, HealthReply, ReauthenticateReply, ScreensReply } from '@/lib/contracts/http/account';
+import type { SignInReply, SignInRequest } from '@/server/auth/sign-in-words';
 
 /** Where a request came from. `address` is the socket's, set by the server itself. */
 export interface RequestSource {
@@ -23,7 +24,7 @@ export interface CommandDoors {
   'plan-case': { input: PlanCaseRequest; answer: CommandReply };
   'give-command': { input: { caseId: string; request: CommandRequest }; answer: CommandReply };
   'pair-screen': { input: { caseId: string; request: PairScreenRequest }; answer: PairScreenReply };
-  'revoke-screen': { input: { caseId: string; screenId: string }; answer: ScreenListReply };
+  'revoke-screen': { input: { caseId: string; screenId: string }; answer: ScreensReply };
   'ask-for-screen': { input: Record<string, never>; answer: ScreenReply };
   'sign-in': { input: SignInRequest; answer: SignInReply };
   'sign-out': { input: { sessionId: string }; answer: Record<string, never> };
@@ -36,7 +37,7 @@ export interface QueryDoors {
   cases: { input: Record<string, never>; answer: CaseListReply };
   'case-head': { input: { caseId: string }; answer: CaseHeadReply };
   'case-entries': { input: { caseId: string; after: number; limit: number }; answer: EntriesReply };
-  screens: { input: { caseId: string }; answer: ScreenListReply };
+  screens: { input: { caseId: string }; answer: ScreensReply };
   screen: { input: Record<string, never>; answer: ScreenReply };
   'demo-people': { input: Record<string, never>; answer: DemoPeopleReply };
   health: { input: Record<string, never>; answer: HealthReply };

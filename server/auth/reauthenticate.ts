@@ -3,7 +3,7 @@ import { noteReauthenticated } from '@/db/repositories/sessions/note-reauthentic
 import { checkCredentials } from '@/server/auth/check-credentials';
 import type { SignedIn } from '@/server/auth/read-session';
 import { notSignedIn } from '@/server/failure';
-import type { ReauthenticateReply } from '@/server/replies';
+import type { ReauthenticateReply } from '@/lib/contracts/http/account';
 import type { ServerContext } from '@/server/server-context';
 
 /** Password and code again, for acts that need them fresh. Marks the session. */

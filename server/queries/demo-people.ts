@@ -3,7 +3,7 @@ import { liveMemberships } from '@/db/repositories/people/live-memberships';
 import { DEMO_PASSWORD } from '@/db/seeds/demo-people';
 import { nextCode } from '@/server/auth/second-factor';
 import { failure } from '@/server/failure';
-import type { DemoPeopleReply } from '@/server/replies';
+import type { DemoPeopleReply } from '@/lib/contracts/http/account';
 import type { ServerContext } from '@/server/server-context';
 import { isLoopback } from '@/server/settings/is-loopback';
 

@@ -1,5 +1,5 @@
 import { headsOf } from '@/db/repositories/entries/heads-of';
-import type { HealthReply } from '@/server/replies';
+import type { HealthReply } from '@/lib/contracts/http/account';
 import type { ServerContext } from '@/server/server-context';
 import type { EventLoopWatch } from '@/server/telemetry/event-loop';
 

@@ -3,11 +3,11 @@ import { withinHospitals } from '@/db/within-hospitals';
 import type { SignedIn } from '@/server/auth/read-session';
 import type { Presence } from '@/server/cases/presence';
 import { openCase } from '@/server/queries/open-case';
-import type { ScreenListReply } from '@/server/replies';
+import type { ScreensReply } from '@/lib/contracts/http/account';
 import type { ServerContext } from '@/server/server-context';
 
 /** Walls bound to a case, with who of them is connected to this process. */
-export async function screensOfCase(context: ServerContext, presence: Presence, { actor }: SignedIn, caseId: string): Promise<ScreenListReply> {
+export async function screensOfCase(context: ServerContext, presence: Presence, { actor }: SignedIn, caseId: string): Promise<ScreensReply> {
   const { row } = await openCase(context, actor, { caseId, action: 'see-screens', what: 'screens' });
   const bound = await withinHospitals(context.database.app, [row.hospitalId], (transaction) => boundScreens(transaction, caseId));
   const connected = presence.wallsOf(caseId);

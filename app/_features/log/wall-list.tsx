@@ -1,7 +1,7 @@
 'use client';
 
 import { useLogCase } from '@/app/_features/log/log-context';
-import type { ScreenLine } from '@/app/_features/log/read-screens';
+import type { ScreenLine } from '@/lib/contracts/http/account';
 import { Button } from '@/app/_ui/button';
 import { StatusDot } from '@/app/_ui/status-dot';
 import { clockTime } from '@/lib/text/format';

@@ -1,6 +1,6 @@
 'use client';
 
-import type { DemoPerson } from '@/app/_features/sign-in/read-demo-people';
+import type { DemoPerson } from '@/lib/contracts/http/account';
 import { Button } from '@/app/_ui/button';
 
 interface DemoPeopleProps {

@@ -4,7 +4,8 @@ import { useQuery } from '@tanstack/react-query';
 import { useEffect, useRef, useState } from 'react';
 
 import { DemoPeople } from '@/app/_features/sign-in/demo-people';
-import { readDemoPeople, type DemoPerson } from '@/app/_features/sign-in/read-demo-people';
+import { readDemoPeople } from '@/app/_features/sign-in/read-demo-people';
+import type { DemoPerson } from '@/lib/contracts/http/account';
 import { SignInForm, type Credentials } from '@/app/_features/sign-in/sign-in-form';
 import { Mark } from '@/app/_ui/mark';
 import { ThemeToggle } from '@/app/_ui/theme-toggle';
