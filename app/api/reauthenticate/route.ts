@@ -1,4 +1,4 @@
-import { reauthenticateRequestSchema } from '@/lib/contracts/http/account-replies';
+import { reauthenticateRequestSchema } from '@/lib/contracts/http/account';
 import { answerRoute } from '@/server/http/answer-route';
 import { readJson } from '@/server/http/read-json';
 
