@@ -37,7 +37,7 @@ export function TheatrePicture({ place, procedure, clock, isLive, deskWords, vie
       </div>
       <OtherLines lines={deskWords === null ? view.others : [...view.others, deskLine(deskWords)]} />
       <NerveLines views={nerves} widthPx={type.roomPx} textPx={type.neededPx} hasAges={type.hasAges} emphasis={type.emphasis} />
-      {view.footer.length === 0 ? null : (
+      {view.footer.length === 0 || type.factCount === 0 ? null : (
         <footer className="border-t border-rule px-(--edge-room) py-[0.55em] text-(length:--needed) leading-[1.2] text-second">
           <ul className="flex flex-wrap gap-x-[1.4em] gap-y-[0.2em]">
             {view.footer.slice(0, type.factCount).map((fact) => (
