@@ -20,6 +20,9 @@ describe('decide, late entries', () => {
     const script = monitoredUlnar().at('10:41');
     script.run('above-elbow', { adm: adm('above-elbow') });
     expect(script.run('above-elbow', { adm: absent(18) }, {}, { eventAt: clock('10:22:30') })).toEqual(['notice.raised', 'notice.settled']);
+    // The good runs that are known came after it: no last good is claimed.
+    const raised = script.entries.find((entry) => entry.kind === 'notice.raised');
+    expect(raised?.body).toMatchObject({ firstBadAt: clock('10:22:30'), lastGoodAt: null });
   });
 
   it('decide says from when a hidden change is and when it was received, also once it is confirmed', () => {
