@@ -31,17 +31,16 @@ function AlertBlock({ incident, hasKeys }: { readonly incident: Incident; readon
   const key = (letter: string) => (hasKeys ? letter : null);
   const open = (kind: 'told' | 'read-back' | 'action' | 'end') => () => openDialog({ kind, alertId: incident.alertId });
   return (
-    <Band priority={line.priority ?? 'none'} aria-label={line.headline} className="border-b border-rule px-5 py-3.5">
+    <Band priority={line.priority ?? 'none'} aria-label={line.headline} className="border-b border-rule px-5 py-3">
       <h2 className="flex items-center gap-2.5 text-xl font-bold">
         {line.priority === null ? null : <PriorityMark kind={line.priority} className="size-5 shrink-0" />}
         {line.headline}
       </h2>
-      <p className="mt-1 text-sm font-semibold">{`${incident.level === 'alert' ? 'Alert' : 'Notice'} since ${clockTime(incident.raisedAt, timeZone)}, ${durationWords(nowMs - msOfMoment(incident.raisedAt))}`}</p>
+      <p className="mt-0.5 text-sm font-semibold">{`${incident.level === 'alert' ? 'Alert' : 'Notice'} for ${durationWords(nowMs - msOfMoment(incident.raisedAt))}. ${handlingWords(incident, timeZone)}`}</p>
       <p className="mt-1">{line.detail}</p>
       <SayLine words={sayThis(state, incident)} />
-      <p className="mb-2.5 text-sm font-semibold">{handlingWords(incident, timeZone)}</p>
       {head.mayWrite ? (
-        <div className="flex flex-wrap gap-2">
+        <div className="flex flex-wrap gap-1.5">
           <Button variant={incident.toldAt === null ? 'primary' : 'quiet'} hotkey={key('T')} onClick={open('told')}>{actionNames.told}</Button>
           <Button hotkey={key('B')} onClick={open('read-back')} disabled={incident.toldAt === null}>{actionNames.readBack}</Button>
           <Button hotkey={key('A')} onClick={open('action')}>{actionNames.acted}</Button>

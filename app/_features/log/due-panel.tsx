@@ -20,7 +20,7 @@ export function DuePanel() {
         {shown.map((task) => (
           <li key={task.key} className="flex items-baseline justify-between gap-4 py-0.5">
             <span className={task.isNow ? 'font-bold' : ''}>{task.label}</span>
-            <span className={task.isNow ? 'text-right font-bold' : 'text-right text-second'}>{task.when}</span>
+            <span className={task.isNow ? 'text-right font-bold whitespace-nowrap' : 'text-right text-second'}>{task.when}</span>
           </li>
         ))}
       </ul>

@@ -22,8 +22,8 @@ function repeats(state: CaseState, nowMs: number): DueTask[] {
     if (incident.level !== 'notice' || incident.repeatDueAt === null) return [];
     const first = incident.pathIds[0] ?? '';
     const leftMs = msOfMoment(incident.repeatDueAt) - nowMs;
-    const label = `Repeat at ${siteName(state.plan, first.slice(0, first.indexOf('/')))}, same current`;
-    return [{ key: `repeat-${incident.alertId}`, label, when: leftMs > 0 ? `in ${durationWords(leftMs)}` : 'now', isNow: true }];
+    const label = `Repeat at ${siteName(state.plan, first.slice(0, first.indexOf('/')))}`;
+    return [{ key: `repeat-${incident.alertId}`, label, when: leftMs > 0 ? `in ${Math.ceil(leftMs / 1000)}\u00a0s` : 'now', isNow: true }];
   });
 }
 

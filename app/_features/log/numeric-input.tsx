@@ -12,6 +12,8 @@ interface NumericInputProps {
   readonly unit?: string;
   readonly placeholder?: string;
   readonly error?: string | undefined;
+  /** Where the sentence stands when the field has no room for it below itself. */
+  readonly errorId?: string;
   readonly onType: (typed: string) => void;
   readonly onFocus?: () => void;
   readonly className?: string;
@@ -21,7 +23,7 @@ interface NumericInputProps {
  * A field for one number: digits, point and minus only; a comma becomes a point. From the first digit until it is left
  * it counts as half typed, so that no letter key acts by mistake.
  */
-export function NumericInput({ label, isLabelShown = false, name, value, unit, placeholder, error, onType, onFocus, className }: NumericInputProps) {
+export function NumericInput({ label, isLabelShown = false, name, value, unit, placeholder, error, errorId, onType, onFocus, className }: NumericInputProps) {
   const id = useId();
   const input = useRef<HTMLInputElement>(null);
   const mark = (isHalfTyped: boolean) => {
@@ -56,7 +58,7 @@ export function NumericInput({ label, isLabelShown = false, name, value, unit, p
           value={value}
           placeholder={placeholder}
           aria-invalid={error ? true : undefined}
-          aria-describedby={error ? `${id}-error` : undefined}
+          aria-describedby={error ? (errorId ?? `${id}-error`) : undefined}
           onKeyDown={handleKey}
           onChange={handleInput}
           onFocus={(event) => {
@@ -69,7 +71,7 @@ export function NumericInput({ label, isLabelShown = false, name, value, unit, p
         />
         {unit === undefined ? null : <span className="pr-2.5 text-sm text-second">{unit}</span>}
       </div>
-      {error === undefined ? null : <p id={`${id}-error`} role="alert" className="mt-1 max-w-80 border-l-4 border-ink pl-2 text-sm font-semibold">{error}</p>}
+      {error === undefined || errorId !== undefined ? null : <p id={`${id}-error`} role="alert" className="mt-1 max-w-80 border-l-4 border-ink pl-2 text-sm font-semibold">{error}</p>}
     </div>
   );
 }

@@ -1,5 +1,7 @@
 'use client';
 
+import { useId } from 'react';
+
 import { AgainstBaseline, type ChannelPreview } from '@/app/_features/log/against-baseline';
 import { NumericInput } from '@/app/_features/log/numeric-input';
 import { isTouched, notReadDraft, type ChannelDraft } from '@/app/_features/log/run-draft';
@@ -21,38 +23,46 @@ interface ReadingRowProps {
   readonly onFocus?: () => void;
 }
 
+/** Columns of the lines of a run, and of their headings. */
+export const readingColumns = 'grid grid-cols-[5.5rem_repeat(3,minmax(5.5rem,7rem))_8.5rem_minmax(9rem,1fr)] items-start gap-x-2';
+
 const traces = [{ value: '', label: 'Usable' }, { value: 'absent', label: 'No response' }, ...Object.entries(unusableWords).map(([value, label]) => ({ value, label: `Not usable: ${label}` }))];
 
 /** One line for one channel: what was read, or no response, or not usable; empty says "not read". */
 export function ReadingRow({ channel, typed, intensity, sentences, preview, onType, onFocus }: ReadingRowProps) {
+  const errorId = useId();
   const error = (field: string) => sentences[`${channel.id}.${field}`];
+  const wrong = ['onset', 'amplitude', 'duration', 'highest'].map(error).filter((sentence) => sentence !== undefined);
   return (
-    <div role="group" aria-label={channel.longName} data-channel={channel.id} onFocus={onFocus} className="grid min-h-10 grid-cols-[5.5rem_repeat(3,minmax(5.5rem,7rem))_8.5rem_minmax(9rem,1fr)] items-start gap-2">
-      <span className="flex min-h-9 items-center font-bold" title={channel.longName}>{channel.name}</span>
-      {typed.kind === 'values' ? (
-        <>
-          <NumericInput label={`Onset of ${channel.name}, ms`} name={`${channel.id}.onset`} value={typed.onset} error={error('onset')} placeholder={isTouched(typed) ? '' : 'not read'} onType={(onset) => onType({ ...typed, onset })} />
-          <NumericInput label={`Amplitude of ${channel.name}, ${channel.kind === 'muscle' ? 'mV' : 'µV'}`} name={`${channel.id}.amplitude`} value={typed.amplitude} error={error('amplitude')} onType={(amplitude) => onType({ ...typed, amplitude })} />
-          <NumericInput label={`Negative peak of ${channel.name}, ms`} name={`${channel.id}.duration`} value={typed.duration} error={error('duration')} onType={(duration) => onType({ ...typed, duration })} />
-        </>
-      ) : null}
-      {typed.kind === 'absent' ? (
-        <div className="col-span-3 flex items-start gap-2.5">
-          <span className="flex min-h-9 items-center font-semibold whitespace-nowrap">No response up to</span>
-          <NumericInput label={`Highest current tried, ${channel.name}`} name={`${channel.id}.highest`} unit="mA" value={typed.highest} error={error('highest')} onType={(highest) => onType({ kind: 'absent', highest })} className="w-28" />
-          <Button onClick={() => onType(notReadDraft)} aria-label={`Clear ${channel.name}`}>Clear</Button>
-        </div>
-      ) : null}
-      {typed.kind === 'unusable' ? <span className="col-span-3 flex min-h-9 items-center font-semibold">{`Not usable, ${unusableWords[typed.reason]}`}</span> : null}
-      <SelectField
-        label={`Whether ${channel.name} is usable`}
-        isLabelHidden
-        value={typed.kind === 'unusable' ? typed.reason : typed.kind === 'absent' ? 'absent' : ''}
-        disabled={typed.kind === 'values' && isTouched(typed)}
-        onChange={(event) => onType(draftOf(event.currentTarget.value, intensity))}
-        options={traces}
-      />
-      <AgainstBaseline preview={preview} />
+    <div role="group" aria-label={channel.longName} data-channel={channel.id} onFocus={onFocus} className="pb-1">
+      <div className={readingColumns}>
+        <span className="flex min-h-9 items-center font-bold" title={channel.longName}>{channel.name}</span>
+        {typed.kind === 'values' ? (
+          <>
+            <NumericInput label={`Onset of ${channel.name}, ms`} name={`${channel.id}.onset`} value={typed.onset} error={error('onset')} errorId={errorId} placeholder={isTouched(typed) ? '' : 'not read'} onType={(onset) => onType({ ...typed, onset })} />
+            <NumericInput label={`Amplitude of ${channel.name}, ${channel.kind === 'muscle' ? 'mV' : 'µV'}`} name={`${channel.id}.amplitude`} value={typed.amplitude} error={error('amplitude')} errorId={errorId} onType={(amplitude) => onType({ ...typed, amplitude })} />
+            <NumericInput label={`Negative peak of ${channel.name}, ms`} name={`${channel.id}.duration`} value={typed.duration} error={error('duration')} errorId={errorId} onType={(duration) => onType({ ...typed, duration })} />
+          </>
+        ) : null}
+        {typed.kind === 'absent' ? (
+          <div className="col-span-3 flex items-start gap-2.5">
+            <span className="flex min-h-9 items-center font-semibold whitespace-nowrap">No response up to</span>
+            <NumericInput label={`Highest current tried, ${channel.name}`} name={`${channel.id}.highest`} unit="mA" value={typed.highest} error={error('highest')} errorId={errorId} onType={(highest) => onType({ kind: 'absent', highest })} className="w-28" />
+            <Button onClick={() => onType(notReadDraft)} aria-label={`Clear ${channel.name}`}>Clear</Button>
+          </div>
+        ) : null}
+        {typed.kind === 'unusable' ? <span className="col-span-3 flex min-h-9 items-center font-semibold">{`Not usable, ${unusableWords[typed.reason]}`}</span> : null}
+        <SelectField
+          label={`Whether ${channel.name} is usable`}
+          isLabelHidden
+          value={typed.kind === 'unusable' ? typed.reason : typed.kind === 'absent' ? 'absent' : ''}
+          disabled={typed.kind === 'values' && isTouched(typed)}
+          onChange={(event) => onType(draftOf(event.currentTarget.value, intensity))}
+          options={traces}
+        />
+        <AgainstBaseline preview={preview} />
+      </div>
+      {wrong.length === 0 ? null : <p id={errorId} role="alert" className="mt-1 ml-23 border-l-4 border-ink pl-2 text-sm font-semibold">{wrong.join('. ')}</p>}
     </div>
   );
 }

@@ -4,7 +4,7 @@ import { useRef, type FormEvent, type KeyboardEvent } from 'react';
 
 import { useLogCase } from '@/app/_features/log/log-context';
 import { QuestionStrip } from '@/app/_features/log/question-strip';
-import { ReadingRow } from '@/app/_features/log/reading-row';
+import { ReadingRow, readingColumns } from '@/app/_features/log/reading-row';
 import { isTouched, notReadDraft } from '@/app/_features/log/run-draft';
 import { SettingsFields } from '@/app/_features/log/settings-fields';
 import { SiteGroup } from '@/app/_features/log/site-group';
@@ -13,6 +13,7 @@ import { useHotkeys } from '@/app/_features/log/use-hotkeys';
 import { useRunForm } from '@/app/_features/log/use-run-form';
 import { Button } from '@/app/_ui/button';
 import { Field } from '@/app/_ui/field';
+import { joinClasses } from '@/app/_ui/join-classes';
 
 /** The next run, by keyboard: site, readings, Enter. Nothing is logged twice, nothing unread is blank. */
 export function RunForm({ areKeysOn }: { readonly areKeysOn: boolean }) {
@@ -60,11 +61,11 @@ export function RunForm({ areKeysOn }: { readonly areKeysOn: boolean }) {
     form.log(false);
   };
   return (
-    <form ref={frame} method="post" noValidate aria-label="Next run" onKeyDown={handleKey} onSubmit={handleSubmit} className="flex flex-col gap-3 border-y border-rule bg-raised px-5 py-3">
+    <form ref={frame} method="post" noValidate aria-label="Next run" onKeyDown={handleKey} onSubmit={handleSubmit} className="flex flex-col gap-2.5 border-y border-rule bg-raised px-5 py-2.5">
       <SiteGroup nerves={state.plan.nerves} siteId={draft.settings.siteId} onChoose={(siteId, isByKey) => form.chooseSite(siteId, isByKey ? 'reading' : 'site')} />
       <SettingsFields plan={state.plan} draft={draft} sentences={sentences} onDraft={form.change} />
       <div className="overflow-x-auto">
-        <div className="grid grid-cols-[5.5rem_repeat(3,minmax(5.5rem,7rem))_8.5rem_minmax(9rem,1fr)] gap-2 pb-1 text-sm text-second" aria-hidden="true">
+        <div className={joinClasses(readingColumns, 'pb-1 text-sm text-second')} aria-hidden="true">
           <span />
           <span>Onset, ms</span>
           <span>{`Amplitude, ${channels.every((channel) => channel.kind === 'nerve') ? 'µV' : 'mV'}`}</span>

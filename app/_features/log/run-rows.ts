@@ -9,7 +9,7 @@ import { decimal, signed } from '@/lib/text/format';
 import { readingWords } from '@/lib/text/reading-words';
 import { notComparedWords, noVelocityWords } from '@/lib/text/reason-words';
 import { channelName } from '@/lib/text/run-sentence';
-import { siteName } from '@/lib/text/site-name';
+import { siteName, siteNames } from '@/lib/text/site-name';
 
 /** One run with all that the log says of it. */
 export interface LoggedRun {
@@ -35,8 +35,10 @@ export function runRows(logged: LoggedRun, plan: CasePlan): readonly RunRow[] {
   return shown.map((row, index) => {
     const channel = plan.channels.find((candidate) => candidate.id === row.channelId);
     const path = logged.judged?.paths.find((candidate) => candidate.pathId === `${run.siteId}/${row.channelId}`);
-    const segment = logged.judged?.segments.find((candidate) => candidate.channelId === row.channelId && candidate.proximalSiteId === run.siteId);
-    const notes = [...(index === 0 ? [...purposeNotes(run), ...logged.notes] : []), ...pathNotes(path, row.reading), ...segmentNotes(segment), ...(index === 0 ? [...unread, ...(run.note === null ? [] : [run.note])] : [])];
+    const segment = shownSegment(logged.judged?.segments.filter((candidate) => candidate.channelId === row.channelId) ?? [], run.siteId);
+    const own = index === 0 ? [...purposeNotes(run), ...logged.notes] : [];
+    const last = index === 0 ? [...unread, ...(run.note === null ? [] : [run.note])] : [];
+    const notes = [...own, ...pathNotes(path, row.reading, run), ...segmentNotes(segment, run.siteId, plan, index === 0), ...last];
     return {
       kind: 'run',
       key: `${logged.seq}-${row.channelId}`,
@@ -94,18 +96,30 @@ function purposeNotes(run: RunBody): readonly string[] {
   return run.purpose === 'check' ? [] : [run.purpose];
 }
 
-function pathNotes(path: PathJudgement | undefined, reading: Reading): readonly string[] {
+function pathNotes(path: PathJudgement | undefined, reading: Reading, run: RunBody): readonly string[] {
   const words = reading.kind === 'absent' || reading.kind === 'unusable' ? [readingWords(reading, 'muscle')] : [];
   if (path?.kind !== 'not-compared' || path.reason === 'unusable') return words;
   if (path.reason === 'not-read') return ['not read'];
-  return [...words, path.reason === 'no-baseline' ? 'no baseline yet' : `not compared, ${notComparedWords[path.reason]}`];
+  if (path.reason === 'no-baseline') return run.purpose === 'baseline' ? words : [...words, 'no baseline yet'];
+  return [...words, `not compared, ${notComparedWords[path.reason]}`];
 }
 
-function segmentNotes(segment: SegmentJudgement | undefined): readonly string[] {
+/** The segment that begins at this site; where it has no velocity, the one that the run completed from the other side. */
+function shownSegment(segments: readonly SegmentJudgement[], siteId: string): SegmentJudgement | undefined {
+  const own = segments.find((segment) => segment.proximalSiteId === siteId);
+  const other = segments.find((segment) => segment.distalSiteId === siteId && segment.velocity.kind === 'velocity' && segment.proximalAt !== segment.distalAt);
+  return own?.velocity.kind === 'velocity' ? own : (other ?? own);
+}
+
+function segmentNotes(segment: SegmentJudgement | undefined, siteId: string, plan: CasePlan, isFirst: boolean): readonly string[] {
   if (segment === undefined) return [];
-  if (segment.velocity.kind === 'velocity') return segment.velocity.isShort ? [`${segment.velocity.distanceMm} mm, short`] : [];
+  if (segment.velocity.kind === 'velocity') {
+    const short = segment.velocity.isShort ? [`${segment.velocity.distanceMm} mm, short`] : [];
+    return segment.distalSiteId === siteId ? [...short, `m/s ${siteNames(plan, segment.proximalSiteId, segment.distalSiteId)}`] : short;
+  }
   const { reason } = segment.velocity;
-  return reason === 'partner-not-tested' || reason === 'no-response' || reason === 'onset-not-read' ? [] : [`no velocity, ${noVelocityWords[reason]}`];
+  const isSaid = reason === 'partner-not-tested' || reason === 'no-response' || reason === 'onset-not-read';
+  return isSaid || !isFirst ? [] : [reason === 'spans-risk-step' ? 'no fresh pair' : noVelocityWords[reason]];
 }
 
 function upper(text: string): string {

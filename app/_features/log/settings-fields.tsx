@@ -30,18 +30,19 @@ export function SettingsFields({ plan, draft, sentences, onDraft }: SettingsFiel
   const { settings } = draft;
   const set = (change: Partial<RunSettings>) => onDraft({ ...draft, settings: { ...settings, ...change } });
   return (
-    <div className="grid grid-cols-2 items-start gap-2.5 sm:grid-cols-3 xl:grid-cols-[7.5rem_7.5rem_minmax(9rem,1.5fr)_minmax(8.5rem,1fr)_7.5rem_auto]">
-      <NumericInput label="Intensity" isLabelShown name="intensity" unit="mA" value={settings.intensity} error={sentences['intensity']} onType={(intensity) => set({ intensity })} />
-      <NumericInput label="Pulse width" isLabelShown name="pulseWidth" unit="µs" value={settings.pulseWidth} error={sentences['pulseWidth']} onType={(pulseWidth) => set({ pulseWidth })} />
+    <div className="flex flex-wrap items-start gap-2.5">
+      <NumericInput className="w-29" label="Intensity" isLabelShown name="intensity" unit="mA" value={settings.intensity} error={sentences['intensity']} onType={(intensity) => set({ intensity })} />
+      <NumericInput className="w-29" label="Pulse width" isLabelShown name="pulseWidth" unit="µs" value={settings.pulseWidth} error={sentences['pulseWidth']} onType={(pulseWidth) => set({ pulseWidth })} />
       <SelectField
         label="Electrode"
+        className="max-w-64 min-w-44 flex-1"
         value={settings.electrodeId}
         onChange={(event) => set({ electrodeId: event.currentTarget.value })}
         options={plan.electrodes.map((electrode) => ({ value: electrode.id, label: electrode.name }))}
       />
-      <SelectField label="Family" value={settings.family} onChange={(event) => set({ family: event.currentTarget.value as BaselineFamily })} options={families} />
-      <SelectField label="Purpose" value={draft.purpose} onChange={(event) => onDraft({ ...draft, purpose: event.currentTarget.value as RunPurpose })} options={purposes} />
-      <label className="flex min-h-9 items-center gap-2 self-end pb-0.5">
+      <SelectField className="max-w-52 min-w-44 flex-1" label="Family" value={settings.family} onChange={(event) => set({ family: event.currentTarget.value as BaselineFamily })} options={families} />
+      <SelectField className="w-30" label="Purpose" value={draft.purpose} onChange={(event) => onDraft({ ...draft, purpose: event.currentTarget.value as RunPurpose })} options={purposes} />
+      <label className="mt-5.5 flex min-h-9 items-center gap-2">
         <input type="checkbox" checked={settings.isSupramaximal} onChange={(event) => set({ isSupramaximal: event.currentTarget.checked })} className="size-4 accent-stain" />
         Supramaximal
       </label>

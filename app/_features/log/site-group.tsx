@@ -33,8 +33,8 @@ export function SiteGroup({ nerves, siteId, onChoose }: SiteGroupProps) {
   return (
     <div role="radiogroup" aria-label="Site" onKeyDown={handleKey} className="flex flex-wrap gap-x-5 gap-y-2">
       {nerves.map((nerve) => (
-        <div key={nerve.id} className="min-w-0">
-          <p className="mb-1 text-sm text-second">{nerve.name}</p>
+        <div key={nerve.id} className="flex min-w-0 flex-wrap items-center gap-x-3 gap-y-1">
+          <p className="text-sm text-second">{nerve.name}</p>
           <div className="flex flex-wrap gap-1.5">
             {nerve.sites.map((site) => (
               <button

@@ -37,7 +37,7 @@ export function ChannelsTable() {
       text="Muscles and nerves that are recorded. Stable is said only while every required channel has a fresh run from every site of its nerve."
       action={<Button onClick={add} disabled={fields.length >= mostChannels}>Add a channel</Button>}
     >
-      <Table caption="Channels">
+      <Table caption="Channels, one on each line">
         <thead>
           <tr>
             <HeadCell>Short name</HeadCell>
@@ -63,7 +63,7 @@ export function ChannelsTable() {
                 <Cell className="min-w-28"><SelectField label={`Kind of ${said}`} isLabelHidden {...register(`${row}.kind`)} options={kinds} /></Cell>
                 <Cell className="min-w-40"><SelectField label={`How the amplitude of ${said} is read`} isLabelHidden {...register(`${row}.convention`)} options={conventions} /></Cell>
                 <Cell>
-                  <label className="inline-flex min-h-9 min-w-9 items-center">
+                  <label className="inline-flex min-h-9 min-w-9 items-center align-middle">
                     <input type="checkbox" value={channel.id} {...register('requiredChannelIds')} className="size-4 accent-stain" />
                     <span className="sr-only">{`${said} is required`}</span>
                   </label>

@@ -6,6 +6,7 @@ import { buildPlan } from '@/app/_features/plan/build-plan';
 import { templateOf, type PlanForm } from '@/app/_features/plan/plan-form';
 import { MeasuredScene } from '@/app/_ui/measured-scene';
 import { initialState } from '@/lib/case/initial-state';
+import type { NerveLineSegment } from '@/lib/chart/nerve-line';
 import { nerveLineScene } from '@/lib/chart/nerve-line-scene';
 import { nerveLineView } from '@/lib/chart/nerve-line-view';
 
@@ -22,5 +23,12 @@ export function PlanLine({ nerveIndex }: { readonly nerveIndex: number }) {
   }
   const view = nerveLineView({ ...initialState('plan'), plan }, nerve.id, 0);
   if (view.sites.length === 0) return <p className="py-6 text-second">The nerve is drawn when a channel records distal to its sites.</p>;
-  return <MeasuredScene className="py-3" draw={(widthPx) => nerveLineScene(view, { widthPx, textPx: 14, hasAges: false })} />;
+  const planned = { ...view, sites: view.sites.map((site) => ({ ...site, text: `${site.positionMm}\u00a0mm` })), segments: view.segments.map(withLength) };
+  return <MeasuredScene className="py-3" draw={(widthPx) => nerveLineScene(planned, { widthPx, textPx: 14, hasAges: false })} />;
+}
+
+/** Nothing is tested while planning: the length stands where the velocity will. */
+function withLength(segment: NerveLineSegment): NerveLineSegment {
+  const length = `${Math.round((segment.toMm - segment.fromMm) * 10) / 10}\u00a0mm`;
+  return { ...segment, text: length, shortText: length };
 }

@@ -12,7 +12,7 @@ const groups: readonly { readonly title: string; readonly rows: readonly (readon
     rows: [
       ['amplitudeWatchFallPercent', 'Watch: amplitude down by', '%'],
       ['amplitudeNoticeFallPercent', 'Notice: amplitude down by', '%'],
-      ['lostBelowPercent', 'Lost: under', '% of baseline'],
+      ['lostBelowPercent', 'Lost: under this share of baseline', '%'],
       ['onsetNoticeRisePercent', 'Notice: onset late by', '%'],
       ['onsetNoticeRiseMs', 'and at least', 'ms'],
       ['segmentTimeRisePercent', 'Notice: segment time up by', '%'],

@@ -52,7 +52,7 @@ export function SitesTable({ nerveIndex }: { readonly nerveIndex: number }) {
                 <Cell className="w-24"><PlanField name={`${row}.hotkey`} label={`Key of ${said}`} isLabelHidden isKey /></Cell>
                 <Cell className="min-w-32"><PlanField name={`${row}.defaultIntensityMa`} label={`First current at ${said}`} isLabelHidden isNumeric unit="mA" /></Cell>
                 <Cell>
-                  <label className="inline-flex min-h-9 min-w-9 items-center">
+                  <label className="inline-flex min-h-9 min-w-9 items-center align-middle">
                     <input type="radio" value={site.id} {...register('plan.closingSiteId')} className="size-4 accent-stain" />
                     <span className="sr-only">{`Closing site: ${said}`}</span>
                   </label>

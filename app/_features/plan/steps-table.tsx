@@ -27,7 +27,7 @@ export function StepsTable() {
       text={`A risk step makes every test before it old. The console itself takes ${Object.keys(consoleKeys).join(', ')} and the digits.`}
       action={<Button onClick={add} disabled={fields.length >= mostSteps}>Add a step</Button>}
     >
-      <Table caption="Steps" className="max-w-4xl">
+      <Table caption="Steps, one on each line" className="max-w-4xl">
         <thead>
           <tr>
             <HeadCell>Step</HeadCell>
@@ -61,7 +61,7 @@ export function StepsTable() {
 
 function Tick({ label, ...input }: { readonly label: string } & React.ComponentProps<'input'>) {
   return (
-    <label className="inline-flex min-h-9 min-w-9 items-center">
+    <label className="inline-flex min-h-9 min-w-9 items-center align-middle">
       <input type="checkbox" {...input} className="size-4 accent-stain" />
       <span className="sr-only">{label}</span>
     </label>

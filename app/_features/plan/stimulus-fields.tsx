@@ -8,6 +8,7 @@ import type { PlanForm } from '@/app/_features/plan/plan-form';
 import { Section } from '@/app/_features/plan/section';
 import { Button } from '@/app/_ui/button';
 import { SelectField } from '@/app/_ui/select-field';
+import { TextArea } from '@/app/_ui/text-area';
 
 const families = [
   { value: 'pre-position', label: 'Before positioning' },
@@ -17,7 +18,7 @@ const families = [
 
 /** What stimulates, how long a pulse, which baseline family first, and the trap of this operation. */
 export function StimulusFields() {
-  const { control, register } = useFormContext<PlanForm>();
+  const { control, register, formState } = useFormContext<PlanForm>();
   const { fields, append, remove } = useFieldArray({ control, name: 'plan.electrodes', keyName: 'rowKey' });
   return (
     <Section title="Stimulus" text="A run is compared only with a baseline of the same electrode, family and pulse width.">
@@ -33,7 +34,7 @@ export function StimulusFields() {
       <div className="mt-4 grid gap-x-6 gap-y-4 md:grid-cols-[12rem_16rem_1fr]">
         <PlanField name="plan.defaultPulseWidthUs" label="Pulse width" isNumeric unit="µs" />
         <SelectField label="Baseline family" {...register('plan.defaultFamily')} options={families} />
-        <PlanField name="plan.trap" label="Trap to remember" />
+        <TextArea label="Trap to remember" {...register('plan.trap')} error={formState.errors.plan?.trap?.message} />
       </div>
     </Section>
   );

@@ -5,6 +5,7 @@ import { CartesianGrid, Line, LineChart, ReferenceLine, XAxis, YAxis } from 'rec
 import { useElementWidth } from '@/app/_ui/use-element-width';
 import { TrendKey, trendDash, TrendMark } from '@/app/_features/record/trend-marks';
 import type { NerveTrend, TrendStep } from '@/app/_features/record/trend-points';
+import { timeTicks } from '@/app/_features/record/time-ticks';
 import { clockTime } from '@/lib/text/format';
 
 interface TrendChartProps {
@@ -25,7 +26,8 @@ export function TrendChart({ trend, steps, limitPercent, timeZone }: TrendChartP
   const from = Math.min(...times);
   const to = Math.max(...times, from + 60_000);
   const top = Math.max(leastTopPercent, Math.ceil(Math.max(...percents) / 20) * 20);
-  const time = (atMs: number) => clockTime(new Date(atMs).toISOString(), timeZone);
+  const ticks = timeTicks(from, to);
+  const time = (atMs: number) => clockTime(new Date(atMs).toISOString(), timeZone, { seconds: ticks.hasSeconds });
   const low = Math.min(...percents);
   const label = `${trend.nerveName}: ${percents.length} compared runs from ${time(from)} to ${time(to)}, lowest ${Math.round(low)} % of baseline`;
   return (
@@ -38,7 +40,7 @@ export function TrendChart({ trend, steps, limitPercent, timeZone }: TrendChartP
         {widthPx === null ? null : (
           <LineChart width={widthPx} height={heightPx} margin={{ top: 24, right: 20, bottom: 4, left: 0 }} accessibilityLayer={false}>
             <CartesianGrid vertical={false} stroke="var(--rule)" />
-            <XAxis type="number" dataKey="atMs" domain={[from, to]} scale="time" tickFormatter={time} stroke="var(--edge)" tick={{ fill: 'var(--second)', fontSize: 13 }} allowDuplicatedCategory={false} />
+            <XAxis type="number" dataKey="atMs" domain={[from, to]} scale="time" ticks={[...ticks.atMs]} interval={0} tickFormatter={time} stroke="var(--edge)" tick={{ fill: 'var(--second)', fontSize: 13 }} allowDuplicatedCategory={false} />
             <YAxis type="number" domain={[0, top]} ticks={[0, 50, 100]} width={48} stroke="var(--edge)" tick={{ fill: 'var(--second)', fontSize: 13 }} />
             <ReferenceLine y={limitPercent} stroke="var(--second)" strokeDasharray="2 5" label={{ value: `limit ${limitPercent} %, custom`, position: 'insideBottomRight', fill: 'var(--second)', fontSize: 12 }} />
             {steps.filter((step) => step.atMs >= from && step.atMs <= to).map((step) => (

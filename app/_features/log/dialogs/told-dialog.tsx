@@ -5,7 +5,7 @@ import { useState } from 'react';
 import { CommandDialog } from '@/app/_features/log/command-dialog';
 import { useLogCase } from '@/app/_features/log/log-context';
 import { Choice } from '@/app/_ui/choice';
-import { Field } from '@/app/_ui/field';
+import { TextArea } from '@/app/_ui/text-area';
 import { actionNames } from '@/lib/text/action-names';
 import { sayThis } from '@/lib/text/say-this';
 
@@ -34,7 +34,7 @@ export function ToldDialog({ alertId, onClose }: { readonly alertId: string; rea
       command={() => (words.trim() === '' ? 'Words missing: log what was said' : { name: 'tell-alert', alertId, whom, how, words })}
       onClose={onClose}
     >
-      <Field label="Words as said" value={words} maxLength={300} autoComplete="off" autoFocus onChange={(event) => setWords(event.currentTarget.value)} />
+      <TextArea label="Words as said" value={words} maxLength={300} autoFocus onChange={(event) => setWords(event.currentTarget.value)} />
       <Choice legend="Whom" options={people} value={whom} onChoose={setWhom} />
       <Choice legend="How" options={ways} value={how} onChoose={setHow} />
     </CommandDialog>

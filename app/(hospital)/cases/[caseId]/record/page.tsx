@@ -16,7 +16,7 @@ export default async function CaseRecord({ params }: { readonly params: Promise<
   return (
     <QueryProvider>
       <div data-theme="paper">
-        <Shell links={deskLinks} aside={<AccountAside />}>
+        <Shell links={deskLinks} aside={<AccountAside hasTheme={false} />}>
           <RecordPage caseId={caseId} />
         </Shell>
       </div>
