@@ -1,5 +1,6 @@
 import type { Finding, NoVelocityReason, SegmentJudgement } from '@/lib/alert/judgement';
 import type { RuleSet } from '@/lib/alert/rule-set';
+import { amplitudeChange } from '@/lib/change/amplitude-change';
 import { amplitudeRatio } from '@/lib/change/amplitude-ratio';
 import { isBeyondNoise } from '@/lib/change/is-beyond-noise';
 import { segmentTimeChange } from '@/lib/change/segment-time-change';
@@ -60,7 +61,8 @@ export function judgeSegment(input: SegmentPairInput): SegmentJudgement {
     const isLong = input.distanceMm !== null && input.distanceMm >= shortSegmentMm.value;
     findings.push({ kind: 'segment-slowed', priority: 'notice', mayBecomeAlert: isLong });
   }
-  if (ratio !== null && ratio.changePercent <= -input.rules.amplitudeRatioFallPercent && isBeyondNoise(ratio)) {
+  const isRatioLow = ratio !== null && ratio.changePercent <= -input.rules.amplitudeRatioFallPercent && isBeyondNoise(ratio);
+  if (isRatioLow && hasFallen(proximal)) {
     findings.push({ kind: 'ratio-fall', priority: 'notice', mayBecomeAlert: false });
   }
   const bothOnsets = proximal.onsetMs !== null && distal.onsetMs !== null;
@@ -130,6 +132,19 @@ function isSlowed(
     time.changeMs >= rules.segmentTimeRiseMs &&
     isBeyondNoise({ change: time.changeMs, standardError: time.standardErrorMs })
   );
+}
+
+/** A ratio also falls when only the distal response grew: that is a gain, and nothing was lost proximally. */
+function hasFallen(end: SegmentEnd): boolean {
+  if (end.amplitudeUv === null || end.baselineAmplitudeUv === null) return false;
+  const change = amplitudeChange({
+    baselineUv: end.baselineAmplitudeUv,
+    currentUv: end.amplitudeUv,
+    coefficientOfVariation: end.baselineScatter,
+    baselineRunCount: end.baselineRunCount,
+  });
+  if (change.kind === 'not-computable' || change.changePercent >= 0) return false;
+  return isBeyondNoise({ change: change.changePercent, standardError: change.standardErrorPercent });
 }
 
 /** Above this many times its baseline a ratio says nothing but that one end is next to nothing. House rule. */

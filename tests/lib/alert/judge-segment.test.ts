@@ -42,6 +42,7 @@ describe('judgeSegment', () => {
     ['notices a ratio of exactly −20 %', pair(8, {}, [8000, 10_000]), ['ratio-fall']],
     ['is silent at −19.9 %', pair(8, {}, [8010, 10_000]), []],
     ['cancels what weakens both', pair(8, {}, [4000, 4000]), []],
+    ['lets a ratio pass that fell only because the distal response grew', pair(8, {}, [10_000, 14_000]), []],
     ['finds the ratio at a lost proximal response', pair(null, {}, [0, 10_000]), ['ratio-fall']],
     ['has nothing to say of two lost responses', pair(null, {}, [0, 0]), []],
   ] as const)('judgeSegment %s', (_promise, input, expected) => {
