@@ -14,7 +14,7 @@ import { SetUpBar } from '@/app/_features/log/set-up-bar';
 import { StepsPanel } from '@/app/_features/log/steps-panel';
 import { useConsoleKeys } from '@/app/_features/log/use-console-keys';
 
-/** Left the nerve, the next run and the log; right what is open, due and known. Controls never scroll away. */
+/** Left the nerve, the next run and the log; right what is open, due and known, controls first: they never scroll away. */
 export function ConsoleBody({ areKeysOn }: { readonly areKeysOn: boolean }) {
   const { state, head } = useLogCase();
   const [problem, setProblem] = useState<string | null>(null);
@@ -32,8 +32,8 @@ export function ConsoleBody({ areKeysOn }: { readonly areKeysOn: boolean }) {
       <aside aria-label="State of the case" className="flex min-h-0 flex-col border-l border-rule lg:overflow-y-auto">
         <AlertBlocks />
         <DuePanel />
-        <ConditionsPanel />
         <StepsPanel onProblem={setProblem} />
+        <ConditionsPanel />
         <MessagesPanel />
       </aside>
     </div>
