@@ -3,6 +3,7 @@ import { findCredentialsByEmail } from '@/db/repositories/people/find-credential
 import { nextCode } from '@/server/auth/second-factor';
 import { settings } from '@/server/settings/settings';
 import { openInstallation } from '@/server/setup/installation';
+import { readEnvironmentFile } from '@/server/setup/read-environment-file.mjs';
 import { reportFailure, SetupFailure } from '@/server/setup/setup-failure.mjs';
 
 /** `npm run code -- --for EMAIL`: the present code of a demo person. Nobody else's code can be printed. */
@@ -24,6 +25,7 @@ async function printCode(words: readonly string[]): Promise<void> {
 }
 
 try {
+  readEnvironmentFile();
   await printCode(process.argv.slice(2));
 } catch (error) {
   process.exitCode = reportFailure(error);
