@@ -8,6 +8,7 @@ import { startProduct, type Product } from '@/tests/support/start-product';
 import { ulnarSites } from '@/tests/support/ulnar-case';
 import { WallScreen } from '@/tests/support/wall-screen';
 
+import { eventually } from './eventually';
 import { oneJourney } from './one-journey';
 import { logBaselineByKeys, logUlnarByKeys } from './ulnar-keys';
 
@@ -91,13 +92,13 @@ describe('a first visit, from the sign-in to the closed case', () => {
     await desk.focusSites();
     await logUlnarByKeys(desk, 'above-elbow', 0.4, 1.33);
     await wall.waitForLead(/^Ulnar at 40 % of baseline$/);
-    await desk.page.getByText(/^Notice since/).waitFor();
+    await desk.page.getByText(/^Notice (for|since) /).waitFor();
     await logUlnarByKeys(desk, 'above-elbow', 0.38, 1.38);
     await wall.waitForLead(/^Ulnar at 38 % of baseline$/);
-    await desk.page.getByText(/^Alert since/).waitFor();
+    await desk.page.getByText(/^Alert (for|since) /).waitFor();
     await logUlnarByKeys(desk, 'axilla', 0.36, 1.38);
     await logUlnarByKeys(desk, 'below-elbow', 0.98);
-    await expect.poll(() => wall.picture()).toMatch(/Between above and below elbow/);
+    await eventually(() => wall.picture()).toMatch(/Between above and below elbow/);
     const stored = await storedAlerts();
     expect(stored.map(([kind]) => kind).slice(0, 2)).toEqual(['notice.raised', 'alert.raised']);
     expect(stored[0]).toEqual(['notice.raised', 'ulnar-1', '40']);
@@ -106,7 +107,7 @@ describe('a first visit, from the sign-in to the closed case', () => {
 
   test('a reload of either shows the same', async () => {
     for (const screen of [desk, wall]) {
-      await expect.poll(() => wall.picture()).not.toMatch(/Desk not connected/);
+      await eventually(() => wall.picture()).not.toMatch(/Desk not connected/);
       const before = await screen.picture();
       await screen.page.reload();
       await expect.poll(() => screen.picture().catch(() => ''), { timeout: 10_000 }).toBe(before);
@@ -123,7 +124,7 @@ describe('a first visit, from the sign-in to the closed case', () => {
       await dialog.getByRole('button', { name: 'Traction released' }).click();
       await dialog.getByRole('button', { name: 'Log surgeon’s action' }).click();
     });
-    await expect.poll(() => wall.picture()).toMatch(/Told \d\d:\d\d/);
+    await eventually(() => wall.picture()).toMatch(/Told \d\d:\d\d/);
     await desk.focusSites();
     for (const site of ['above-elbow', 'above-elbow', 'axilla', 'axilla'] as const) await logUlnarByKeys(desk, site, 0.93, 0.05);
     await wall.waitForLead(/^Ulnar back at 93 % of baseline$/);

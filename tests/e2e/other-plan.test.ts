@@ -6,6 +6,7 @@ import { DeskPerson, type TypedReading } from '@/tests/support/desk-person';
 import { startProduct, type Product } from '@/tests/support/start-product';
 import { WallScreen } from '@/tests/support/wall-screen';
 
+import { eventually } from './eventually';
 import { oneJourney } from './one-journey';
 
 let product: Product;
@@ -103,7 +104,7 @@ test('notice and alert name the nerve, the muscle and the place of this plan', a
   await wall.waitForLead(/^Radial at 33 % of baseline$/);
   await logSite(1, 0.98);
   await logSite(2, 0.98);
-  await expect.poll(() => wall.picture()).toMatch(/Between upper arm and spiral groove/);
+  await eventually(() => wall.picture()).toMatch(/Between upper arm and spiral groove/);
   expect(await desk.page.getByText(/^Say this/).locator('..').innerText()).toMatch(/Radial, EI, at 33 per cent of baseline, between upper arm and spiral groove, since plate lifted\./);
   const shown = `${await wall.picture()} ${await desk.picture()}`;
   expect(shown).not.toMatch(/ulnar|ADM|axilla|nerve lifted/i);

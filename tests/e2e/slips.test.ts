@@ -6,6 +6,7 @@ import type { DeskPerson } from '@/tests/support/desk-person';
 import type { HttpDesk } from '@/tests/support/http-desk';
 import { startProduct, type Product } from '@/tests/support/start-product';
 
+import { eventually } from './eventually';
 import { openMonitoredDesk } from './monitored-desk';
 import { logUlnarByKeys, typedAdm } from './ulnar-keys';
 
@@ -63,7 +64,7 @@ describe('slips of the hand', () => {
     await press('4');
     await desk.page.keyboard.type('2.9');
     await press('l');
-    await expect.poll(async () => desk.page.getByRole('main').innerText()).toMatch(/Key L not taken/);
+    await eventually(async () => desk.page.getByRole('main').innerText()).toMatch(/Key L not taken/);
     expect([await steps(), await desk.page.getByLabel('Onset of ADM, ms').inputValue()]).toEqual([before, '2.9']);
     await anew();
   });
@@ -95,7 +96,7 @@ describe('slips of the hand', () => {
     const before = await desk.runCount();
     await desk.typeRun('4', [['2.90', '0']]);
     await press('Enter');
-    await expect.poll(sentences).toMatch(/no response/i);
+    await eventually(sentences).toMatch(/no response/i);
     expect(await desk.runCount()).toBe(before);
     await anew();
   });
@@ -113,7 +114,7 @@ describe('slips of the hand', () => {
     await desk.typeRun('4', [typedAdm('wrist')]);
     await desk.page.getByLabel(label, { exact: true }).fill(typed);
     await press('Enter');
-    await expect.poll(sentences).toMatch(sentence);
+    await eventually(sentences).toMatch(sentence);
     expect(await desk.page.getByLabel(label, { exact: true }).getAttribute('aria-invalid')).toBe('true');
     expect(await desk.runCount()).toBe(before);
   });

@@ -41,10 +41,10 @@ async function shoot(page: Page, name: string, theme: string): Promise<void> {
 }
 
 const lesion = async (http: HttpDesk) => {
-  await http.run('above-elbow', { adm: adm('above-elbow', 0.38, 1.38) }, {}, { agoS: 60 });
-  await http.run('axilla', { adm: adm('axilla', 0.36, 1.38) }, {}, { agoS: 45 });
-  await http.run('below-elbow', { adm: adm('below-elbow', 0.98, 0.01) }, {}, { agoS: 25 });
-  await http.run('wrist', { adm: adm('wrist', 0.99) }, {}, { agoS: 12 });
+  await http.run('above-elbow', { adm: adm('above-elbow', 0.38, 1.38) }, {}, { agoS: 3 });
+  await http.run('axilla', { adm: adm('axilla', 0.36, 1.38) }, {}, { agoS: 2 });
+  await http.run('below-elbow', { adm: adm('below-elbow', 0.98, 0.01) }, {}, { agoS: 1 });
+  await http.run('wrist', { adm: adm('wrist', 0.99) }, {});
 };
 
 /** The case of the design, up to the step after which the nerve fails. */
@@ -83,11 +83,11 @@ async function shootDesk(browser: Browser, product: Product): Promise<void> {
   for (const { theme, desk } of desks) await desk.page.screenshot({ path: path.join(folder, `plan-whole-${theme}.png`), fullPage: true });
   const toLog = async (desk: DeskPerson) => (await desk.goTo(`/cases/${http.caseId}/log`), desk.focusSites());
   await each('log-quiet', toLog);
-  await http.step('nerve-lifted', { agoS: 90 });
-  await http.run('above-elbow', { adm: adm('above-elbow', 0.4, 1.33) }, {}, { agoS: 75 });
-  await each('log-notice', async (desk) => desk.page.getByText(/^Notice since/).waitFor());
+  await http.step('nerve-lifted', { agoS: 30 });
+  await http.run('above-elbow', { adm: adm('above-elbow', 0.4, 1.33) }, {}, { agoS: 3 });
+  await each('log-notice', async (desk) => desk.page.getByText(/^Notice (for|since) /).waitFor());
   await lesion(http);
-  await each('log-alert', async (desk) => desk.page.getByText(/^Alert since/).waitFor());
+  await each('log-alert', async (desk) => desk.page.getByText(/^Alert (for|since) /).waitFor());
   const questions = ['Told', 'Surgeon’s action', 'End', 'Phase', 'Accept baseline', 'Measure distances', 'Pair a wall', 'Close case', 'Keys', 'Correct last run', 'Other step'];
   for (const question of questions) {
     const name = `log-${question.toLowerCase().replace(/[^a-z]+/g, '-')}`;
