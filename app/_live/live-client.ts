@@ -264,6 +264,8 @@ export class LiveClient {
   private async personChanged(personId: string | null): Promise<void> {
     const isAnother = this.queue.person !== null && this.queue.person !== personId;
     await this.queue.setPerson(personId);
+    // What came before the person was known is kept now: a log without its beginning cannot be shown again.
+    for (const [caseId, { viewer }] of isAnother ? [] : this.followers) this.keep(caseId, viewer, this.parts.store.getState().feeds[caseId]?.entries ?? []);
     if (!isAnother) return;
     this.parts.store.setState({ feeds: {}, link: { ...emptyLiveStore.link, isConnected: this.isConnected() } });
     for (const [caseId, held] of this.followers) {

@@ -105,6 +105,23 @@ describe('LiveClient without a link', () => {
     expect(server.entries.slice(-2).map((entry) => entry.commandId)).toEqual(ids);
   });
 
+  it('keeps a case whose entries came before the server said who sits here', async () => {
+    const browser = freshBrowser();
+    const server = new FakeServer(caseId, entries);
+    browser.session = { kind: 'no-answer' };
+    const before = await openTab(browser, server);
+    before.client.follow(caseId, 'desk');
+    await until(() => before.feed(caseId).state?.seq === entries.length);
+    browser.session = { kind: 'person', personId: 'person-1', displayName: 'Neurophysiologist' };
+    await until(() => before.store().session.status === 'signed-in');
+    const storage = await openLiveStorage(() => openLiveDatabase(browser.databaseName));
+    await expect.poll(async () => (await storage.kept.read('person-1', caseId)).length).toBe(entries.length);
+    before.kill();
+    server.stop();
+    const after = await desk(browser, server);
+    await until(() => after.feed(caseId).state?.seq === entries.length);
+  });
+
   it('sends from one tab only when two are open', async () => {
     const browser = freshBrowser();
     const server = new FakeServer(caseId, entries);
