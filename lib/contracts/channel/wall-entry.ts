@@ -1,32 +1,63 @@
-import type { EntryKind } from '@/lib/case/entry-bodies';
+import type { AlertEvidence, Condition, EntryBodies, EntryKind } from '@/lib/case/entry-bodies';
+import type { CasePlan } from '@/lib/case/plan';
+import type { RunBody } from '@/lib/case/run-body';
 import type { WireEntry } from '@/lib/contracts/http/replies';
 
+/** Names of one object's fields: `true` lets a field through as it is, a list of its own cuts it as well. */
+interface Allowed {
+  readonly [field: string]: true | Allowed;
+}
+
+/** The same, held to the fields that the body really has. */
+type AllowedOf<Body> = { readonly [Field in keyof Body]?: true | Allowed };
+type ConditionField = Condition extends infer One ? (One extends Condition ? keyof One : never) : never;
+
+const plan: AllowedOf<CasePlan> = {
+  templateId: true, procedure: true, title: true, side: true, theatre: true, nerves: true, channels: true, paths: true, steps: true,
+  rules: true, electrodes: true, defaultPulseWidthUs: true, defaultFamily: true, closingSiteId: true,
+};
+
+const run: AllowedOf<RunBody> = {
+  siteId: true, electrodeId: true, family: true, purpose: true, intensityMa: true, pulseWidthUs: true, isSupramaximal: true,
+  maximalResponseMa: true, readings: true,
+};
+
+/** What was measured; the words that were typed stay at the desk. */
+const condition: { readonly [Field in ConditionField]?: true } = { kind: true, count: true, ratio: true, isUp: true, pressureMmHg: true, temperatureC: true };
+
+const evidence: AllowedOf<AlertEvidence> = {
+  alertId: true, nerveId: true, runSeq: true, pathIds: true, finding: true, worstPercentOfBaseline: true, location: true,
+  lastGoodAt: true, firstBadAt: true, stepsBetween: true, judgeVersion: true,
+};
+
 /** Fields of each body that a wall may read. A kind that is not listed travels as number and hashes only. */
-const wallFields: { readonly [K in EntryKind]?: readonly string[] } = {
-  'case.planned': ['plan'],
-  'plan.revised': ['plan'],
-  'case.opened': ['clockOffsetMs'],
-  'timeout.confirmed': ['side'],
-  'phase.changed': ['phase', 'reason'],
-  'run.logged': ['siteId', 'electrodeId', 'family', 'purpose', 'intensityMa', 'pulseWidthUs', 'isSupramaximal', 'maximalResponseMa', 'readings'],
-  'run.judged': ['runSeq', 'judgeVersion', 'paths', 'segments'],
-  'run.corrected': ['runSeq', 'run'],
-  'baseline.accepted': ['family', 'electrodeId', 'runSeqs', 'pathIds', 'isOpening', 'isProvisional', 'setAfterPercent', 'values'],
-  'condition.logged': ['condition'],
-  'step.logged': ['stepId', 'label', 'since', 'isRisk', 'voidsDistances'],
-  'distances.measured': ['nerveId', 'positions'],
-  'notice.raised': ['*'],
-  'notice.settled': ['*'],
-  'alert.raised': ['*'],
-  'alert.worsened': ['*'],
-  'alert.located': ['*'],
-  'alert.recovered': ['*'],
-  'alert.withdrawn': ['*'],
-  'alert.told': ['alertId'],
-  'alert.read-back': ['alertId'],
-  'alert.acted': ['alertId', 'action'],
-  'alert.ended': ['alertId', 'outcome', 'cause'],
-  'case.closed': [],
+const wallFields: { readonly [K in EntryKind]?: AllowedOf<EntryBodies[K]> } = {
+  'case.planned': { plan },
+  'plan.revised': { plan },
+  'case.opened': { clockOffsetMs: true },
+  'timeout.confirmed': { side: true },
+  'phase.changed': { phase: true, reason: true },
+  'run.logged': run,
+  'run.judged': { runSeq: true, judgeVersion: true, paths: true, segments: true },
+  'run.corrected': { runSeq: true, run },
+  'baseline.accepted': {
+    family: true, electrodeId: true, runSeqs: true, pathIds: true, isOpening: true, isProvisional: true, setAfterPercent: true, values: true,
+  },
+  'condition.logged': { condition },
+  'step.logged': { stepId: true, label: true, since: true, isRisk: true, voidsDistances: true },
+  'distances.measured': { nerveId: true, positions: true },
+  'notice.raised': { ...evidence, repeatDueAt: true },
+  'notice.settled': { alertId: true, runSeq: true },
+  'alert.raised': { ...evidence, isRepeated: true },
+  'alert.worsened': { ...evidence, worsening: true },
+  'alert.located': { alertId: true, runSeq: true, location: true },
+  'alert.recovered': { alertId: true, runSeq: true, percentOfBaseline: true },
+  'alert.withdrawn': { alertId: true, runSeq: true },
+  'alert.told': { alertId: true },
+  'alert.read-back': { alertId: true },
+  'alert.acted': { alertId: true },
+  'alert.ended': { alertId: true, outcome: true, cause: true },
+  'case.closed': {},
 };
 
 /**
@@ -36,7 +67,7 @@ const wallFields: { readonly [K in EntryKind]?: readonly string[] } = {
  * @source house rule: no identity beyond theatre, procedure and side on the wall
  */
 export function wallEntry(entry: WireEntry): WireEntry {
-  const fields = wallFields[entry.kind as EntryKind];
+  const fields: Allowed | undefined = wallFields[entry.kind as EntryKind];
   return {
     ...entry,
     author: { id: '', role: entry.author.role, displayName: '' },
@@ -45,7 +76,11 @@ export function wallEntry(entry: WireEntry): WireEntry {
   };
 }
 
-function cut(body: Record<string, unknown>, fields: readonly string[]): Record<string, unknown> {
-  if (fields[0] === '*') return body;
-  return Object.fromEntries(fields.filter((field) => field in body).map((field) => [field, body[field]]));
+function cut(body: object, fields: Allowed): Record<string, unknown> {
+  const kept = Object.entries(body).filter(([field]) => Object.hasOwn(fields, field));
+  return Object.fromEntries(kept.map(([field, value]: [string, unknown]) => [field, cutValue(value, fields[field])]));
+}
+
+function cutValue(value: unknown, fields: true | Allowed | undefined): unknown {
+  return fields === true || fields === undefined || typeof value !== 'object' || value === null ? value : cut(value, fields);
 }
