@@ -11,7 +11,7 @@ import type {
   SessionReply,
 } from '@/lib/contracts/http/replies';
 import type { DemoPeopleReply, HealthReply, ReauthenticateReply, ScreensReply } from '@/lib/contracts/http/account';
-import type { SignInReply, SignInRequest } from '@/server/auth/sign-in-words';
+import type { SignInReply, SignInRequest } from '@/server/auth/sign-in-reply';
 
 /** Where a request came from. `address` is the socket's, set by the server itself. */
 export interface RequestSource {

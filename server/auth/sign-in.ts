@@ -5,7 +5,7 @@ import { insertSession } from '@/db/repositories/sessions/insert-session';
 import { checkCredentials } from '@/server/auth/check-credentials';
 import { sessionHours } from '@/server/auth/session-hours';
 import { failure } from '@/server/failure';
-import type { SignInReply, SignInRequest } from '@/server/auth/sign-in-words';
+import type { SignInReply, SignInRequest } from '@/server/auth/sign-in-reply';
 import type { ServerContext } from '@/server/server-context';
 
 /** E-mail, password and code give a session of one person. */

@@ -1,6 +1,6 @@
 'use client';
 
-import { useCallback, useEffect, useMemo, useRef, useState } from 'react';
+import { useEffect, useMemo, useRef, useState } from 'react';
 
 import { askBack } from '@/app/_features/log/ask-back';
 import type { FocusWish } from '@/app/_features/log/use-focus-wish';
@@ -8,16 +8,20 @@ import { useLogCase } from '@/app/_features/log/log-context';
 import { channelsOf, draftFor, isTouched, purposeFor, settingsFor, sitesOf, type ChannelDraft, type RunDraft } from '@/app/_features/log/run-draft';
 import { runFromDraft, type FieldSentences } from '@/app/_features/log/run-from-draft';
 import { serverNowMs } from '@/app/_live/use-now';
+import type { CaseState } from '@/lib/case/case-state';
 import { judgeInCase } from '@/lib/case/judge-in-case';
 import { momentOfMs } from '@/lib/units/moment-of-ms';
 
 /** A second Enter so soon after a run is the same hand, not a second run. */
 const sameHandMs = 800;
+
+/** The form of the next run as its parts see it. */
+export type RunFormParts = ReturnType<typeof useRunForm>;
+
 /** The next run: what is typed, what it would mean, and logging it exactly once. */
 export function useRunForm(wishFocus: (wish: FocusWish) => void) {
   const { state, give } = useLogCase();
-  const [draft, setDraft] = useState<RunDraft>(() => draftFor(state, sitesOf(state)[0]?.id ?? '', purposeFor(state)));
-  const [phaseSeen, setPhaseSeen] = useState(state.phase);
+  const [draft, setDraft] = useRunDraft(state);
   const [sentences, setSentences] = useState<FieldSentences>({});
   const [question, setQuestion] = useState<string | null>(null);
   const [hint, setHint] = useState<string | null>(null);
@@ -30,21 +34,16 @@ export function useRunForm(wishFocus: (wish: FocusWish) => void) {
     [read, state],
   );
 
-  // A new phase brings its own purpose; until then the person's choice stands.
-  if (phaseSeen !== state.phase) {
-    setPhaseSeen(state.phase);
-    setDraft({ ...draft, purpose: purposeFor(state) });
-  }
   useEffect(() => {
     isLocked.current = false;
   }, [draft]);
 
-  const change = useCallback((next: RunDraft) => {
+  const change = (next: RunDraft) => {
     setDraft(next);
     setSentences({});
     setQuestion(null);
     setHint(null);
-  }, []);
+  };
 
   const chooseSite = (siteId: string, wish: FocusWish) => {
     const kept = channelsOf(state, siteId).map((channel) => channel.id);
@@ -91,4 +90,15 @@ export function useRunForm(wishFocus: (wish: FocusWish) => void) {
     });
   };
   return { draft, channels, sentences, question, hint, judged, change, chooseSite, typeChannel, sameSettings, log, setQuestion, setHint };
+}
+
+/** What is typed of the next run. A new phase brings its own purpose; until then the person's choice stands. */
+function useRunDraft(state: CaseState): [RunDraft, (next: RunDraft) => void] {
+  const [draft, setDraft] = useState<RunDraft>(() => draftFor(state, sitesOf(state)[0]?.id ?? '', purposeFor(state)));
+  const [phaseSeen, setPhaseSeen] = useState(state.phase);
+  if (phaseSeen !== state.phase) {
+    setPhaseSeen(state.phase);
+    setDraft({ ...draft, purpose: purposeFor(state) });
+  }
+  return [draft, setDraft];
 }
