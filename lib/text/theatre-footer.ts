@@ -46,14 +46,22 @@ function toldFacts(state: CaseState, timeZone: string): readonly string[] {
 
 function nextFacts(state: CaseState, nowMs: number, timeZone: string): readonly string[] {
   if (state.status !== 'open' || state.phase !== 'monitoring') return [];
-  return atRisk(state).flatMap((nerve) => {
+  const facts = atRisk(state).flatMap((nerve) => {
     const status = nerveStatus(state, nerve, nowMs);
-    const next = status.untestedSiteIds[0];
+    const next = locatingSite(state, nerve.id, status.untestedSiteIds) ?? status.untestedSiteIds[0];
     if (next !== undefined) return [`First to test: ${siteName(state.plan, next)}`];
     if (status.oldestComparedAt === null) return [];
     const until = momentOfMs(msOfMoment(status.oldestComparedAt) + state.plan.rules.freshnessMinutes * 60_000);
     return [`Next test by ${clockTime(until, timeZone)}`];
   });
+  // Two nerves tested in the same minute say the same.
+  return [...new Set(facts)];
+}
+
+/** The untested site that would locate an open change: what the headline asks for, the footer asks for too. */
+function locatingSite(state: CaseState, nerveId: string, untested: readonly string[]): string | undefined {
+  const location = state.incidents[nerveId]?.location;
+  return location?.kind === 'not-known' ? untested.find((siteId) => siteId === location.nextSiteId) : undefined;
 }
 
 function cuffFacts(state: CaseState, nowMs: number): readonly string[] {

@@ -8,6 +8,7 @@ import type { Browser, Page } from 'playwright-core';
 
 import { sciaticAtHip } from '@/lib/reference/templates/sciatic-at-hip';
 import { ulnarAtElbow } from '@/lib/reference/templates/ulnar-at-elbow';
+import { connectViewer, type Viewer } from '@/tests/server/house/viewer';
 import { launchChromium } from '@/tests/support/chromium';
 import { DeskPerson } from '@/tests/support/desk-person';
 import { HttpDesk } from '@/tests/support/http-desk';
@@ -116,14 +117,26 @@ async function shootWall(browser: Browser, product: Product): Promise<void> {
   for (const { wall } of walls) await wall.code();
   await each('not-paired');
   for (const { wall } of walls) await http.pair(await wall.code());
+  let present = await beAtTheDesk(product, http);
   for (const { name, lead, play } of wallCourse) {
     await play(http);
     for (const { wall } of walls) await wall.waitForLead(lead);
     await each(name);
-    if (name === 'alert' || name === 'stable') await shootNotLive(product, walls, name);
+    if (name !== 'alert' && name !== 'stable') continue;
+    present.close();
+    await shootNotLive(product, walls, name);
+    present = await beAtTheDesk(product, http);
   }
+  present.close();
   await shootTwoNerves(browser, product);
   process.stdout.write(walls.flatMap(({ wall }) => wall.watched.errors()).map((error) => `${error}\n`).join(''));
+}
+
+/** A desk that is connected, so that the wall has nothing to say about it. */
+async function beAtTheDesk(product: Product, http: HttpDesk): Promise<Viewer> {
+  const viewer = await connectViewer(product, { cookie: http.cookie, viewer: 'desk' });
+  await viewer.follow(http.caseId);
+  return viewer;
 }
 
 async function shootNotLive(product: Product, walls: readonly { theme: string; wall: WallScreen }[], name: string): Promise<void> {
@@ -153,12 +166,14 @@ async function shootTwoNerves(browser: Browser, product: Product): Promise<void>
   await http.give({ name: 'change-phase', phase: 'monitoring', reason: null }, { agoS: 1900 });
   await http.step('reduction', { agoS: 120 });
   for (const agoS of [60, 30]) await runAll('check', agoS, { 'fibular-above-field': 0.33 });
+  const present = await beAtTheDesk(product, http);
   const walls = await Promise.all(themes.map(async (theme) => ({ theme, wall: await WallScreen.open(browser, product.url, `?theme=${theme}`) })));
   for (const { theme, wall } of walls) {
     await http.pair(await wall.code());
     await wall.waitForLead(/common fibular/i);
     await shoot(wall.page, 'wall-two-nerves', theme);
   }
+  present.close();
 }
 
 await mkdir(folder, { recursive: true });

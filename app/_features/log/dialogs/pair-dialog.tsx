@@ -51,7 +51,7 @@ export function PairDialog({ onClose }: { readonly onClose: () => void }) {
     <Dialog isOpen onOpenChange={(isOpen) => (isOpen ? undefined : onClose())} title="Pair a wall" description="Open /screen on the wall’s display. It shows a code and two words.">
       <form method="post" noValidate onSubmit={handleSubmit} className="flex flex-col gap-4">
         {words === null ? (
-          <Field label="Code on the wall" hint="Six letters or digits" value={code} maxLength={6} autoComplete="off" autoFocus className="w-56 font-mono uppercase" onChange={(event) => setCode(event.currentTarget.value)} />
+          <Field label="Code on the wall" hint="Six letters or digits" value={code} maxLength={6} autoComplete="off" autoFocus className="w-56 [&_input]:font-mono [&_input]:uppercase" onChange={(event) => setCode(event.currentTarget.value)} />
         ) : (
           <div>
             <p className="text-second">Read aloud and compare with the wall</p>
