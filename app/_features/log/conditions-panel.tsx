@@ -4,7 +4,6 @@ import { useLogCase } from '@/app/_features/log/log-context';
 import type { ConditionKind } from '@/app/_features/log/log-dialog';
 import { Panel } from '@/app/_features/log/panel';
 import { useNow } from '@/app/_live/use-now';
-import { Button } from '@/app/_ui/button';
 import { conditionWords } from '@/lib/text/condition-words';
 import { durationWords } from '@/lib/text/format';
 import { msOfMoment } from '@/lib/units/ms-of-moment';
@@ -18,16 +17,13 @@ const usual: readonly { readonly kind: ConditionKind; readonly name: string }[] 
 
 /** The newest of each condition with its age; what was never measured says so. */
 export function ConditionsPanel() {
-  const { state, head, openDialog } = useLogCase();
+  const { state } = useLogCase();
   const nowMs = useNow(1000);
   const others = Object.keys(state.conditions)
     .filter((kind) => !usual.some((row) => row.kind === kind))
     .map((kind) => ({ kind: kind as ConditionKind, name: '' }));
   return (
-    <Panel
-      title="Conditions"
-      action={state.status === 'open' && head.mayWrite ? <Button hotkey="C" onClick={() => openDialog({ kind: 'condition', condition: 'train-of-four' })}>Log</Button> : null}
-    >
+    <Panel title="Conditions">
       <table className="w-full">
         <caption className="sr-only">Conditions with their ages</caption>
         <tbody>

@@ -29,12 +29,14 @@ export function ConsoleBody({ areKeysOn }: { readonly areKeysOn: boolean }) {
         {isRunning ? <RunForm areKeysOn={areKeysOn} /> : null}
         <LogTable />
       </div>
-      <aside aria-label="State of the case" className="flex min-h-0 flex-col border-l border-rule lg:overflow-y-auto">
+      <aside aria-label="State of the case" className="flex min-h-0 flex-col border-l border-rule">
         <AlertBlocks />
-        <DuePanel />
+        <div className="min-h-24 flex-1 lg:overflow-y-auto">
+          <DuePanel />
+          <ConditionsPanel />
+          <MessagesPanel />
+        </div>
         <StepsPanel onProblem={setProblem} />
-        <ConditionsPanel />
-        <MessagesPanel />
       </aside>
     </div>
   );

@@ -29,10 +29,7 @@ export function useRunForm(wishFocus: (wish: FocusWish) => void) {
   const loggedAtMs = useRef(-Infinity);
   const channels = useMemo(() => channelsOf(state, draft.settings.siteId), [state, draft.settings.siteId]);
   const read = useMemo(() => runFromDraft(draft, channels), [draft, channels]);
-  const judged = useMemo(
-    () => (read.kind === 'run' ? judgeInCase(state, { at: momentOfMs(serverNowMs()), run: read.run }) : null),
-    [read, state],
-  );
+  const judged = useMemo(() => (read.kind === 'run' ? judgeInCase(state, { at: momentOfMs(serverNowMs()), run: read.run }) : null), [read, state]);
 
   useEffect(() => {
     isLocked.current = false;

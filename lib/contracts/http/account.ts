@@ -44,7 +44,9 @@ export const healthReplySchema = z.strictObject({
 
 export type ReauthenticateReply = z.infer<typeof reauthenticateReplySchema>;
 export type DemoPeopleReply = z.infer<typeof demoPeopleReplySchema>;
+/** One invented person with what is needed to sign in as them. */
 export type DemoPerson = DemoPeopleReply['people'][number];
 export type ScreensReply = z.infer<typeof screensReplySchema>;
+/** One wall that is or was bound to the case. */
 export type ScreenLine = ScreensReply['screens'][number];
 export type HealthReply = z.infer<typeof healthReplySchema>;
