@@ -13,7 +13,7 @@
 export const consoleKeys = {
   a: 'Surgeon’s action',
   b: 'Read back',
-  c: 'Conditions',
+  c: 'Condition',
   e: 'End',
   m: 'Message',
   n: 'No response',
