@@ -45,12 +45,9 @@ export async function openBarePages(browser: Browser): Promise<BarePages> {
 
 /** Stamps each Enter on its way down to whatever listens. */
 export async function stampEnter(page: Page): Promise<void> {
-  await page.evaluate(() => {
-    const listen = (event: KeyboardEvent) => {
-      if (event.key === 'Enter') Object.assign(window, { lastEnterMs: performance.timeOrigin + performance.now() });
-    };
-    window.addEventListener('keydown', listen, { capture: true });
-  });
+  await page.evaluate(() =>
+    window.addEventListener('keydown', (event) => void (event.key === 'Enter' && Object.assign(window, { lastEnterMs: performance.timeOrigin + performance.now() })), { capture: true }),
+  );
 }
 
 /** When the last Enter went down, in ms since 1970 by the machine's clock. */
@@ -65,11 +62,10 @@ export function lastEnterMs(page: Page): Promise<number> {
 export function paintOf(page: Page, selector: string, text: string): { isWatching: Promise<unknown>; atMs: Promise<number> } {
   const isWatching = page.evaluate(
     ([where, wanted]) => {
-      const stands = () => (document.querySelector(where!)?.textContent ?? '').replace(/\u00a0/g, ' ').includes(wanted!);
-      if (stands()) throw new Error(`"${wanted}" stands there before it was sent`);
+      if (document.querySelector(where)?.textContent?.replace(/\u00a0/g, ' ').includes(wanted) === true) throw new Error(`"${wanted}" stands there before it was sent`);
       const painted = new Promise<number>((tell) => {
         const observer = new MutationObserver(() => {
-          if (!stands()) return;
+          if (document.querySelector(where)?.textContent?.replace(/\u00a0/g, ' ').includes(wanted) !== true) return;
           observer.disconnect();
           requestAnimationFrame(() => requestAnimationFrame(() => tell(performance.timeOrigin + performance.now())));
         });
