@@ -9,7 +9,7 @@ import type { ServerContext } from '@/server/server-context';
 
 /** Sends committed entries to the viewers of their case: each once, in order, whoever wrote them. */
 export interface Pump {
-  /** Someone follows this case, having read up to this number. */
+  /** Someone follows this case, having read up to this number; it counts only where nobody followed before. */
   watch(caseId: string, readSeq: number): void;
   /** Nobody here follows it any more. */
   unwatch(caseId: string): void;
@@ -52,7 +52,10 @@ export function makePump(context: Context, io: LiveServer, onClosed: (caseId: st
   }
 
   return {
-    watch: (caseId, readSeq) => void sent.set(caseId, Math.max(sent.get(caseId) ?? 0, readSeq)),
+    watch(caseId, readSeq) {
+      // Others who follow it may not have what the newcomer has just read: the newcomer drops what comes twice.
+      if (!sent.has(caseId)) sent.set(caseId, readSeq);
+    },
     unwatch: (caseId) => void sent.delete(caseId),
     publish(caseId, entries) {
       const after = sent.get(caseId);
