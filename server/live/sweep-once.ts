@@ -11,7 +11,7 @@ import type { LiveServer, LiveSocket } from '@/server/live/live-socket';
 import { hospitalsOf } from '@/server/queries/open-case';
 import type { ServerContext } from '@/server/server-context';
 
-type Context = Pick<ServerContext, 'database' | 'memory'>;
+type Context = Pick<ServerContext, 'database' | 'memory' | 'log'>;
 
 /**
  * Holds every open socket against the database once a second, in three queries whatever their number: sessions and walls
@@ -57,10 +57,19 @@ async function describeCases(context: Context, caseIds: readonly string[], hospi
   for (const caseId of caseIds) {
     const ofCase = assigned.filter((one) => one.caseId === caseId);
     const hospitalId = ofCase[0]?.hospitalId;
-    const { state } = await context.memory.load(caseId);
     if (hospitalId === undefined) continue;
     const assignments = ofCase.map(({ personId, role }) => ({ personId, role: role as Role }));
-    resources.set(caseId, { kind: 'case', hospitalId, caseId, status: state.status, assignments });
+    resources.set(caseId, { kind: 'case', hospitalId, caseId, status: await statusOf(context, caseId), assignments });
   }
   return resources;
+}
+
+/** A case that this program cannot fold stays followed by those assigned to it, and holds up the sweep of no other. */
+async function statusOf({ memory, log }: Context, caseId: string): Promise<CaseResource['status']> {
+  try {
+    return (await memory.load(caseId)).state.status;
+  } catch (cause) {
+    log.warn({ err: cause, caseId }, 'The state of a followed case could not be read; it is taken as open.');
+    return 'open';
+  }
 }

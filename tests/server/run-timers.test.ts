@@ -5,6 +5,7 @@ import { runTimers } from '@/server/commands/run-timers';
 
 import { openSecondServer, type SecondServer } from './house/second-server';
 import { commit, planCaseAs, runCommand } from './house/client';
+import { appendNewerEntry } from './house/newer-entry';
 import { openTestHouse, type TestHouse } from './house/open-test-house';
 
 const desk = 'desk@demo.example';
@@ -52,5 +53,19 @@ describe('runTimers', () => {
     expect(kinds.filter((kind) => kind === 'alert.raised')).toEqual(['alert.raised']);
     const raised = await house.admin('entries').where({ case_id: caseId, kind: 'alert.raised' }).first('author_role', 'command_id', 'body');
     expect(raised).toMatchObject({ author_role: 'timer', command_id: expect.stringMatching(/^repeat\/ulnar-1\/\d+$/), body: { isRepeated: false } });
+  });
+
+  test('runs in every other case when one was written by a newer program', async () => {
+    const [server] = servers;
+    if (server === undefined) throw new Error('Three servers were opened.');
+    later.ms = 0;
+    const unread = await planCaseAs(house, desk);
+    await commit(house, desk, unread, { name: 'open-case', clockOffsetMs: null });
+    await appendNewerEntry(house, server, unread);
+    const caseId = await caseWithNotice();
+    expect(unread < caseId).toBe(true);
+    later.ms = 120_000;
+    await runTimers(server.context);
+    expect(await kindsOf(caseId)).toContain('alert.raised');
   });
 });
