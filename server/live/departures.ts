@@ -5,6 +5,8 @@ import type { Pump } from '@/server/live/pump';
 
 /** Every way in which following ends. */
 export interface Departures {
+  /** Out of the room of one case, untold. */
+  leave(socket: LiveSocket, caseId: string): void;
   /** One case of a socket: told, and out of its room. */
   endCase(socket: LiveSocket, caseId: string, reason: EndedMessage['reason']): void;
   /** The whole socket: told for each case, then closed. */
@@ -36,6 +38,7 @@ export function makeDepartures(io: LiveServer, presence: Presence, pump: Pick<Pu
   }
 
   return {
+    leave,
     endCase,
     cut,
     forget: (socket) => [...socket.data.caseIds].forEach((caseId) => leave(socket, caseId)),

@@ -2,6 +2,7 @@ import { noteScreenSeen } from '@/db/repositories/screens/note-screen-seen';
 import { withinHospitals } from '@/db/within-hospitals';
 import { followRequestSchema, type FollowReply } from '@/lib/contracts/channel/messages';
 import { contractVersion } from '@/lib/contracts/contract-version';
+import { decideAccess } from '@/lib/policy/decide-access';
 import { isFailure, notReadable } from '@/server/failure';
 import { roomOf, type LiveSocket } from '@/server/live/live-socket';
 import type { Departures } from '@/server/live/departures';
@@ -36,17 +37,20 @@ export async function follow(parts: FollowParts, socket: LiveSocket, message: un
   }
   try {
     const { visitor, isDesk } = socket.data;
-    await openCase(parts.context, visitor, { caseId, action: 'see-case', what: 'follow' });
+    const { resource } = await openCase(parts.context, visitor, { caseId, action: 'see-case', what: 'follow' });
     await socket.join(roomOf(caseId, visitor.kind));
     const page = await readPage(parts.context, visitor, { caseId, after, limit: largestPage });
     if (!socket.connected) throw new Error('The viewer left while the log was read.');
     parts.pump.watch(caseId, page.headSeq);
     socket.data.caseIds.add(caseId);
-    if (isNew) parts.presence.arrive(caseId, socket.id, { desk: isDesk, screenId: visitor.kind === 'screen' ? visitor.screenId : null });
+    // Whoever cannot write is no desk, whatever the page says of itself: a wall would call the case attended.
+    const desk = isDesk && decideAccess(visitor, 'write-case', resource).isAllowed;
+    if (isNew) parts.presence.arrive(caseId, socket.id, { desk, screenId: visitor.kind === 'screen' ? visitor.screenId : null });
     if (visitor.kind === 'screen') noteSeen(parts.context, visitor);
     return { kind: 'entries', ...page };
   } catch (cause) {
-    if (isNew) await socket.leave(roomOf(caseId, socket.data.visitor.kind));
+    // A socket that is gone left its rooms before it was joined to this one.
+    if (isNew || !socket.connected) parts.departures.leave(socket, caseId);
     if (isFailure(cause) && cause.reply.kind === 'not-found') return { kind: 'refused', code: 'not-found', message: cause.message };
     parts.context.log.warn({ err: cause, caseId }, 'A viewer could not follow.');
     return { kind: 'refused', code: 'not-saved', message: notReadable().message };
