@@ -63,6 +63,15 @@ describe('signing in', () => {
     expect([answer.status, answer.body]).toMatchObject([429, { kind: 'too-many', message: expect.stringMatching(/^Too many: 10 failed attempts/) }]);
   });
 
+  test('counts attempts side by side: of an account under any spelling, and of a machine under any account', async () => {
+    const spellings = Array.from({ length: 24 }, (_, index) => `${' '.repeat(index)}${index % 2 === 0 ? 'spaced' : 'Spaced'}@demo.example `);
+    const ofAccount = await Promise.all(spellings.map((email, index) => signIn(email, 'wrong', '000000', `198.51.100.${index}`)));
+    const emails = Array.from({ length: throttle.perAddress + 8 }, (_, index) => `machine-${index}@demo.example`);
+    const ofMachine = await Promise.all(emails.map((email) => signIn(email, 'wrong', '000000', '198.51.100.250')));
+    const taken = (answers: readonly { readonly status: number }[]) => answers.filter(({ status }) => status === 401).length;
+    expect([taken(ofAccount), taken(ofMachine)]).toEqual([throttle.perAccount, throttle.perAddress]);
+  });
+
   test('takes as long for an unknown person as for a known one', async () => {
     const timeOf = async (email: string) => {
       const begin = performance.now();
