@@ -4,7 +4,7 @@ import { actionForCommand } from '@/lib/policy/action-for-command';
 import { roleOfRule } from '@/lib/policy/rules';
 import { commandDigest } from '@/lib/record/command-digest';
 import type { SignedIn } from '@/server/auth/read-session';
-import { appendCommand } from '@/server/commands/append-command';
+import { appendCommand, repeatReply, type AllowedCommand } from '@/server/commands/append-command';
 import { endScreens } from '@/server/commands/end-screens';
 import { eventTimeProblem } from '@/server/commands/event-time-problem';
 import { openCase } from '@/server/queries/open-case';
@@ -15,9 +15,7 @@ export async function giveCommand(context: ServerContext, signedIn: SignedIn, ca
   const { session, actor } = signedIn;
   const { commandId, eventAt, command } = request;
   const opened = await openCase(context, actor, { caseId, action: actionForCommand(command.name), what: null });
-  const problem = eventTimeProblem(eventAt, context.nowMs());
-  if (problem !== null) throw problem;
-  const reply = await appendCommand(context, {
+  const allowed: AllowedCommand = {
     caseId,
     hospitalId: opened.row.hospitalId,
     commandId,
@@ -25,7 +23,12 @@ export async function giveCommand(context: ServerContext, signedIn: SignedIn, ca
     eventAt,
     author: { id: session.personId, role: roleOfRule(opened.rule) ?? 'person', displayName: session.displayName },
     command,
-  });
+  };
+  const problem = eventTimeProblem(eventAt, context.nowMs());
+  // What is in the log already was in time when it came, however late its answer is asked for again.
+  const repeated = problem === null ? null : await repeatReply(context, allowed);
+  if (problem !== null && repeated === null) throw problem;
+  const reply = repeated ?? (await appendCommand(context, allowed));
   if (command.name === 'close-case' && reply.kind === 'committed') await endScreens(context, opened.row.hospitalId, caseId);
   return reply;
 }
