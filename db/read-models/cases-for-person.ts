@@ -30,13 +30,15 @@ const LINES = `
   join lateral (select e.kind from entries e where e.case_id = c.id and e.kind in ('case.planned', 'case.opened', 'case.closed', 'case.sealed')
     order by e.seq desc limit 1) as life on true
   join lateral (select e.seq, e.recorded_at from entries e where e.case_id = c.id order by e.seq desc limit 1) as head on true
-  where exists (select from case_assignments a where a.case_id = c.id and a.person_id = :personId and a.to_at is null)
+  where exists (select from case_assignments a
+      join memberships m on m.hospital_id = a.hospital_id and m.person_id = a.person_id and m.role = a.role and m.revoked_at is null
+      where a.case_id = c.id and a.person_id = :personId and a.to_at is null)
     or (life.kind in ('case.closed', 'case.sealed') and exists (select from memberships m
       where m.hospital_id = c.hospital_id and m.person_id = :personId and m.role = 'reviewer' and m.revoked_at is null))
   order by head.recorded_at desc, c.id desc
   limit :limit`;
 
-/** Cases that a person is assigned to, and for a reviewer every closed one of the hospital; latest first. Run it within the person's hospitals. */
+/** Cases that a person is assigned to in a role they still have, and for a reviewer every closed one of the hospital; latest first. Run it within the person's hospitals. */
 export async function casesForPerson(handle: Handle, personId: string, limit: number): Promise<CaseLine[]> {
   const { rows } = await handle.raw<{ rows: CaseLine[] }>(LINES, { personId, limit });
   return rows;

@@ -66,6 +66,20 @@ describe('a case that is not theirs', () => {
   });
 });
 
+describe('the list of cases', () => {
+  test('ends with the role that opened a case, also for someone who has another role there', async () => {
+    const email = 'surgeon@demo.example';
+    const person = await house.admin('people').where({ email }).first('id');
+    const { hospital_id: hospitalId } = await house.admin('cases').where({ id: caseId }).first('hospital_id');
+    const listed = async () => ((await send(house, 'GET', '/api/cases', { cookie: await house.cookieOf(email) })).body as { cases: unknown[] }).cases.length;
+    await house.admin('case_assignments').insert({ hospital_id: hospitalId, case_id: caseId, person_id: person.id, role: 'surgeon' });
+    expect([await listed(), (await ask(email, caseId, ['GET', '', () => undefined])).status]).toEqual([1, 200]);
+    await house.admin('memberships').insert({ hospital_id: hospitalId, person_id: person.id, role: 'reviewer' });
+    await house.admin('memberships').where({ person_id: person.id, role: 'surgeon' }).update({ revoked_at: house.admin.fn.now() });
+    expect([await listed(), (await ask(email, caseId, ['GET', '', () => undefined])).status]).toEqual([0, 404]);
+  });
+});
+
 describe('the audit of reads', () => {
   const count = async (where: object) => Number((await house.admin('read_audit').where(where).count('* as count').first())?.count);
 
