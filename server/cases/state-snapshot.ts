@@ -20,6 +20,14 @@ export function writeSnapshot(hospitalId: string, { state, head }: KeptCase): Sn
 
 /** The kept case of a snapshot, or null when it does not say what its row says: the log is read instead. */
 export function readSnapshot(snapshot: Snapshot): KeptCase | null {
-  const { state, head } = JSON.parse(new TextDecoder().decode(snapshot.bytes)) as { state: CaseState; head: KeptCase['head'] };
-  return state.seq === snapshot.seq && head.seq === snapshot.seq && state.hash === head.hash ? { state, head } : null;
+  const { state, head } = parsed(snapshot.bytes);
+  return state?.seq === snapshot.seq && head?.seq === snapshot.seq && state.hash === head.hash ? { state, head } : null;
+}
+
+function parsed(bytes: Uint8Array): { state?: CaseState; head?: KeptCase['head'] } {
+  try {
+    return (JSON.parse(new TextDecoder().decode(bytes)) ?? {}) as { state?: CaseState; head?: KeptCase['head'] };
+  } catch {
+    return {};
+  }
 }
