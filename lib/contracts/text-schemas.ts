@@ -1,6 +1,7 @@
 import { z } from 'zod';
 
-const controlCharacter = /[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f]/;
+/** Also what turns the direction of writing: it would show the digits of a value in another order than they were typed. */
+const controlCharacter = /[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f-\u009f\u2028-\u202e\u2066-\u2069]/;
 
 /**
  * Text of a person: well-formed Unicode without control characters, trimmed.

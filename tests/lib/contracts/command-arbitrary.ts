@@ -11,7 +11,7 @@ export function within(name: BoundedQuantity): fc.Arbitrary<number> {
 }
 
 const orNull = <T>(arbitrary: fc.Arbitrary<T>) => fc.option(arbitrary, { nil: null });
-const text = (max: number) => fc.string({ unit: 'grapheme', minLength: 1, maxLength: max }).filter((one) => one.trim().length > 0 && one.length <= max && !/[\u0000-\u001f\u007f]/.test(one));
+const text = (max: number) => fc.string({ unit: 'grapheme', minLength: 1, maxLength: max }).filter((one) => one.trim().length > 0 && one.length <= max && !/[\p{Cc}\u2028-\u202e\u2066-\u2069]/u.test(one));
 /** Mostly what the plan has, now and then a stranger. */
 const known = (ids: readonly string[], stranger: string) => fc.oneof({ weight: 30, arbitrary: fc.constantFrom(...ids) }, { weight: 1, arbitrary: fc.constant(stranger) });
 const siteId = known(['axilla', 'above-elbow', 'below-elbow', 'wrist', 'median-wrist'], 'knee');
