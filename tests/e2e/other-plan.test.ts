@@ -39,7 +39,7 @@ async function replaceNerve({ page, button }: Pick<DeskPerson, 'page'> & { butto
   await page.getByRole('radio', { name: 'Right' }).check();
   await page.getByLabel('Theatre').selectOption('Theatre 5');
   await fill('Procedure', 'Radial nerve at the humerus');
-  await fill('Title on the wall', 'Right radial nerve, plate removal');
+  await fill('Title of the case', 'Right radial nerve, plate removal');
   await page.getByRole('group', { name: 'Nerve 1' }).getByLabel('Nerve', { exact: true }).fill('Radial');
   await button('Remove site Wrist').click();
   for (const site of sites) {

@@ -41,7 +41,7 @@ export function CaseFields({ theatreNames, onTemplate }: CaseFieldsProps) {
           <Choice legend="Side" options={sides} value={side} onChoose={chooseSide} />
           <SelectField label="Theatre" {...register('plan.theatre')} options={theatreNames.map((name) => ({ value: name, label: name }))} />
           <PlanField name="plan.procedure" label="Procedure" />
-          <PlanField name="plan.title" label="Title on the wall" className="lg:col-span-2" />
+          <PlanField name="plan.title" label="Title of the case" className="lg:col-span-2" />
         </div>
       </Section>
       <Section title="Patient" text="Stays out of the log: it holds a sealed fingerprint only. The wall never shows it.">
