@@ -31,6 +31,8 @@ async function shoot(page: Page, name: string, theme: string): Promise<void> {
   for (const [widthPx, heightPx] of sizes) {
     await page.setViewportSize({ width: widthPx, height: heightPx });
     await page.evaluate(() => document.fonts.ready);
+    // A wall sets its type anew after each change of size; what is still cut after that is named below.
+    await page.waitForFunction(() => (document.querySelector('main.wall')?.scrollHeight ?? 0) <= window.innerHeight + 1, null, { timeout: 3000 }).catch(() => undefined);
     await page.waitForTimeout(150);
     const cut = await page.evaluate(() => {
       const wall = document.querySelector('main.wall') ?? document.documentElement;
