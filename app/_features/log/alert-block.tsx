@@ -18,17 +18,18 @@ export function AlertBlocks() {
   const { state } = useLogCase();
   const incidents = incidentsInOrder(state);
   return (
-    <div aria-live="assertive" aria-atomic="false" className="shrink-0 lg:max-h-3/5 lg:overflow-y-auto">
-      {incidents.map((incident, index) => <AlertBlock key={incident.alertId} incident={incident} hasKeys={index === 0} />)}
+    <div aria-live="assertive" aria-atomic="false" className="shrink-0 lg:max-h-1/2 lg:overflow-y-auto">
+      {incidents.map((incident, index) => <AlertBlock key={incident.alertId} incident={incident} isFirst={index === 0} />)}
     </div>
   );
 }
 
-function AlertBlock({ incident, hasKeys }: { readonly incident: Incident; readonly hasKeys: boolean }) {
+/** The first in full; those below it by headline, state and controls, so that all of them stand on the page. */
+function AlertBlock({ incident, isFirst }: { readonly incident: Incident; readonly isFirst: boolean }) {
   const { state, timeZone, head, openDialog } = useLogCase();
   const nowMs = useNow(1000);
   const line = incidentLine(state, incident, timeZone);
-  const key = (letter: string) => (hasKeys ? letter : null);
+  const key = (letter: string) => (isFirst ? letter : null);
   const open = (kind: 'told' | 'read-back' | 'action' | 'end') => () => openDialog({ kind, alertId: incident.alertId });
   return (
     <Band priority={line.priority ?? 'none'} aria-label={line.headline} className="border-b border-rule px-5 py-3">
@@ -37,10 +38,14 @@ function AlertBlock({ incident, hasKeys }: { readonly incident: Incident; readon
         {line.headline}
       </h2>
       <p className="mt-0.5 text-sm font-semibold">{`${incident.level === 'alert' ? 'Alert' : 'Notice'} for ${durationWords(nowMs - msOfMoment(incident.raisedAt))}. ${handlingWords(incident, timeZone)}`}</p>
-      <p className="mt-1">{line.detail}</p>
-      <SayLine words={sayThis(state, incident)} />
+      {isFirst ? (
+        <>
+          <p className="mt-1">{line.detail}</p>
+          <SayLine words={sayThis(state, incident)} />
+        </>
+      ) : null}
       {head.mayWrite ? (
-        <div className="flex flex-wrap gap-1.5">
+        <div className="mt-1.5 flex flex-wrap gap-1.5">
           <Button variant={incident.toldAt === null ? 'primary' : 'quiet'} hotkey={key('T')} onClick={open('told')}>{actionNames.told}</Button>
           <Button hotkey={key('B')} onClick={open('read-back')} disabled={incident.toldAt === null}>{actionNames.readBack}</Button>
           <Button hotkey={key('A')} onClick={open('action')}>{actionNames.acted}</Button>

@@ -5,11 +5,11 @@ import { useHotkeys, type Hotkeys } from '@/app/_features/log/use-hotkeys';
 import { worstIncident } from '@/app/_features/log/worst-incident';
 
 /** Keys of the console outside the run form: the open alert, steps, conditions, messages, and the list of keys. */
-export function useConsoleKeys(areKeysOn: boolean, onProblem: (problem: string | null) => void): void {
+export function useConsoleKeys(areKeysOn: boolean, onProblem: (problem: string | null) => void, onHint: (hint: string) => void): void {
   const { state, give, openDialog } = useLogCase();
   const incident = worstIncident(state);
   const onAlert = (kind: 'told' | 'read-back' | 'action' | 'end') => () => {
-    if (incident === null) onProblem('No alert is open');
+    if (incident === null) onHint('No alert is open');
     else openDialog({ kind, alertId: incident.alertId });
   };
   const steps: Hotkeys = Object.fromEntries(
@@ -35,6 +35,6 @@ export function useConsoleKeys(areKeysOn: boolean, onProblem: (problem: string |
         }
       : { '?': () => openDialog({ kind: 'keys' }) },
     areKeysOn,
-    (key) => onProblem(`Key ${key.toUpperCase()} not taken: a number is half typed. Leave its field first, with Tab`),
+    (key) => onHint(`Key ${key.toUpperCase()} not taken: a number is half typed. Leave its field first, with Tab`),
   );
 }
