@@ -18,7 +18,7 @@ export function AlertBlocks() {
   const { state } = useLogCase();
   const incidents = incidentsInOrder(state);
   return (
-    <div aria-live="assertive" aria-atomic="false" className="shrink-0 lg:max-h-1/2 lg:overflow-y-auto">
+    <div aria-live="assertive" aria-atomic="false" className="shrink-0 lg:max-h-[58%] lg:overflow-y-auto">
       {incidents.map((incident, index) => <AlertBlock key={incident.alertId} incident={incident} isFirst={index === 0} />)}
     </div>
   );
