@@ -99,5 +99,8 @@ export type Location =
   | { readonly kind: 'outside' }
   | { readonly kind: 'not-known'; readonly nextSiteId: string | null };
 
-/** The judge's version, written into every judgement; replay is equal within one version. */
+/**
+ * The judge's version, written into every judgement; replay is equal within one version.
+ * @source house rule: a whole number from 1, raised when the same runs would be judged otherwise
+ */
 export const judgeVersion = 1;

@@ -1,6 +1,9 @@
 import type { EntryKind } from '@/lib/case/entry-bodies';
 
-/** Every entry kind with the newest version this program can read. Older versions are brought up by upcasters. */
+/**
+ * Every entry kind with the newest version this program can read. Older versions are brought up by upcasters.
+ * @source house rule: kinds are for ever; versions are whole numbers from 1
+ */
 export const knownKinds: { readonly [K in EntryKind]: number } = {
   'case.planned': 1,
   'plan.revised': 1,

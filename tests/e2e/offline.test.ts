@@ -106,6 +106,8 @@ describe('what waits belongs to its person', () => {
     await desk.watched.context.clearCookies();
     const other = await desk.openTab();
     other.watched.expectError(/status of 404/);
+    // The page closes its own socket when the signed-in person changes, be it still connecting.
+    other.watched.expectError(/WebSocket is closed before the connection is established/);
     await other.signIn('Neurophysiologist, other hospital');
     await other.goTo(`/cases/${http.caseId}/log`);
     await other.page.getByRole('heading', { name: 'Not found' }).waitFor();

@@ -3,9 +3,6 @@ import type { Browser, BrowserContext, BrowserContextOptions, Page } from 'playw
 /** How long anything on a page may take before the test gives up. */
 const patienceMs = 15_000;
 
-/** Chromium's word when the page itself closes a socket that is still connecting, as a change of the signed-in person does. */
-const ownCloseWords = /WebSocket is closed before the connection is established/;
-
 /** A page whose console is watched: what Chromium calls an error is one, unless the test said before that it will come. */
 export interface WatchedPage {
   readonly page: Page;
@@ -22,7 +19,6 @@ export function watchPage(page: Page): WatchedPage {
   const expected: RegExp[] = [];
   const note = (words: string) => void errors.push(`${new URL(page.url()).pathname}: ${words}`);
   page.on('console', (message) => {
-    if (message.type() === 'warning' && ownCloseWords.test(message.text())) return;
     if (message.type() === 'error' || message.type() === 'warning') note(`${message.type()}: ${message.text()} (${message.location().url})`);
   });
   page.on('pageerror', (error) => note(`uncaught: ${error.message}`));
