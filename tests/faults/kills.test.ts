@@ -62,20 +62,12 @@ async function log(): Promise<LogRow[]> {
   return rows.map((row) => ({ seq: Number(row.seq), commandId: row.command_id, commandPart: row.command_part }));
 }
 
-/** The longest time that the wall stayed uncovered after the moment of a kill and before it was covered. */
-async function uncoveredAfterMs(killedAtMs: number): Promise<number> {
-  const after = (await wall.samples()).filter((sample) => sample.atMs >= killedAtMs);
-  const covered = after.find((sample) => sample.cover === 1);
-  return (covered?.atMs ?? Number.POSITIVE_INFINITY) - killedAtMs;
-}
-
 async function killAndRecover(kill: () => Promise<void>, recover: () => Promise<void>): Promise<{ wasInFlight: boolean; notLiveAfterMs: number }> {
   const before = writer.acknowledged().length;
   const wasInFlight = await commandInFlight();
   await kill();
   const killedAtMs = Date.now();
-  await wall.waitUntilNotLive(10_000);
-  const notLiveAfterMs = await uncoveredAfterMs(killedAtMs);
+  const notLiveAfterMs = (await wall.notLiveSince(killedAtMs, 10_000)) - killedAtMs;
   await recover();
   await wall.waitUntilLive(20_000);
   await expect.poll(() => writer.acknowledged().length, { timeout: 20_000 }).toBeGreaterThan(before + 1);

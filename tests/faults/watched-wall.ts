@@ -17,7 +17,8 @@ export interface WatchedWall {
   samples(): Promise<readonly WallSample[]>;
   /** Resolves when the wall shows its case uncovered; rejects after `withinMs`. */
   waitUntilLive(withinMs: number): Promise<void>;
-  waitUntilNotLive(withinMs: number): Promise<void>;
+  /** Resolves with the moment of the first covered sample at or after `sinceMs`; rejects after `withinMs`. */
+  notLiveSince(sinceMs: number, withinMs: number): Promise<number>;
 }
 
 /** Opens a wall, pairs it with the case as the desk does, and starts sampling. */
@@ -41,18 +42,25 @@ export async function openWatchedWall(browser: Browser, product: Pick<Product, '
     }, 50);
   });
   const samples = () => page.evaluate(() => (window as unknown as { wallSamples: WallSample[] }).wallSamples);
-  const waitUntil = async (isLive: boolean, withinMs: number) => {
-    const wanted = isLive ? 0 : 1;
+  const waitUntilLive = async (withinMs: number) => {
     await page.waitForFunction(
-      (cover) => {
+      () => {
         const layer = document.querySelector('[data-live]');
-        return layer !== null && document.querySelectorAll('.wall').length > 1 && Number(getComputedStyle(layer).opacity) === cover;
+        return layer !== null && document.querySelectorAll('.wall').length > 1 && Number(getComputedStyle(layer).opacity) === 0;
       },
-      wanted,
+      null,
       { timeout: withinMs, polling: 50 },
     );
   };
-  return { page, samples, waitUntilLive: (withinMs) => waitUntil(true, withinMs), waitUntilNotLive: (withinMs) => waitUntil(false, withinMs) };
+  const notLiveSince = async (sinceMs: number, withinMs: number) => {
+    const covered = await page.waitForFunction(
+      (since) => (window as unknown as { wallSamples: WallSample[] }).wallSamples.find((sample) => sample.atMs >= since && sample.cover === 1)?.atMs,
+      sinceMs,
+      { timeout: withinMs, polling: 50 },
+    );
+    return (await covered.jsonValue()) as number;
+  };
+  return { page, samples, waitUntilLive, notLiveSince };
 }
 
 /** The code is read from the wall's own text, as a person would read it aloud. */
