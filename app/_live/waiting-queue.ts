@@ -7,6 +7,8 @@ import type { CommandReply, WireEntry } from '@/lib/contracts/http/replies';
 const answerWithinMs = 5000;
 const firstRetryMs = 250;
 const lastRetryMs = 5000;
+/** How long a command that can leave at once stays unshown, so that drawing it does not hold up its sending. */
+const sendFirstMs = 40;
 
 /** What the queue needs of its surroundings. */
 export interface QueueParts {
@@ -39,6 +41,7 @@ export class WaitingQueue {
   private readonly asked = new Set<string>();
   private readonly draining = new Set<string>();
   private readonly settled = new Map<string, (reply: CommandReply) => void>();
+  private readonly leaving = new Map<string, () => void>();
 
   constructor(private readonly parts: QueueParts) {
     parts.tabs.hear((message) => {
@@ -63,9 +66,17 @@ export class WaitingQueue {
   async add(command: NewWaitingCommand): Promise<void> {
     if (this.personId === null) throw new Error('Not signed in: sign in to log entries');
     const added = await this.parts.store.add({ ...command, personId: this.personId, status: 'waiting', refusal: null });
-    this.show([...this.commands, added]);
-    this.parts.tabs.tell({ kind: 'waiting-changed', personId: added.personId });
+    const left = new Promise<void>((tell) => this.leaving.set(added.commandId, tell));
     void this.drainCase(added.caseId);
+    if (this.parts.isReady()) await Promise.race([left, this.parts.wait(sendFirstMs)]);
+    this.leaving.delete(added.commandId);
+    this.showAdded(added);
+    this.parts.tabs.tell({ kind: 'waiting-changed', personId: added.personId });
+  }
+
+  private showAdded(added: WaitingCommand): void {
+    const isKnown = this.gone.has(added.commandId) || this.commands.some((one) => one.commandId === added.commandId);
+    if (!isKnown && added.personId === this.personId) this.show([...this.commands, added]);
   }
 
   /** The reply of a command, once there is one. Ask before adding. */
@@ -122,7 +133,9 @@ export class WaitingQueue {
     const { commandId, eventAt, command } = await this.withServerTime(first);
     // The person or the link may have changed while the store was read.
     if (first.personId !== this.personId || !this.parts.isReady()) return 'none';
-    const answer = await this.parts.request({ caseId, commandId, eventAt, command }, answerWithinMs).catch(() => null);
+    const asked = this.parts.request({ caseId, commandId, eventAt, command }, answerWithinMs);
+    this.leaving.get(commandId)?.();
+    const answer = await asked.catch(() => null);
     const reply = readCommandReply(answer);
     if (reply === null) return 'retry';
     await this.settle(first, reply);

@@ -14,7 +14,7 @@ import type { ServerContext } from '@/server/server-context';
 export async function giveCommand(context: ServerContext, signedIn: SignedIn, caseId: string, request: CommandRequest): Promise<CommandReply> {
   const { session, actor } = signedIn;
   const { commandId, eventAt, command } = request;
-  const opened = await openCase(context, actor, { caseId, action: actionForCommand(command.name), what: null });
+  const opened = await openCase(context, actor, { caseId, action: actionForCommand(command.name), what: null, isForAppend: true });
   const allowed: AllowedCommand = {
     caseId,
     hospitalId: opened.row.hospitalId,

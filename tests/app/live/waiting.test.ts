@@ -36,6 +36,26 @@ describe('LiveClient sends commands', () => {
     expect(server.arrived).toHaveLength(1);
   });
 
+  it('sends before it shows what waits, so that drawing it holds nothing up', async () => {
+    const server = new FakeServer(caseId, entries);
+    const tab = await desk(freshBrowser(), server);
+    const inFlightWhenShown: number[] = [];
+    tab.watch(({ waiting }) => waiting.length > 0 && inFlightWhenShown.push(server.commandsInFlight));
+    server.faults = ['lose-answer'];
+    await tab.client.send(caseId, say('Now'));
+    expect(inFlightWhenShown[0]).toBe(1);
+  });
+
+  it('shows what cannot be sent at once', async () => {
+    const server = new FakeServer(caseId, entries);
+    const tab = await desk(freshBrowser(), server);
+    server.stop();
+    await until(() => !tab.store().link.isConnected);
+    expect((await tab.client.send(caseId, say('Later'))).kind).toBe('waiting');
+    expect(tab.store().waiting).toMatchObject([{ status: 'waiting', command: { text: 'Later' } }]);
+    expect(server.arrived).toEqual([]);
+  });
+
   it('sends in the order of giving and one at a time', async () => {
     const server = new FakeServer(caseId, entries);
     const tab = await desk(freshBrowser(), server);
