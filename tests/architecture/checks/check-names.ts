@@ -54,6 +54,7 @@ export const startedPrograms: Readonly<Record<string, string>> = {
   'server/setup/with-packages.mjs': 'npm test',
   'server/setup/build-product.ts': 'npm run build',
   'server/setup/verify.ts': 'npm run verify',
+  'server/setup/database/run-migrations.ts': 'started by migrate-database.ts',
   'server/setup/psql.ts': 'npm run psql',
   'server/auth/print-code.ts': 'npm run code',
 };
