@@ -18,8 +18,9 @@ export interface CaseLine {
 }
 
 // Only the few lifecycle entries of a case are read, by their own index, and the head: a long case costs no more.
+// An open case is never cut off by newer ones that are closed.
 const LINES = `
-  select c.id as "caseId", c.hospital_id as "hospitalId", h.name as "hospitalName", h.time_zone as "timeZone", c.reference,
+  select count(*) over () as total, c.id as "caseId", c.hospital_id as "hospitalId", h.name as "hospitalName", h.time_zone as "timeZone", c.reference,
     planned.plan->>'title' as title, planned.plan->>'procedure' as procedure, planned.plan->>'side' as side, planned.plan->>'theatre' as theatre,
     case life.kind when 'case.opened' then 'open' when 'case.closed' then 'closed' when 'case.sealed' then 'sealed' else 'planned' end as status,
     c.created_at as "plannedAt", head.recorded_at as "lastEntryAt", head.seq as "lastSeq"
@@ -35,11 +36,17 @@ const LINES = `
       where a.case_id = c.id and a.person_id = :personId and a.to_at is null)
     or (life.kind in ('case.closed', 'case.sealed') and exists (select from memberships m
       where m.hospital_id = c.hospital_id and m.person_id = :personId and m.role = 'reviewer' and m.revoked_at is null))
-  order by head.recorded_at desc, c.id desc
+  order by (life.kind = 'case.opened') desc, head.recorded_at desc, c.id desc
   limit :limit`;
 
-/** Cases that a person is assigned to in a role they still have, and for a reviewer every closed one of the hospital; latest first. Run it within the person's hospitals. */
-export async function casesForPerson(handle: Handle, personId: string, limit: number): Promise<CaseLine[]> {
-  const { rows } = await handle.raw<{ rows: CaseLine[] }>(LINES, { personId, limit });
-  return rows;
+/** The first lines of a list, and how many the whole list has. */
+export interface CaseLines {
+  readonly lines: readonly CaseLine[];
+  readonly total: number;
+}
+
+/** Cases that a person is assigned to in a role they still have, and for a reviewer every closed one of the hospital; open ones first, then the latest. Run it within the person's hospitals. */
+export async function casesForPerson(handle: Handle, personId: string, limit: number): Promise<CaseLines> {
+  const { rows } = await handle.raw<{ rows: (CaseLine & { readonly total: number })[] }>(LINES, { personId, limit });
+  return { lines: rows.map(({ total: _total, ...line }) => line), total: rows[0]?.total ?? 0 };
 }

@@ -1,4 +1,5 @@
 import { casesForPerson } from '@/db/read-models/cases-for-person';
+import { noteRead } from '@/db/repositories/reads/note-read';
 import { withinHospitals } from '@/db/within-hospitals';
 import type { CaseListReply } from '@/lib/contracts/http/replies';
 import { decideAccess } from '@/lib/policy/decide-access';
@@ -7,12 +8,18 @@ import type { ServerContext } from '@/server/server-context';
 
 const mostCases = 200;
 
-/** The list of cases of a signed-in person, in the hospitals where the policy lets them list any. */
-export async function casesForActor(context: Pick<ServerContext, 'database'>, { actor }: SignedIn): Promise<CaseListReply> {
-  const hospitalIds = [...new Set(actor.memberships.map((membership) => membership.hospitalId))].filter(
-    (hospitalId) => decideAccess(actor, 'list-cases', { kind: 'hospital', hospitalId }).isAllowed,
-  );
-  if (hospitalIds.length === 0) return { cases: [] };
-  const lines = await withinHospitals(context.database.app, hospitalIds, (transaction) => casesForPerson(transaction, actor.personId, mostCases));
-  return { cases: lines.map(({ hospitalId: _hospital, status, ...line }) => ({ ...line, status: status === 'sealed' ? 'closed' : status })) };
+/**
+ * The list of cases of a signed-in person, in the hospitals where the policy lets them list any. Each hospital's audit
+ * gets a row: the list names procedures of its cases.
+ */
+export async function casesForActor({ database }: Pick<ServerContext, 'database'>, { actor }: SignedIn): Promise<CaseListReply> {
+  const hospitalIds = [...new Set(actor.memberships.map((membership) => membership.hospitalId))];
+  const decided = hospitalIds.map((hospitalId) => ({ hospitalId, ...decideAccess(actor, 'list-cases', { kind: 'hospital', hospitalId }) }));
+  const allowed = decided.filter(({ isAllowed }) => isAllowed);
+  if (allowed.length === 0) return { cases: [], total: 0 };
+  const { lines, total } = await withinHospitals(database.app, allowed.map(({ hospitalId }) => hospitalId), (transaction) => casesForPerson(transaction, actor.personId, mostCases));
+  for (const { hospitalId, rule } of allowed) {
+    await noteRead(database.app, { hospitalId, personId: actor.personId, screenId: null, caseId: null, what: 'cases', outcome: 'allowed', rule });
+  }
+  return { cases: lines.map(({ hospitalId: _hospital, status, ...line }) => ({ ...line, status: status === 'sealed' ? 'closed' : status })), total };
 }

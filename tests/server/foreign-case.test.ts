@@ -45,7 +45,8 @@ describe('a case that is not theirs', () => {
   test('is not in their list, and is in its owner\'s', async () => {
     for (const [email, count] of [['desk@other.example', 0], ['physician@demo.example', 0], ['admin@demo.example', 0], ['desk@demo.example', 1]] as const) {
       const { body } = await send(house, 'GET', '/api/cases', { cookie: await house.cookieOf(email) });
-      expect([email, (body as { cases: unknown[] }).cases.length]).toEqual([email, count]);
+      const { cases, total } = body as { cases: unknown[]; total: number };
+      expect([email, cases.length, total]).toEqual([email, count, count]);
     }
   });
 
@@ -87,6 +88,16 @@ describe('the audit of reads', () => {
     const before = await count({ case_id: caseId, what: 'entries', outcome: 'allowed', rule: 'neurophysiologist-of-the-case' });
     for (let read = 0; read < 5; read += 1) await ask('desk@demo.example', caseId, ['GET', '/entries', () => undefined]);
     expect(await count({ case_id: caseId, what: 'entries', outcome: 'allowed', rule: 'neurophysiologist-of-the-case' })).toBe(before + 5);
+  });
+
+  test('has one row for each list of cases, in each hospital whose cases it may name', async () => {
+    const listed = { what: 'cases', outcome: 'allowed', case_id: null };
+    const before = await count(listed);
+    for (let read = 0; read < 3; read += 1) await send(house, 'GET', '/api/cases', { cookie: await house.cookieOf('desk@demo.example') });
+    expect(await count({ ...listed, rule: 'neurophysiologist-of-the-hospital' })).toBeGreaterThanOrEqual(3);
+    expect(await count(listed)).toBe(before + 3);
+    await send(house, 'GET', '/api/cases', { cookie: await house.cookieOf('admin@demo.example') });
+    expect(await count(listed)).toBe(before + 3);
   });
 
   test('has a row for the identity and for each refusal', async () => {

@@ -25,6 +25,7 @@ export function CaseList() {
   const rows = [...(cases.data?.cases ?? [])].sort(
     (first, second) => order[first.status] - order[second.status] || second.lastEntryAt.localeCompare(first.lastEntryAt),
   );
+  const total = cases.data?.total ?? 0;
   const hospitals = new Set(rows.map((row) => row.hospitalName));
   return (
     <>
@@ -60,6 +61,7 @@ export function CaseList() {
             </tbody>
           </Table>
         ) : null}
+        {rows.length < total ? <p className="mt-4 text-second">{`Cut: ${rows.length} of ${total} cases stand here, the open ones and those with the newest entries.`}</p> : null}
       </div>
     </>
   );

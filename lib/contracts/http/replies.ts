@@ -49,8 +49,8 @@ export const caseLineSchema = z.strictObject({
   timeZone: z.string(),
 });
 
-/** The cases a person may see. */
-export const caseListReplySchema = z.strictObject({ cases: z.array(caseLineSchema) });
+/** The cases a person may see: the open ones and then the newest, cut at a number; `total` says how many there are. */
+export const caseListReplySchema = z.strictObject({ cases: z.array(caseLineSchema), total: z.int().min(0) });
 
 /** The head of one case for its page: what is not in the log, for people who may read it. */
 export const caseHeadReplySchema = z.strictObject({

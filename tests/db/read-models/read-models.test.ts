@@ -17,18 +17,25 @@ beforeAll(async () => {
 });
 afterAll(() => db.drop());
 
-const listFor = (personId: string) => withinHospitals(db.database.app, [db.hospital.id], (transaction) => casesForPerson(transaction, personId, 50));
+const readList = (personId: string, limit: number) => withinHospitals(db.database.app, [db.hospital.id], (transaction) => casesForPerson(transaction, personId, limit));
+const listFor = async (personId: string) => (await readList(personId, 50)).lines;
 
 describe('casesForPerson', () => {
-  test('lists the assigned cases with what the plan and the last entry say, latest first', async () => {
+  test('lists the assigned cases with what the plan and the last entry say, open ones first, then the latest', async () => {
     const lines = await listFor(db.hospital.deskId);
     expect(lines.map(({ caseId, status, lastSeq }) => [caseId, status, lastSeq])).toEqual([
+      [cases.get('open'), 'open', 3],
       [cases.get('sealed'), 'sealed', 5],
       [cases.get('closed'), 'closed', 3],
-      [cases.get('open'), 'open', 3],
       [cases.get('planned'), 'planned', 1],
     ]);
-    expect(lines[0]).toMatchObject({ ...PLAN, hospitalId: db.hospital.id, hospitalName: 'Hospital north', timeZone: 'Europe/London', lastEntryAt: '2027-03-14T10:00:05.000Z' });
+    expect(lines[1]).toMatchObject({ ...PLAN, hospitalId: db.hospital.id, hospitalName: 'Hospital north', timeZone: 'Europe/London', lastEntryAt: '2027-03-14T10:00:05.000Z' });
+  });
+
+  test('that is cut keeps the open cases and says how many there are', async () => {
+    const { lines, total } = await readList(db.hospital.deskId, 2);
+    expect([lines.map(({ caseId }) => caseId), total]).toEqual([[cases.get('open'), cases.get('sealed')], 4]);
+    expect(await readList(db.other.deskId, 2)).toEqual({ lines: [], total: 0 });
   });
 
   test('gives a reviewer the closed and sealed cases of the hospital, and a stranger none', async () => {
