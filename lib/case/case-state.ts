@@ -1,5 +1,5 @@
 import type { Location, FindingKind, NotComparedReason, PathChange, SegmentJudgement, Finding } from '@/lib/alert/judgement';
-import type { BaselineValues, Condition, Phase } from '@/lib/case/entry-bodies';
+import type { BaselineValues, Condition, Phase, TeamMember } from '@/lib/case/entry-bodies';
 import type { BaselineFamily, CasePlan } from '@/lib/case/plan';
 import type { RunBody } from '@/lib/case/run-body';
 import type { Reading } from '@/lib/response/reading';
@@ -45,6 +45,8 @@ export interface Baseline extends BaselineValues {
   readonly family: BaselineFamily;
   readonly seq: number;
   readonly setAfterPercent: number | null;
+  /** Accepted by the desk alone; a physician's acceptance ends it. */
+  readonly isProvisional: boolean;
   readonly isMarkedByCorrection: boolean;
 }
 
@@ -77,6 +79,10 @@ export interface Incident {
   /** When the first abnormal run arrived: later than it was made when the desk had no link or the entry came late. */
   readonly receivedAt: string;
   readonly raisedAt: string;
+  /** Number of the entry that raised it or made it worse last: what a wall confirms to have painted. */
+  readonly raisedSeq: number;
+  /** When a wall had painted that entry; null while none has said so. */
+  readonly paintedAt: string | null;
   readonly repeatDueAt: string | null;
   readonly pathIds: readonly string[];
   readonly worstPercentOfBaseline: number | null;
@@ -105,6 +111,15 @@ export interface KeptCondition {
   readonly seq: number;
   readonly at: string;
   readonly condition: Condition;
+}
+
+/** Advice of the physician as the state keeps it: what waits for the desk, and the newest few that do not. */
+export interface KeptAdvice {
+  readonly seq: number;
+  readonly at: string;
+  readonly text: string;
+  readonly byRole: string;
+  readonly confirmedAt: string | null;
 }
 
 /** An alert that was taken back because its entry was corrected. */
@@ -141,4 +156,8 @@ export interface CaseState {
   readonly alertCounts: Readonly<Record<string, number>>;
   readonly withdrawn: readonly WithdrawnAlert[];
   readonly runCount: number;
+  readonly team: readonly TeamMember[];
+  readonly advice: readonly KeptAdvice[];
+  /** The oldest message of each role that nobody of another role has answered. */
+  readonly unanswered: Readonly<Record<string, { readonly seq: number; readonly at: string }>>;
 }

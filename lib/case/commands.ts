@@ -1,10 +1,16 @@
-import type { AlertCause, Condition, Phase } from '@/lib/case/entry-bodies';
+import type { AlertCause, Condition, Examination, Phase, TeamMember } from '@/lib/case/entry-bodies';
 import type { BaselineFamily, CasePlan } from '@/lib/case/plan';
 import type { RunBody } from '@/lib/case/run-body';
 
 /** What a person, or a timer of the server, asks of a case. */
 export type CaseCommand =
-  | { readonly name: 'plan-case'; readonly plan: CasePlan; readonly reference: string; readonly identityCommitment: string }
+  | {
+      readonly name: 'plan-case';
+      readonly plan: CasePlan;
+      readonly reference: string;
+      readonly identityCommitment: string;
+      readonly team?: readonly TeamMember[];
+    }
   | { readonly name: 'revise-plan'; readonly plan: CasePlan }
   | { readonly name: 'open-case'; readonly clockOffsetMs: number | null }
   | { readonly name: 'confirm-timeout'; readonly side: 'left' | 'right'; readonly text: string | null }
@@ -36,8 +42,13 @@ export type CaseCommand =
       readonly text: string | null;
     }
   | { readonly name: 'send-message'; readonly text: string }
+  | { readonly name: 'give-advice'; readonly text: string }
+  | { readonly name: 'confirm-advice'; readonly adviceSeq: number; readonly text: string | null }
+  | { readonly name: 'confirm-baseline'; readonly baselineSeq: number; readonly text: string | null }
+  | { readonly name: 'record-examination'; readonly examination: Examination }
   | { readonly name: 'close-case'; readonly text: string | null }
-  | { readonly name: 'miss-repeat'; readonly alertId: string };
+  | { readonly name: 'miss-repeat'; readonly alertId: string }
+  | { readonly name: 'note-painted'; readonly alertId: string; readonly entrySeq: number; readonly screenId: string; readonly paintedAt: string };
 
 /** Name of a command. */
 export type CaseCommandName = CaseCommand['name'];

@@ -2,6 +2,7 @@ import type { CaseCommand, Refusal } from '@/lib/case/commands';
 import type { CaseState } from '@/lib/case/case-state';
 import type { DecideContext } from '@/lib/case/decide/decide-context';
 import { decideAlert } from '@/lib/case/decide/decide-alert';
+import { decideBaselineConfirmation } from '@/lib/case/decide/decide-baseline-confirmation';
 import { decideBaseline } from '@/lib/case/decide/decide-baseline';
 import { decideCorrection } from '@/lib/case/decide/decide-correction';
 import { decideDistances } from '@/lib/case/decide/decide-distances';
@@ -9,6 +10,7 @@ import { decideLifecycle } from '@/lib/case/decide/decide-lifecycle';
 import { decidePlan } from '@/lib/case/decide/decide-plan';
 import { decideRun } from '@/lib/case/decide/decide-run';
 import { decideStep } from '@/lib/case/decide/decide-step';
+import { decideTalk } from '@/lib/case/decide/decide-talk';
 import { draft } from '@/lib/case/decide/draft';
 import type { EntryDraft } from '@/lib/case/entry-bodies';
 
@@ -40,7 +42,7 @@ export function decide(state: CaseState, command: CaseCommand, context: DecideCo
 
 /** A run that waited at a desk without a link is never refused for the case's state; what it raises can be handled. */
 function isTakenAfterClose(command: CaseCommand): boolean {
-  return ['log-run', 'tell-alert', 'read-back-alert', 'act-on-alert', 'end-alert'].includes(command.name);
+  return ['log-run', 'note-painted', 'tell-alert', 'read-back-alert', 'act-on-alert', 'end-alert'].includes(command.name);
 }
 
 function outcomeOf(state: CaseState, command: CaseCommand, context: DecideContext): readonly EntryDraft[] | Refusal {
@@ -69,8 +71,14 @@ function outcomeOf(state: CaseState, command: CaseCommand, context: DecideContex
       return decideDistances(state, command);
     case 'log-condition':
       return [draft('condition.logged', { condition: command.condition, reportedBy: command.reportedBy })];
+    case 'record-examination':
+      return [draft('examination.recorded', command.examination)];
+    case 'confirm-baseline':
+      return decideBaselineConfirmation(state, command);
     case 'send-message':
-      return [draft('message.sent', { text: command.text })];
+    case 'give-advice':
+    case 'confirm-advice':
+      return decideTalk(state, command);
     default:
       return decideAlert(state, command, context);
   }

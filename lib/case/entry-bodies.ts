@@ -54,9 +54,26 @@ export interface AlertEvidence {
   readonly judgeVersion: number;
 }
 
+/** A person's part in a case, as planned. People are told by role; the name is the account's. */
+export interface TeamMember {
+  readonly personId: string;
+  readonly role: 'neurophysiologist' | 'surgeon' | 'physician';
+  readonly displayName: string;
+}
+
+/** Strength and sensation of the patient before or after the operation. Grades of the Medical Research Council, 0 to 5. */
+export interface Examination {
+  readonly when: 'before-operation' | 'after-operation';
+  readonly examinedBy: string;
+  readonly muscles: readonly { readonly muscle: string; readonly grade: number }[];
+  readonly sensation: readonly { readonly area: string; readonly finding: 'normal' | 'reduced' | 'absent' | 'not-testable' }[];
+  readonly text: string | null;
+}
+
 /** Body of every entry kind, version 1 of each. Never changed: a change is a new version with an upcaster. */
 export interface EntryBodies {
   'case.planned': { readonly reference: string; readonly identityCommitment: string; readonly plan: CasePlan };
+  'team.assigned': { readonly people: readonly TeamMember[] };
   'plan.revised': { readonly plan: CasePlan };
   'case.opened': { readonly clockOffsetMs: number | null };
   'timeout.confirmed': { readonly side: 'left' | 'right'; readonly text: string | null };
@@ -80,6 +97,8 @@ export interface EntryBodies {
     readonly setAfterPercent: number | null;
     readonly values: readonly BaselineValues[];
   };
+  'baseline.confirmed': { readonly baselineSeq: number; readonly text: string | null };
+  'examination.recorded': Examination;
   'condition.logged': { readonly condition: Condition; readonly reportedBy: string | null };
   'step.logged': {
     readonly stepId: string;
@@ -109,6 +128,9 @@ export interface EntryBodies {
     readonly cause: AlertCause;
     readonly text: string | null;
   };
+  'alert.painted': { readonly alertId: string; readonly entrySeq: number; readonly screenId: string; readonly paintedAt: string };
+  'advice.given': { readonly text: string };
+  'advice.confirmed': { readonly adviceSeq: number; readonly text: string | null };
   'message.sent': { readonly text: string };
   'case.closed': { readonly text: string | null };
 }

@@ -3,6 +3,7 @@ import { evolveBaseline } from '@/lib/case/evolve/evolve-baseline';
 import { evolveCorrection } from '@/lib/case/evolve/evolve-correction';
 import { evolveJudgement } from '@/lib/case/evolve/evolve-judgement';
 import { evolvePlan } from '@/lib/case/evolve/evolve-plan';
+import { evolveTalk } from '@/lib/case/evolve/evolve-talk';
 import { evolveRun } from '@/lib/case/evolve/evolve-run';
 import type { CaseState, KeptCondition, KeptStep } from '@/lib/case/case-state';
 import type { CaseEntry } from '@/lib/case/entry-bodies';
@@ -47,6 +48,7 @@ function evolveBody(state: CaseState, entry: CaseEntry): CaseState {
     case 'run.corrected':
       return evolveCorrection(state, entry);
     case 'baseline.accepted':
+    case 'baseline.confirmed':
       return evolveBaseline(state, entry);
     case 'condition.logged':
       return evolveCondition(state, entry);
@@ -54,8 +56,14 @@ function evolveBody(state: CaseState, entry: CaseEntry): CaseState {
       return evolveStep(state, entry);
     case 'case.closed':
       return { ...state, status: 'closed', closedAt: entry.eventAt };
-    case 'message.sent':
+    case 'team.assigned':
+      return { ...state, team: entry.body.people };
+    case 'examination.recorded':
       return state;
+    case 'message.sent':
+    case 'advice.given':
+    case 'advice.confirmed':
+      return evolveTalk(state, entry);
     default:
       return evolveAlert(state, entry);
   }

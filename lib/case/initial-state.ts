@@ -57,5 +57,8 @@ export function initialState(caseId: string): CaseState {
     alertCounts: {},
     withdrawn: [],
     runCount: 0,
+    team: [],
+    advice: [],
+    unanswered: {},
   };
 }

@@ -6,6 +6,7 @@ import type { EntryKind } from '@/lib/case/entry-bodies';
  */
 export const knownKinds: { readonly [K in EntryKind]: number } = {
   'case.planned': 1,
+  'team.assigned': 1,
   'plan.revised': 1,
   'case.opened': 1,
   'timeout.confirmed': 1,
@@ -14,6 +15,8 @@ export const knownKinds: { readonly [K in EntryKind]: number } = {
   'run.judged': 1,
   'run.corrected': 1,
   'baseline.accepted': 1,
+  'baseline.confirmed': 1,
+  'examination.recorded': 1,
   'condition.logged': 1,
   'step.logged': 1,
   'distances.measured': 1,
@@ -28,6 +31,9 @@ export const knownKinds: { readonly [K in EntryKind]: number } = {
   'alert.read-back': 1,
   'alert.acted': 1,
   'alert.ended': 1,
+  'alert.painted': 1,
+  'advice.given': 1,
+  'advice.confirmed': 1,
   'message.sent': 1,
   'case.closed': 1,
 };

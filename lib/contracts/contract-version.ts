@@ -3,6 +3,7 @@
  * who changes a message raises the version and adds a line here.
  * 1: first.
  * 2: the list of cases says how many there are.
+ * 3: team at planning, examination, advice and its confirmation, the physician's acceptance of a baseline, people.
  * @source house rule: a whole number from 1
  */
-export const contractVersion = 2;
+export const contractVersion = 3;

@@ -12,5 +12,7 @@ import type { Action } from '@/lib/policy/action';
 export function actionForCommand(name: CaseCommandName): Action {
   if (name === 'plan-case') return 'plan-case';
   if (name === 'miss-repeat') return 'run-timer';
-  return name === 'send-message' || name === 'accept-baseline' ? name : 'write-case';
+  if (name === 'note-painted') return 'confirm-paint';
+  const isOwnAction = name === 'send-message' || name === 'accept-baseline' || name === 'give-advice' || name === 'confirm-baseline';
+  return isOwnAction ? name : 'write-case';
 }

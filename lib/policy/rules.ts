@@ -34,14 +34,14 @@ export const caseRules: readonly CaseRule[] = [
     role: 'physician',
     reach: 'assigned',
     statuses: everyStatus,
-    actions: ['see-case', 'see-identity', 'send-message', 'accept-baseline', 'see-screens'],
+    actions: ['see-case', 'see-identity', 'send-message', 'give-advice', 'accept-baseline', 'confirm-baseline', 'see-screens'],
   },
   { name: 'reviewer-of-closed-cases', role: 'reviewer', reach: 'hospital', statuses: ['closed'], actions: ['see-case'] },
 ];
 
 /** What people may do in a hospital as a whole. */
 export const hospitalRules: readonly { readonly name: string; readonly role: Role; readonly actions: readonly Action[] }[] = [
-  { name: 'neurophysiologist-of-the-hospital', role: 'neurophysiologist', actions: ['list-cases', 'plan-case'] },
+  { name: 'neurophysiologist-of-the-hospital', role: 'neurophysiologist', actions: ['list-cases', 'plan-case', 'list-people'] },
   { name: 'surgeon-of-the-hospital', role: 'surgeon', actions: ['list-cases'] },
   { name: 'physician-of-the-hospital', role: 'physician', actions: ['list-cases'] },
   { name: 'reviewer-of-the-hospital', role: 'reviewer', actions: ['list-cases'] },

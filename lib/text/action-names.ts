@@ -20,4 +20,8 @@ export const actionNames = {
   correction: 'Correction',
   distances: 'Measure distances',
   message: 'Message',
+  advice: 'Advice',
+  adviceConfirmed: 'Advice confirmed',
+  baselineConfirmed: 'Baseline accepted by the physician',
+  examination: 'Examination',
 } as const;

@@ -69,6 +69,8 @@ export function alertSentence(entry: AlertEntry, plan: CasePlan, timeZone: strin
       const now = entry.body.percentOfBaseline;
       return `Back inside its limits, ${nerve}${now === null ? '' : `: ${percent(now)} of baseline`}. Alert open until it is ended`;
     }
+    case 'alert.painted':
+      return `Painted on the theatre screen, ${nerve}, ${clockTime(entry.body.paintedAt, timeZone, { seconds: true })}`;
     case 'notice.settled':
       return `Notice settled, ${nerve}: run ${entry.body.runSeq} was inside the limits`;
     case 'alert.withdrawn':

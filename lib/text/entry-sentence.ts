@@ -5,6 +5,7 @@ import { alertSentence } from '@/lib/text/alert-sentence';
 import { conditionWords } from '@/lib/text/condition-words';
 import { decimal, nonBreakingSpace, signed } from '@/lib/text/format';
 import { familyNames, judgedSentence, runSentence } from '@/lib/text/run-sentence';
+import { examinationSentence } from '@/lib/text/examination-sentence';
 import { siteName } from '@/lib/text/site-name';
 
 /** Phases as they are said. */
@@ -38,6 +39,8 @@ export function entrySentence(entry: CaseEntry, plan: CasePlan, timeZone: string
       const reference = entry.body.reference ? `, reference ${entry.body.reference}` : '';
       return `Case planned: ${procedure}, ${side} side, ${theatre}${reference}`;
     }
+    case 'team.assigned':
+      return `Team: ${entry.body.people.map((one) => `${one.role}, ${one.displayName}`).join('; ')}`;
     case 'plan.revised':
       return `Plan revised: ${planCounts(entry.body.plan)}`;
     case 'case.opened':
@@ -54,6 +57,10 @@ export function entrySentence(entry: CaseEntry, plan: CasePlan, timeZone: string
       return correctedSentence(entry.body, plan);
     case 'baseline.accepted':
       return baselineSentence(entry.body, plan);
+    case 'baseline.confirmed':
+      return `${actionNames.baselineConfirmed}, entry ${entry.body.baselineSeq}${after(entry.body.text)}`;
+    case 'examination.recorded':
+      return examinationSentence(entry.body);
     case 'condition.logged': {
       const { name, value } = conditionWords(entry.body.condition);
       return `${name} ${value}${entry.body.reportedBy === null ? '' : `, as reported by ${entry.body.reportedBy}`}`;
@@ -64,6 +71,10 @@ export function entrySentence(entry: CaseEntry, plan: CasePlan, timeZone: string
       return distancesSentence(entry.body, plan);
     case 'message.sent':
       return `${actionNames.message}: ${entry.body.text}`;
+    case 'advice.given':
+      return `${actionNames.advice}: ${entry.body.text}`;
+    case 'advice.confirmed':
+      return `${actionNames.adviceConfirmed}, entry ${entry.body.adviceSeq}${after(entry.body.text)}`;
     case 'case.closed':
       return `Case closed${after(entry.body.text)}`;
     default:

@@ -19,6 +19,7 @@ import { eventTimeProblem } from '@/server/commands/event-time-problem';
 import { hospitalForPlan } from '@/server/commands/hospital-for-plan';
 import { identityCommitment } from '@/server/commands/identity-commitment';
 import type { Planning } from '@/server/commands/planning';
+import { teamForPlan } from '@/server/commands/team-for-plan';
 import { repeatedPlanning } from '@/server/commands/repeated-planning';
 import { toWireEntry } from '@/server/cases/to-wire-entry';
 import { failure, notSaved } from '@/server/failure';
@@ -31,15 +32,17 @@ export async function planCase(context: ServerContext, signedIn: SignedIn, reque
   const hospitalId = await hospitalForPlan(context, signedIn, request.plan.theatre);
   const problem = planProblem(request.plan);
   if (problem !== null) throw failure('bad-request', 'plan-inconsistent', problem, 'plan');
+  const team = await teamForPlan(context, hospitalId, request);
   const caseId = caseIdFor(signedIn.session.personId, request);
-  const digest = commandDigest({ authorId: signedIn.session.personId, eventAt: request.eventAt, name: 'plan-case', plan: request.plan });
+  const digest = commandDigest({ authorId: signedIn.session.personId, eventAt: request.eventAt, name: 'plan-case', plan: request.plan, team: request.team ?? [] });
+  const planning: Planning = { caseId, hospitalId, digest, request, team };
   return context.queue.run(caseId, async () => {
-    const repeated = await repeatedPlanning(context, signedIn, { caseId, hospitalId, digest, request });
+    const repeated = await repeatedPlanning(context, signedIn, planning);
     if (repeated !== null) return repeated;
     const timeProblem = eventTimeProblem(request.eventAt, context.nowMs());
     if (timeProblem !== null) throw timeProblem;
     for (let attempt = 0; attempt < mostReferences; attempt += 1) {
-      const sealed = await tryPlan(context, signedIn, { caseId, hospitalId, digest, request });
+      const sealed = await tryPlan(context, signedIn, planning);
       if (sealed === null) continue;
       const entries = sealed.map(toWireEntry);
       context.onCommitted(caseId, entries);
@@ -61,6 +64,7 @@ async function tryPlan(context: ServerContext, { session }: SignedIn, planning: 
       await insertCase(transaction, { hospitalId, id: caseId, reference, plannedBy: session.personId });
       await insertIdentity(transaction, { hospitalId, caseId, salt, ...request.identity });
       await assignPerson(transaction, { hospitalId, caseId, personId: session.personId, role: 'neurophysiologist' });
+      for (const { personId, role } of planning.team) await assignPerson(transaction, { hospitalId, caseId, personId, role });
       await insertEntries(transaction, sealed);
     });
     return sealed;
@@ -74,10 +78,10 @@ async function tryPlan(context: ServerContext, { session }: SignedIn, planning: 
 function firstEntry(
   context: ServerContext,
   session: SignedIn['session'],
-  { caseId, hospitalId, digest, request }: Planning,
+  { caseId, hospitalId, digest, request, team }: Planning,
   named: { reference: string; identityCommitment: string },
 ): SealedEntry[] {
-  const decision = decide(initialState(caseId), { name: 'plan-case', plan: request.plan, ...named }, { eventAt: request.eventAt, nowMs: context.nowMs() });
+  const decision = decide(initialState(caseId), { name: 'plan-case', plan: request.plan, ...named, ...(team.length === 0 ? {} : { team }) }, { eventAt: request.eventAt, nowMs: context.nowMs() });
   if (decision.kind === 'refused') throw failure('bad-request', decision.refusal.code, decision.refusal.message, 'plan');
   return chainEntries(
     EMPTY_HEAD,

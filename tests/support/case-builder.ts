@@ -74,7 +74,7 @@ export class CaseBuilder {
     const decision = this.ask(command, options);
     if (decision.kind === 'refused') throw new Error(`Refused: ${decision.refusal.message}`);
     this.commandCount += 1;
-    this.commit(decision.drafts, options.eventAt, `018f0000-0000-7000-8000-${String(this.commandCount).padStart(12, '0')}`);
+    this.commit(decision.drafts, options, `018f0000-0000-7000-8000-${String(this.commandCount).padStart(12, '0')}`);
     return decision.drafts;
   }
 
@@ -90,7 +90,7 @@ export class CaseBuilder {
     return dueTimers(this.state, this.nowMs).flatMap((timer) => {
       const decision = this.ask(timer.command, { eventAt: timer.eventAt });
       if (decision.kind === 'refused') return [];
-      this.commit(decision.drafts, timer.eventAt, timer.commandId);
+      this.commit(decision.drafts, { eventAt: timer.eventAt }, timer.commandId);
       return decision.drafts.map((draft) => draft.kind);
     });
   }
@@ -144,11 +144,12 @@ export class CaseBuilder {
     return decide(this.state, command, { eventAt, nowMs: this.nowMs, role: options.role ?? author.role });
   }
 
-  private commit(drafts: readonly EntryDraft[], eventAt: string | undefined, commandId: string): void {
+  private commit(drafts: readonly EntryDraft[], { eventAt, role }: OrderOptions, commandId: string): void {
     const recordedAt = new Date(this.nowMs).toISOString();
+    const by = role === undefined ? author : { id: `person-${role}`, role, displayName: role };
     const unchained = drafts.map(({ kind, kindVersion, body }, commandPart) => {
       const commandDigest = 'ab'.repeat(32);
-      return { hospitalId, caseId, kind, kindVersion, commandId, commandPart, commandDigest, eventAt: eventAt ?? recordedAt, recordedAt, author, body };
+      return { hospitalId, caseId, kind, kindVersion, commandId, commandPart, commandDigest, eventAt: eventAt ?? recordedAt, recordedAt, author: by, body };
     });
     for (const { entry, hash } of chainEntries(this.head, unchained)) {
       const wire: WireEntry = { ...structuredClone(entry), hash };

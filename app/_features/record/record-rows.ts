@@ -9,6 +9,7 @@ export type EntryGroup = 'runs' | 'baselines' | 'alerts' | 'steps' | 'conditions
 
 const groups: { readonly [K in EntryKind]: EntryGroup } = {
   'case.planned': 'case',
+  'team.assigned': 'case',
   'plan.revised': 'case',
   'case.opened': 'case',
   'timeout.confirmed': 'case',
@@ -18,6 +19,8 @@ const groups: { readonly [K in EntryKind]: EntryGroup } = {
   'run.judged': 'runs',
   'run.corrected': 'corrections',
   'baseline.accepted': 'baselines',
+  'baseline.confirmed': 'baselines',
+  'examination.recorded': 'case',
   'condition.logged': 'conditions',
   'step.logged': 'steps',
   'distances.measured': 'steps',
@@ -32,6 +35,9 @@ const groups: { readonly [K in EntryKind]: EntryGroup } = {
   'alert.read-back': 'alerts',
   'alert.acted': 'alerts',
   'alert.ended': 'alerts',
+  'alert.painted': 'alerts',
+  'advice.given': 'messages',
+  'advice.confirmed': 'messages',
   'message.sent': 'messages',
 };
 

@@ -7,7 +7,7 @@ import type { EntryDraft } from '@/lib/case/entry-bodies';
 import { msOfMoment } from '@/lib/units/ms-of-moment';
 
 type AlertCommand = CaseCommand & {
-  name: 'tell-alert' | 'read-back-alert' | 'act-on-alert' | 'end-alert' | 'miss-repeat';
+  name: 'tell-alert' | 'read-back-alert' | 'act-on-alert' | 'end-alert' | 'miss-repeat' | 'note-painted';
 };
 
 /** Told, read back, surgeon's action, end, and the repeat that did not come. @returns drafts or a refusal @source product rule: handling */
@@ -30,6 +30,12 @@ export function decideAlert(state: CaseState, command: AlertCommand, context: De
       return [draft('alert.acted', { alertId: command.alertId, action: command.action })];
     case 'end-alert':
       return [draft('alert.ended', { alertId: command.alertId, outcome: command.outcome, cause: command.cause, text: command.text })];
+    case 'note-painted': {
+      const { alertId, entrySeq, screenId, paintedAt } = command;
+      // The first wall that shows it counts, and only for the newest word of the alert.
+      const isNews = entrySeq >= incident.raisedSeq && incident.paintedAt === null;
+      return isNews ? [draft('alert.painted', { alertId, entrySeq, screenId, paintedAt })] : [];
+    }
     case 'miss-repeat':
       return missRepeat(incident, context);
   }

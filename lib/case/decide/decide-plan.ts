@@ -13,7 +13,8 @@ export function decidePlan(state: CaseState, command: PlanCommand): readonly Ent
   if (command.name === 'plan-case') {
     if (state.seq > 0) return { code: 'already-planned', message: 'Case already planned: revise its plan instead' };
     const { reference, identityCommitment, plan } = command;
-    return [draft('case.planned', { reference, identityCommitment, plan })];
+    const planned = draft('case.planned', { reference, identityCommitment, plan });
+    return command.team === undefined ? [planned] : [planned, draft('team.assigned', { people: command.team })];
   }
   if (state.timeoutAt !== null && command.plan.side !== state.plan.side) {
     return {

@@ -5,7 +5,7 @@ import type { AlertEvidence, CaseEntry } from '@/lib/case/entry-bodies';
 type AlertEntry = CaseEntry & {
   kind:
     | 'notice.raised' | 'notice.settled' | 'alert.raised' | 'alert.worsened' | 'alert.located' | 'alert.recovered'
-    | 'alert.withdrawn' | 'alert.told' | 'alert.read-back' | 'alert.acted' | 'alert.ended';
+    | 'alert.painted' | 'alert.withdrawn' | 'alert.told' | 'alert.read-back' | 'alert.acted' | 'alert.ended';
 };
 
 /** Withdrawn alerts the state remembers; a wall names them for a minute. */
@@ -50,6 +50,7 @@ function opened(state: CaseState, entry: CaseEntry & { kind: 'notice.raised' }):
     locateFromAt: entry.body.firstBadAt,
     receivedAt: entry.recordedAt,
     raisedAt: entry.recordedAt,
+    ...unpainted(entry),
     repeatDueAt: entry.body.repeatDueAt,
     toldAt: null,
     toldPercentOfBaseline: null,
@@ -64,7 +65,12 @@ function opened(state: CaseState, entry: CaseEntry & { kind: 'notice.raised' }):
 function askedAnew(incident: Incident, entry: CaseEntry & { kind: 'notice.raised' }): Incident {
   const { repeatDueAt } = entry.body;
   const told = { toldAt: null, readBackAt: null };
-  return { ...incident, ...evidenceFields(entry.body), ...told, raisedAt: entry.recordedAt, repeatDueAt, mayBecomeAlert: repeatDueAt !== null };
+  return { ...incident, ...evidenceFields(entry.body), ...told, ...unpainted(entry), raisedAt: entry.recordedAt, repeatDueAt, mayBecomeAlert: repeatDueAt !== null };
+}
+
+/** New words of an alert: no wall has shown them yet. */
+function unpainted(entry: CaseEntry) {
+  return { raisedSeq: entry.seq, paintedAt: null };
 }
 
 function evidenceFields(body: AlertEvidence) {
@@ -90,6 +96,7 @@ function updated(
       return {
         ...incident,
         ...evidenceFields(entry.body),
+        ...unpainted(entry),
         level: 'alert',
         isRepeated: entry.body.isRepeated,
         raisedAt: incident.level === 'alert' ? incident.raisedAt : entry.recordedAt,
@@ -102,6 +109,7 @@ function updated(
       return {
         ...incident,
         ...evidenceFields(entry.body),
+        ...unpainted(entry),
         isLost: incident.isLost || entry.body.finding === 'response-lost',
         ...(entry.body.worsening.includes('returned') ? returned(state, entry) : {}),
         toldAt: null,
@@ -110,6 +118,8 @@ function updated(
         action: null,
         recoveredAt: null,
       };
+    case 'alert.painted':
+      return { ...incident, paintedAt: entry.body.paintedAt };
     case 'alert.located':
       return { ...incident, location: entry.body.location };
     case 'alert.recovered':

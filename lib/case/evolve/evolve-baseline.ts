@@ -8,14 +8,15 @@ import { baselineKey } from '@/lib/case/keys';
  * @returns the state after it
  * @source product rule: opening baseline is kept for ever
  */
-export function evolveBaseline(state: CaseState, entry: CaseEntry & { kind: 'baseline.accepted' }): CaseState {
-  const { family, electrodeId, setAfterPercent, values } = entry.body;
+export function evolveBaseline(state: CaseState, entry: CaseEntry & { kind: 'baseline.accepted' | 'baseline.confirmed' }): CaseState {
+  if (entry.kind === 'baseline.confirmed') return confirmed(state, entry.body.baselineSeq);
+  const { family, electrodeId, setAfterPercent, isProvisional, values } = entry.body;
   const baselines = { ...state.baselines };
   const openingBaselines = { ...state.openingBaselines };
   const paths: Record<string, PathRecord> = { ...state.paths };
   for (const value of values) {
     const key = baselineKey(value.pathId, electrodeId, family);
-    const baseline: Baseline = { ...value, key, electrodeId, family, seq: entry.seq, setAfterPercent, isMarkedByCorrection: false };
+    const baseline: Baseline = { ...value, key, electrodeId, family, seq: entry.seq, setAfterPercent, isProvisional, isMarkedByCorrection: false };
     baselines[key] = baseline;
     openingBaselines[key] ??= baseline;
     const record = paths[value.pathId];
@@ -25,4 +26,10 @@ export function evolveBaseline(state: CaseState, entry: CaseEntry & { kind: 'bas
     }
   }
   return { ...state, baselines, openingBaselines, paths };
+}
+
+function confirmed(state: CaseState, baselineSeq: number): CaseState {
+  const confirm = (baselines: CaseState['baselines']) =>
+    Object.fromEntries(Object.entries(baselines).map(([key, one]) => [key, one.seq === baselineSeq ? { ...one, isProvisional: false } : one]));
+  return { ...state, baselines: confirm(state.baselines), openingBaselines: confirm(state.openingBaselines) };
 }

@@ -8,7 +8,7 @@ import { alertSlug, boundedText, moment, slug, uuid } from '@/lib/contracts/text
 const text = (max: number) => boundedText(max).nullable();
 const family = z.enum(['pre-position', 'through-skin', 'exposed']);
 const side = z.enum(['left', 'right']);
-const runSeq = z.int().min(1).max(10_000_000);
+const entrySeq = z.int().min(1).max(10_000_000);
 
 const reading = z.discriminatedUnion('kind', [
   z
@@ -56,6 +56,16 @@ const condition = z.discriminatedUnion('kind', [
   z.strictObject({ kind: z.literal('other'), text: boundedText(200) }),
 ]);
 
+const examination = z
+  .strictObject({
+    when: z.enum(['before-operation', 'after-operation']),
+    examinedBy: boundedText(60),
+    muscles: z.array(z.strictObject({ muscle: boundedText(60), grade: z.int('Not a grade: 0 to 5 is allowed').min(0, 'Not a grade: 0 to 5 is allowed').max(5, 'Not a grade: 0 to 5 is allowed') })).max(24),
+    sensation: z.array(z.strictObject({ area: boundedText(60), finding: z.enum(['normal', 'reduced', 'absent', 'not-testable']) })).max(24),
+    text: text(500),
+  })
+  .refine((value) => value.muscles.length + value.sensation.length > 0 || value.text !== null, 'Nothing examined: a muscle, an area of skin or a text is needed');
+
 /** Commands a person may give to a case that exists. Planning and timers have their own doors. */
 export const personCommandSchema = z.discriminatedUnion('name', [
   z.strictObject({ name: z.literal('revise-plan'), plan: planSchema }),
@@ -63,7 +73,7 @@ export const personCommandSchema = z.discriminatedUnion('name', [
   z.strictObject({ name: z.literal('confirm-timeout'), side, text: text(200) }),
   z.strictObject({ name: z.literal('change-phase'), phase: z.enum(['set-up', 'baseline', 'monitoring', 'paused', 'take-down']), reason: text(200) }),
   z.strictObject({ name: z.literal('log-run'), run: runSchema }),
-  z.strictObject({ name: z.literal('correct-run'), runSeq, run: runSchema.nullable(), reason: boundedText(200) }),
+  z.strictObject({ name: z.literal('correct-run'), runSeq: entrySeq, run: runSchema.nullable(), reason: boundedText(200) }),
   z.strictObject({ name: z.literal('accept-baseline'), family, electrodeId: slug, reason: text(200) }),
   z.strictObject({ name: z.literal('log-condition'), condition, reportedBy: text(60) }),
   z.strictObject({ name: z.literal('log-step'), stepId: slug, label: text(60) }),
@@ -84,6 +94,10 @@ export const personCommandSchema = z.discriminatedUnion('name', [
     text: text(300),
   }),
   z.strictObject({ name: z.literal('send-message'), text: boundedText(500) }),
+  z.strictObject({ name: z.literal('give-advice'), text: boundedText(500) }),
+  z.strictObject({ name: z.literal('confirm-advice'), adviceSeq: entrySeq, text: text(300) }),
+  z.strictObject({ name: z.literal('confirm-baseline'), baselineSeq: entrySeq, text: text(300) }),
+  z.strictObject({ name: z.literal('record-examination'), examination }),
   z.strictObject({ name: z.literal('close-case'), text: text(300) }),
 ]) satisfies z.ZodType<CaseCommand>;
 
@@ -99,6 +113,8 @@ export const planCaseRequestSchema = z.strictObject({
   commandId: uuid,
   eventAt: moment,
   plan: planSchema,
+  /** Who takes part besides the planner: they see the case from then on. */
+  team: z.array(z.strictObject({ personId: uuid, role: z.enum(['neurophysiologist', 'surgeon', 'physician']) })).max(12).optional(),
   identity: z.strictObject({ patientLabel: boundedText(120), recordNumber: boundedText(60) }),
 });
 

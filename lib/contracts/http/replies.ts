@@ -75,6 +75,11 @@ export const sessionReplySchema = z.strictObject({
   theatres: z.array(z.strictObject({ hospitalId: z.string(), theatreId: z.string(), name: z.string() })),
 });
 
+/** People of one hospital who may take part in a case, to choose a team from. */
+export const peopleReplySchema = z.strictObject({
+  people: z.array(z.strictObject({ hospitalId: z.string(), personId: z.string(), displayName: z.string(), role: z.enum(['neurophysiologist', 'surgeon', 'physician']) })),
+});
+
 /** A wall that asks to be paired: shown on the wall and at the desk, read aloud. */
 export const screenReplySchema = z.discriminatedUnion('kind', [
   z.strictObject({ kind: z.literal('waiting'), screenId: z.string(), code: z.string(), words: z.string() }),
@@ -106,6 +111,7 @@ export type CaseLine = z.infer<typeof caseLineSchema>;
 export type CaseListReply = z.infer<typeof caseListReplySchema>;
 export type CaseHeadReply = z.infer<typeof caseHeadReplySchema>;
 export type SessionReply = z.infer<typeof sessionReplySchema>;
+export type PeopleReply = z.infer<typeof peopleReplySchema>;
 export type ScreenReply = z.infer<typeof screenReplySchema>;
 export type PairScreenRequest = z.infer<typeof pairScreenRequestSchema>;
 export type PairScreenReply = z.infer<typeof pairScreenReplySchema>;

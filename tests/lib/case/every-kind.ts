@@ -2,10 +2,20 @@ import { absent, CaseBuilder } from '@/tests/support/case-builder';
 import { adm, apb, fdiAt, testAll, ulnarSites } from '@/tests/support/ulnar-case';
 import { ulnarAtElbow } from '@/lib/reference/templates/ulnar-at-elbow';
 
+const team = [{ personId: '01890000-0000-7000-8000-000000000009', role: 'physician', displayName: 'Supervising physician' }] as const;
+const examination = {
+  when: 'before-operation',
+  examinedBy: 'Surgeon',
+  muscles: [{ muscle: 'First dorsal interosseous', grade: 4 }],
+  sensation: [{ area: 'Little finger', finding: 'reduced' }],
+  text: null,
+} as const;
+
 /** A whole case in which every entry kind stands at least once: a left ulnar nerve, lifted, changed, back, changed again, closed. */
 export function everyKindCase(): CaseBuilder {
   const script = new CaseBuilder(ulnarAtElbow);
-  script.give({ name: 'plan-case', plan: ulnarAtElbow, reference: 'K7-0001', identityCommitment: 'c'.repeat(64) });
+  script.give({ name: 'plan-case', plan: ulnarAtElbow, reference: 'K7-0001', identityCommitment: 'c'.repeat(64), team });
+  script.give({ name: 'record-examination', examination });
   script.give({ name: 'revise-plan', plan: { ...ulnarAtElbow, theatre: 'Theatre 3' } });
   script.at('10:01').give({ name: 'open-case', clockOffsetMs: 12 });
   script.wait(1000).give({ name: 'confirm-timeout', side: 'left', text: 'Side and patient confirmed by all' });
@@ -22,6 +32,8 @@ export function everyKindCase(): CaseBuilder {
   const positions = [0, 150, 240, 450].map((positionMm, index) => ({ siteId: ulnarSites[index]!, positionMm }));
   script.wait(1000).give({ name: 'measure-distances', nerveId: 'ulnar', positions, reason: 'Nerve transposed' });
   script.wait(1000).give({ name: 'send-message', text: 'Agree, focal at the elbow' });
+  script.wait(1000).give({ name: 'give-advice', text: 'Test below the elbow too' });
+  script.wait(1000).give({ name: 'confirm-advice', adviceSeq: script.state.seq, text: null });
   script.at('11:10').give({ name: 'change-phase', phase: 'take-down', reason: null });
   script.at('11:20').give({ name: 'close-case', text: 'Handed over to recovery' });
   return script;
@@ -35,6 +47,7 @@ function baseline(script: CaseBuilder): void {
   script.give({ name: 'log-condition', condition: { kind: 'train-of-four', count: 4, ratio: 0.95 }, reportedBy: 'Anaesthetist' });
   script.give({ name: 'log-condition', condition: { kind: 'tourniquet', isUp: false, pressureMmHg: null }, reportedBy: 'Nurse' });
   script.wait(5000).give({ name: 'accept-baseline', family: 'through-skin', electrodeId: 'surface', reason: null });
+  script.give({ name: 'confirm-baseline', baselineSeq: script.state.seq, text: null });
 }
 
 function settledNotice(script: CaseBuilder): void {
@@ -45,6 +58,7 @@ function settledNotice(script: CaseBuilder): void {
 function alertCourse(script: CaseBuilder): void {
   script.at('10:41:55').run('above-elbow', { adm: adm('above-elbow', 0.47, 1.33) });
   script.at('10:42:12').run('above-elbow', { adm: adm('above-elbow', 0.38, 1.38) });
+  script.give({ name: 'note-painted', alertId: 'ulnar-2', entrySeq: script.state.seq, screenId: 'screen-1', paintedAt: new Date(script.nowMs).toISOString() });
   script.wait(9000).give({ name: 'tell-alert', alertId: 'ulnar-2', whom: 'Surgeon', how: 'Aloud', words: 'Ulnar at 38 per cent of baseline' });
   script.wait(4000).give({ name: 'read-back-alert', alertId: 'ulnar-2', words: 'Ulnar at 38 per cent' });
   script.wait(4000).give({ name: 'act-on-alert', alertId: 'ulnar-2', action: 'Traction released' });
