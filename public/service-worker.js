@@ -70,9 +70,14 @@ async function openAsset(request, url) {
 async function keepAndTell({ path, assets }, page) {
   const isKept = await keepPage(path, assets).then(
     () => true,
-    () => false,
+    () => hasPage(path),
   );
   page?.postMessage({ kind: 'page-kept', path, isKept });
+}
+
+/** Whether a copy from before is there: it answers a reload, whatever kept the newer one from being stored. */
+async function hasPage(path) {
+  return typeof path === 'string' && (await (await caches.open(pagesName)).match(path)) !== undefined;
 }
 
 /** Fetches the page and everything its HTML, its styles and its first run need; swaps it in only when all of it is there. */

@@ -2,6 +2,7 @@ import type { ComponentProps } from 'react';
 
 import { joinClasses } from '@/app/_ui/join-classes';
 import { Kbd } from '@/app/_ui/kbd';
+import { stopHeldEnter } from '@/app/_ui/stop-held-enter';
 
 export type ButtonVariant = 'primary' | 'quiet' | 'danger' | 'plain';
 
@@ -20,11 +21,12 @@ interface ButtonProps extends ComponentProps<'button'> {
   readonly isWide?: boolean;
 }
 
-/** A control that does one thing, named by its words. `type` is "button" unless said otherwise. */
+/** A control that does one thing, named by its words; a held Enter presses it once. `type` is "button" unless said otherwise. */
 export function Button({ variant = 'quiet', hotkey, isWide = false, className, children, type = 'button', ...rest }: ButtonProps) {
   return (
     <button
       type={type}
+      onKeyDown={stopHeldEnter}
       aria-keyshortcuts={hotkey ?? undefined}
       className={joinClasses(
         'inline-flex min-h-9 items-center gap-2.5 rounded px-3.5 py-1.5 text-base leading-5 pointer-coarse:min-h-11',

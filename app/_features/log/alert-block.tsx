@@ -13,12 +13,12 @@ import { incidentLine } from '@/lib/text/incident-line';
 import { sayThis } from '@/lib/text/say-this';
 import { msOfMoment } from '@/lib/units/ms-of-moment';
 
-/** Every open notice and alert, the most needed first; the keys stand on the first. */
+/** Every open notice and alert, the most needed first; the keys stand on the first. They stand above the backdrop of a question. */
 export function AlertBlocks() {
   const { state } = useLogCase();
   const incidents = incidentsInOrder(state);
   return (
-    <div aria-live="assertive" aria-atomic="false" className="shrink-0 lg:max-h-[58%] lg:overflow-y-auto">
+    <div aria-live="assertive" aria-atomic="false" className="relative z-45 shrink-0 bg-ground lg:max-h-[58%] lg:overflow-y-auto">
       {incidents.map((incident, index) => <AlertBlock key={incident.alertId} incident={incident} isFirst={index === 0} />)}
     </div>
   );

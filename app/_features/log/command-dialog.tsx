@@ -1,11 +1,14 @@
 'use client';
 
-import { useRef, useState, type FormEvent, type ReactNode } from 'react';
+import { useEffect, useRef, useState, type FormEvent, type ReactNode } from 'react';
 
+import { ConsoleDialog } from '@/app/_features/log/console-dialog';
 import { useLogCase } from '@/app/_features/log/log-context';
 import { Button } from '@/app/_ui/button';
-import { Dialog } from '@/app/_ui/dialog';
 import type { PersonCommand } from '@/lib/contracts/http/commands';
+
+/** An Enter so soon after the question opened is the press that opened it, or its echo; what cannot be taken back does not hear it. */
+const sameHandMs = 800;
 
 interface CommandDialogProps {
   readonly title: string;
@@ -26,9 +29,13 @@ export function CommandDialog({ title, description, action, isHeavy = false, isW
   const [problem, setProblem] = useState<string | null>(null);
   const [isSending, setIsSending] = useState(false);
   const isLocked = useRef(false);
+  const openedAtMs = useRef(Infinity);
+  useEffect(() => {
+    openedAtMs.current = performance.now();
+  }, []);
   const handleSubmit = async (event: FormEvent) => {
     event.preventDefault();
-    if (isLocked.current) return;
+    if (isLocked.current || (isHeavy && performance.now() - openedAtMs.current < sameHandMs)) return;
     const made = command();
     if (typeof made === 'string') return setProblem(made);
     isLocked.current = true;
@@ -40,7 +47,7 @@ export function CommandDialog({ title, description, action, isHeavy = false, isW
     else onClose();
   };
   return (
-    <Dialog isOpen onOpenChange={(isOpen) => (isOpen ? undefined : onClose())} title={title} isWide={isWide} {...(description === undefined ? {} : { description })}>
+    <ConsoleDialog isOpen onOpenChange={(isOpen) => (isOpen ? undefined : onClose())} title={title} isWide={isWide} {...(description === undefined ? {} : { description })}>
       <form method="post" noValidate onSubmit={(event) => void handleSubmit(event)} className="flex flex-col gap-4">
         {children}
         {problem === null ? null : <p role="alert" className="border-l-4 border-ink pl-3 font-semibold">{problem}</p>}
@@ -49,6 +56,6 @@ export function CommandDialog({ title, description, action, isHeavy = false, isW
           <Button hotkey="Esc" onClick={onClose}>Leave</Button>
         </div>
       </form>
-    </Dialog>
+    </ConsoleDialog>
   );
 }

@@ -1,6 +1,7 @@
 'use client';
 
 import { SignedOutBar } from '@/app/_features/log/signed-out-bar';
+import { usePageKept } from '@/app/_features/log/use-page-kept';
 import type { FeedProblem } from '@/app/_live/live-store';
 import { useLiveStore } from '@/app/_live/live-store';
 import { dismissRefused } from '@/app/_live/send-command';
@@ -27,12 +28,14 @@ interface ConsoleNoticesProps {
 /** What the program itself has to say: link, sign-in, refused entries. Never in a priority colour. */
 export function ConsoleNotices({ caseId, feed, refusals, isSignedOut, mayWrite }: ConsoleNoticesProps) {
   const isStorageDurable = useLiveStore((store) => store.isStorageDurable);
+  const pageKept = usePageKept();
   const refused = useLiveStore((store) => store.waiting).filter((one) => one.caseId === caseId && one.status === 'refused');
   return (
     <>
       {feed.problem === null ? null : <NoticeBar tone="strong">{problems[feed.problem]}</NoticeBar>}
       {isSignedOut ? <SignedOutBar /> : null}
       {isStorageDurable ? null : <NoticeBar tone="strong">This browser keeps nothing: entries that wait are lost when the page is loaded again</NoticeBar>}
+      {pageKept.sentence === null || !mayWrite ? null : <NoticeBar tone="plain">{pageKept.sentence}</NoticeBar>}
       {mayWrite ? null : <NoticeBar tone="plain">Read only: entries are written by the neurophysiologist of this case</NoticeBar>}
       {refused.map((one) => (
         <NoticeBar key={one.commandId} tone="strong" action={<Button onClick={() => void dismissRefused(one.commandId)}>Read</Button>}>

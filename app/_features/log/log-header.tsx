@@ -4,6 +4,7 @@ import { useContext } from 'react';
 
 import { LogContext, type LogCase } from '@/app/_features/log/log-context';
 import { monitoringWords } from '@/app/_features/log/monitoring-words';
+import { usePageKept } from '@/app/_features/log/use-page-kept';
 import { useLiveStore } from '@/app/_live/live-store';
 import { useIsLive } from '@/app/_live/use-is-live';
 import { useNow } from '@/app/_live/use-now';
@@ -25,16 +26,18 @@ export function LogHeaderTitle() {
   );
 }
 
-/** Whether the wall and the physician see the case, whether all is saved, and the theatre's time. */
+/** Whether the page outlives its link, whether the wall sees the case, whether all is saved, and the theatre's time. */
 export function LogHeaderAside({ caseId }: { readonly caseId: string }) {
   const held = useContext(LogContext);
   const isLive = useIsLive(caseId);
   const wallsConnected = useLiveStore((store) => store.feeds[caseId]?.wallsConnected ?? 0);
   const nowMs = useNow(1000);
+  const { isKept, short } = usePageKept();
   return (
     <>
       {held === null ? null : (
         <>
+          <StatusDot isOn={isKept}>{short}</StatusDot>
           <StatusDot isOn={isLive && wallsConnected > 0}>{wallWords(isLive, wallsConnected)}</StatusDot>
           <StatusDot isOn={isLive && held.waiting.length === 0}>{savedWords(held, isLive)}</StatusDot>
         </>

@@ -1,7 +1,7 @@
-import { ReadingRow, readingColumns } from '@/app/_features/log/reading-row';
+import { ReadingHeadings } from '@/app/_features/log/reading-headings';
+import { ReadingRow } from '@/app/_features/log/reading-row';
 import { notReadDraft } from '@/app/_features/log/run-draft';
 import type { RunFormParts } from '@/app/_features/log/use-run-form';
-import { joinClasses } from '@/app/_ui/join-classes';
 
 interface ReadingRowsProps {
   readonly form: RunFormParts;
@@ -15,14 +15,7 @@ export function ReadingRows({ form, onFocusChannel }: ReadingRowsProps) {
   if (channels.length === 0) return <p className="text-second">No channel records from this site</p>;
   return (
     <div className="overflow-x-auto">
-      <div className={joinClasses(readingColumns, 'pb-1 text-sm text-second')} aria-hidden="true">
-        <span />
-        <span>Onset, ms</span>
-        <span>{`Amplitude, ${channels.every((channel) => channel.kind === 'nerve') ? 'µV' : 'mV'}`}</span>
-        <span>Neg. peak, ms</span>
-        <span>Trace</span>
-        <span>Against baseline</span>
-      </div>
+      <ReadingHeadings channels={channels} hasPreview />
       {channels.map((channel) => {
         const path = judged?.paths.find((one) => one.pathId === `${siteId}/${channel.id}`);
         const segments = judged?.segments.filter((segment) => segment.channelId === channel.id) ?? [];

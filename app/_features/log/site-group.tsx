@@ -2,6 +2,7 @@
 
 import type { KeyboardEvent } from 'react';
 
+import { focusHome } from '@/app/_ui/focus-home';
 import { joinClasses } from '@/app/_ui/join-classes';
 import { Kbd } from '@/app/_ui/kbd';
 import type { Nerve } from '@/lib/alert/nerve-plan';
@@ -42,6 +43,7 @@ export function SiteGroup({ nerves, siteId, onChoose }: SiteGroupProps) {
                 type="button"
                 role="radio"
                 aria-checked={site.id === siteId}
+                {...(site.id === siteId ? focusHome : {})}
                 aria-keyshortcuts={site.hotkey ?? undefined}
                 tabIndex={site.id === siteId ? 0 : -1}
                 onClick={() => onChoose(site.id, false)}

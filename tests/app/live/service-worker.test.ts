@@ -124,11 +124,25 @@ describe('service worker', () => {
     expect(kept.filter((url) => url.includes('/api/'))).toEqual([]);
   });
 
-  it('says that a page is not kept when one of its files is missing, and serves the older copy on', async () => {
+  it('says that a page is not kept when one of its files is missing and no copy was there', async () => {
+    const worker = await workerWithPage();
+    worker.network.answers.set('/cases/b/log', html('n4', 'gone'));
+    await worker.tell({ kind: 'keep-page', path: '/cases/b/log', assets: [] });
+    expect(worker.told.at(-1)).toEqual({ kind: 'page-kept', path: '/cases/b/log', isKept: false });
+  });
+
+  it('after a reload without a network the page is said to be kept, for the older copy answers', async () => {
+    const worker = await workerWithPage();
+    worker.network.isUp = false;
+    await worker.tell({ kind: 'keep-page', path: '/cases/a/log', assets: [] });
+    expect(worker.told.at(-1)).toEqual({ kind: 'page-kept', path: '/cases/a/log', isKept: true });
+  });
+
+  it('serves the older copy on when a file of the newer page is missing', async () => {
     const worker = await workerWithPage();
     worker.network.answers.set('/cases/a/log', html('n4', 'gone'));
     await worker.tell({ kind: 'keep-page', path: '/cases/a/log', assets: [] });
-    expect(worker.told.at(-1)).toEqual({ kind: 'page-kept', path: '/cases/a/log', isKept: false });
+    expect(worker.told.at(-1)).toEqual({ kind: 'page-kept', path: '/cases/a/log', isKept: true });
     worker.network.isUp = false;
     expect(await (await worker.navigate('/cases/a/log'))?.text()).toContain('nonce="n1"');
   });

@@ -5,6 +5,7 @@ import { useState } from 'react';
 import { CommandDialog } from '@/app/_features/log/command-dialog';
 import { draftFromRun } from '@/app/_features/log/draft-from-run';
 import { useLogCase } from '@/app/_features/log/log-context';
+import { ReadingHeadings } from '@/app/_features/log/reading-headings';
 import { ReadingRow } from '@/app/_features/log/reading-row';
 import { channelsOf, notReadDraft, type RunDraft } from '@/app/_features/log/run-draft';
 import { runFromDraft } from '@/app/_features/log/run-from-draft';
@@ -61,6 +62,7 @@ export function CorrectDialog({ firstSeq, onClose }: { readonly firstSeq: number
         <>
           <SettingsFields plan={state.plan} draft={draft} sentences={sentences} onDraft={setDraft} />
           <div className="overflow-x-auto">
+            <ReadingHeadings channels={channels} hasPreview={false} />
             {channels.map((channel) => (
               <ReadingRow
                 key={channel.id}

@@ -1,7 +1,7 @@
 'use client';
 
+import { ConsoleDialog } from '@/app/_features/log/console-dialog';
 import { useLogCase } from '@/app/_features/log/log-context';
-import { Dialog } from '@/app/_ui/dialog';
 import { Kbd } from '@/app/_ui/kbd';
 import { consoleKeys } from '@/lib/case/console-keys';
 
@@ -24,7 +24,7 @@ export function KeysDialog({ onClose }: { readonly onClose: () => void }) {
     { title: 'Other', rows: [['c', consoleKeys.c], ['m', consoleKeys.m], ['?', 'Keys'], ['Esc', 'Leave a question']] },
   ];
   return (
-    <Dialog isOpen isWide onOpenChange={onClose} title="Keys" description="Letters act when no number is half typed and no text is being written.">
+    <ConsoleDialog isOpen isWide onOpenChange={onClose} title="Keys" description="Letters act when no number is half typed and no text is being written.">
       <div className="columns-2 gap-10">
         {groups.map((group) => (
           <section key={group.title} className="mb-5 break-inside-avoid">
@@ -40,6 +40,6 @@ export function KeysDialog({ onClose }: { readonly onClose: () => void }) {
           </section>
         ))}
       </div>
-    </Dialog>
+    </ConsoleDialog>
   );
 }

@@ -3,12 +3,12 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState, type FormEvent } from 'react';
 
+import { ConsoleDialog } from '@/app/_features/log/console-dialog';
 import { useLogCase } from '@/app/_features/log/log-context';
 import { readScreens, revokeScreen } from '@/app/_features/log/read-screens';
 import { WallList } from '@/app/_features/log/wall-list';
 import { pairScreen } from '@/app/_live/api';
 import { Button } from '@/app/_ui/button';
-import { Dialog } from '@/app/_ui/dialog';
 import { Field } from '@/app/_ui/field';
 
 /** Binds a wall to this case: its code, then the two words read aloud on both sides. */
@@ -48,7 +48,7 @@ export function PairDialog({ onClose }: { readonly onClose: () => void }) {
     await screens.refetch();
   };
   return (
-    <Dialog isOpen onOpenChange={(isOpen) => (isOpen ? undefined : onClose())} title="Pair a wall" description="Open /screen on the wall’s display. It shows a code and two words.">
+    <ConsoleDialog isOpen onOpenChange={(isOpen) => (isOpen ? undefined : onClose())} title="Pair a wall" description="Open /screen on the wall’s display. It shows a code and two words.">
       <form method="post" noValidate onSubmit={handleSubmit} className="flex flex-col gap-4">
         {words === null ? (
           <Field label="Code on the wall" hint="Six letters or digits" value={code} maxLength={6} autoComplete="off" autoFocus className="w-56 [&_input]:font-mono [&_input]:uppercase" onChange={(event) => setCode(event.currentTarget.value)} />
@@ -66,6 +66,6 @@ export function PairDialog({ onClose }: { readonly onClose: () => void }) {
         </div>
       </form>
       <WallList screens={screens.data ?? []} onRevoke={(screenId) => void revoke(screenId)} />
-    </Dialog>
+    </ConsoleDialog>
   );
 }
