@@ -4,6 +4,7 @@ import type { Logger } from 'pino';
 import { makeDatabase } from '@/db/connection';
 import { makeListener } from '@/db/listener';
 import { makeRateLimit } from '@/server/auth/rate-limit';
+import { removeOldRows } from '@/server/commands/remove-old-rows';
 import { runTimers } from '@/server/commands/run-timers';
 import { makeFascicle } from '@/server/doors/make-fascicle';
 import type { FascicleGlobal } from '@/server/fascicle-global';
@@ -23,6 +24,11 @@ export interface House {
 }
 
 type Settings = Pick<ServerSettings, 'publicUrl' | 'secret' | 'demo' | 'databaseUrlApp' | 'databaseUrlFeed' | 'databaseUrlAudit'>;
+
+function atOnceAndEveryHour(work: () => Promise<void>, onFault: (cause: unknown) => void): { stop: () => void } {
+  work().catch(onFault);
+  return everySecond(work, onFault, 3_600_000);
+}
 
 /** Puts database, commands, live channel and timers together. */
 export function startHouse(parts: { settings: Settings; log: Logger; httpServer: HttpServer; allowed: AllowedOrigins }): House {
@@ -53,12 +59,14 @@ export function startHouse(parts: { settings: Settings; log: Logger; httpServer:
     onLost: (reason) => log.warn({ reason }, 'The bell is not heard; the poll covers it.'),
   });
   const timers = everySecond(async () => void (await runTimers(context)), (cause) => log.warn({ err: cause }, 'Timers of open cases did not run; the next second tries again.'));
+  const removing = atOnceAndEveryHour(() => removeOldRows(context), (cause) => log.warn({ err: cause }, 'Old rows were not removed; the next hour tries again.'));
   const loop = watchEventLoop();
   const pairingLimit = makeRateLimit({ perSecond: 0.2, burst: 20, nowMs: context.nowMs });
   return {
     fascicle: makeFascicle({ context, presence, loop, pairingLimit }),
     async stop() {
       timers.stop();
+      removing.stop();
       await channel.close();
       httpServer.closeAllConnections();
       await listener.stop();

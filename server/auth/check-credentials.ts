@@ -2,8 +2,7 @@ import { createHash } from 'node:crypto';
 
 import { acceptSecondFactorStep } from '@/db/repositories/people/accept-second-factor-step';
 import type { Credentials } from '@/db/repositories/people/credentials';
-import { countFailures } from '@/db/repositories/sign-in/count-failures';
-import { noteAttempt } from '@/db/repositories/sign-in/note-attempt';
+import { beginAttempt, noteSuccess } from '@/db/repositories/sign-in/begin-attempt';
 import { isPasswordRight } from '@/server/auth/password';
 import { stepOfCode } from '@/server/auth/second-factor';
 import { failure } from '@/server/failure';
@@ -23,24 +22,21 @@ export interface CredentialsTyped {
 
 type Facts = Pick<ServerContext, 'database' | 'nowMs'>;
 
-/** Passes only with the right password and an unused right code; each attempt is counted. Unknown and wrong look alike. */
+/** Passes only with the right password and an unused right code; each attempt is counted, in all processes together. Unknown and wrong look alike. */
 export async function checkCredentials(context: Facts, typed: CredentialsTyped): Promise<Credentials> {
   const { app } = context.database;
   const emailHash = createHash('sha256').update(typed.email.toLowerCase()).digest();
-  const failures = await countFailures(app, emailHash, typed.address, throttle.windowS);
-  if (failures.byEmail >= throttle.perAccount) throw waitSentence(`${failures.byEmail} failed attempts for this account`);
-  if (failures.byAddress >= throttle.perAddress) throw waitSentence(`${failures.byAddress} failed attempts from this machine`);
+  const { id, byEmail, byAddress } = await beginAttempt(app, { emailHash, address: typed.address }, throttle);
+  if (id === null) throw waitSentence(byEmail >= throttle.perAccount ? `${byEmail} failed attempts for this account` : `${byAddress} failed attempts from this machine`);
   const isRight = await isPasswordRight(typed.credentials?.passwordHash ?? null, typed.password);
   const step = typed.credentials === null ? null : await stepOfCode(typed.credentials.secondFactorSecret, typed.code, context.nowMs());
   if (typed.credentials === null || !isRight || step === null) {
-    await noteAttempt(app, { emailHash, address: typed.address, succeeded: false });
     throw failure('not-signed-in', 'wrong-credentials', 'Not accepted: e-mail, password or code is wrong.');
   }
   if (!(await acceptSecondFactorStep(app, typed.credentials.personId, step))) {
-    await noteAttempt(app, { emailHash, address: typed.address, succeeded: false });
     throw failure('not-signed-in', 'code-used', 'Not accepted: this code was used already. Wait for the next one, 30 s at most.', 'code');
   }
-  await noteAttempt(app, { emailHash, address: typed.address, succeeded: true });
+  await noteSuccess(app, id);
   return typed.credentials;
 }
 

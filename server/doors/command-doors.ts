@@ -10,7 +10,6 @@ import { revokeScreen } from '@/server/commands/revoke-screen';
 import type { Door } from '@/server/doors/door-parts';
 import type { CommandDoors } from '@/server/fascicle-global';
 import { screensOfCase } from '@/server/queries/screens-of-case';
-import type { ServerContext } from '@/server/server-context';
 
 /** Every command that a route may ask for. Who asks is read from the cookie, never from the input. */
 export const commandDoors: { readonly [Name in keyof CommandDoors]: Door<CommandDoors[Name]['input'], CommandDoors[Name]['answer']> } = {
@@ -26,18 +25,10 @@ export const commandDoors: { readonly [Name in keyof CommandDoors]: Door<Command
     const { reply, cookie } = await askForScreen(context, source, pairingLimit);
     return { isAnswered: true, answer: reply, cookies: cookie === null ? [] : [cookie] };
   },
-  'sign-in': ({ context }, typed, { address }) => inTurn(context, { email: String(typed.email), address }, () => signIn(context, typed, address)),
+  'sign-in': ({ context }, typed, { address }) => signIn(context, typed, address),
   'sign-out': async ({ context }, { sessionId }) => {
     await signOut(context, sessionId);
     return {};
   },
-  reauthenticate: async ({ context }, typed, { cookie, address }) => {
-    const signedIn = await requireSession(context, cookie);
-    return inTurn(context, { email: signedIn.session.email, address }, () => reauthenticate(context, signedIn, typed, address));
-  },
+  reauthenticate: async ({ context }, typed, { cookie, address }) => reauthenticate(context, await requireSession(context, cookie), typed, address),
 };
-
-/** One attempt of a machine, and of an account, at a time: attempts side by side cannot outrun the count of failures. */
-function inTurn<Result>({ queue }: Pick<ServerContext, 'queue'>, by: { email: string; address: string }, attempt: () => Promise<Result>): Promise<Result> {
-  return queue.run(`sign-in from ${by.address}`, () => queue.run(`sign-in of ${by.email.trim().toLowerCase()}`, attempt));
-}

@@ -2,11 +2,12 @@ import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest'
 
 import { findCredentialsByEmail } from '@/db/repositories/people/find-credentials-by-email';
 import { DEMO_PASSWORD } from '@/db/seeds/demo-people';
-import { throttle } from '@/server/auth/check-credentials';
+import { checkCredentials, throttle } from '@/server/auth/check-credentials';
 import { codeAt, nextCode, stepAt, stepOfCode } from '@/server/auth/second-factor';
 
 import { send } from './house/client';
 import { openTestHouse, sessionCookie, type TestHouse } from './house/open-test-house';
+import { openSecondServer, type SecondServer } from './house/second-server';
 
 let house: TestHouse;
 
@@ -70,6 +71,21 @@ describe('signing in', () => {
     const ofMachine = await Promise.all(emails.map((email) => signIn(email, 'wrong', '000000', '198.51.100.250')));
     const taken = (answers: readonly { readonly status: number }[]) => answers.filter(({ status }) => status === 401).length;
     expect([taken(ofAccount), taken(ofMachine)]).toEqual([throttle.perAccount, throttle.perAddress]);
+  });
+
+  test('counts an account in all processes together, also when they ask side by side', async () => {
+    const servers = [openSecondServer(house), openSecondServer(house), openSecondServer(house)];
+    const contextOf = (index: number) => (servers[index % servers.length] as SecondServer).context;
+    const typed = { email: 'spread@demo.example', password: 'wrong', code: '000000', credentials: null };
+    try {
+      const answers = await Promise.all(
+        Array.from({ length: 24 }, (_, index) => checkCredentials(contextOf(index), { ...typed, address: `203.0.113.${index}` }).catch((refused: unknown) => refused as { status: number })),
+      );
+      const statuses = answers.map((answer) => ('status' in answer ? answer.status : 200));
+      expect([statuses.filter((status) => status === 401).length, statuses.filter((status) => status === 429).length]).toEqual([throttle.perAccount, 24 - throttle.perAccount]);
+    } finally {
+      await Promise.all(servers.map((server) => server.close()));
+    }
   });
 
   test('takes as long for an unknown person as for a known one', async () => {

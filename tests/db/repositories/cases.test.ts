@@ -120,3 +120,20 @@ describe('theatresOf', () => {
     expect(await within(db.hospital, (transaction) => theatresOf(transaction))).toEqual([{ hospitalId: db.hospital.id, theatreId: db.hospital.theatreId, name: 'Theatre 1' }]);
   });
 });
+
+describe('insertSnapshot', () => {
+  test('keeps the newest three of its case and touches no other case', async () => {
+    const kinds = Array.from({ length: 9 }, () => 'run.logged');
+    const [one, two] = [await addCase(db.database.app, db.hospital, kinds), await addCase(db.database.app, db.hospital, kinds)];
+    const keep = (caseId: string, seq: number, stateVersion: number) =>
+      insertSnapshot(db.database.app, { hospitalId: db.hospital.id, caseId, seq, stateVersion, bytes: Uint8Array.of(seq) });
+    for (const seq of [2, 4]) await keep(two.caseId, seq, 1);
+    for (const seq of [1, 2, 3, 5, 8]) await keep(one.caseId, seq, 1);
+    await keep(one.caseId, 8, 2);
+    await keep(one.caseId, 8, 2);
+    const kept = async (caseId: string) => (await db.admin('case_snapshots').where({ case_id: caseId }).orderBy(['seq', 'state_version'])).map((row: { seq: string; state_version: number }) => [Number(row.seq), row.state_version]);
+    expect(await kept(one.caseId)).toEqual([[5, 1], [8, 1], [8, 2]]);
+    expect(await kept(two.caseId)).toEqual([[2, 1], [4, 1]]);
+    expect(await findSnapshot(db.database.feed, one.caseId, 1)).toMatchObject({ seq: 8 });
+  });
+});

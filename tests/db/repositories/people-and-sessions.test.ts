@@ -16,8 +16,8 @@ import { noteReauthenticated } from '@/db/repositories/sessions/note-reauthentic
 import { noteSessionSeen } from '@/db/repositories/sessions/note-session-seen';
 import { revokeSession } from '@/db/repositories/sessions/revoke-session';
 import { revokeSessionsOf } from '@/db/repositories/sessions/revoke-sessions-of';
-import { countFailures } from '@/db/repositories/sign-in/count-failures';
-import { noteAttempt } from '@/db/repositories/sign-in/note-attempt';
+import { removeOldAttempts } from '@/db/repositories/sign-in/remove-old-attempts';
+import { beginAttempt, noteSuccess } from '@/db/repositories/sign-in/begin-attempt';
 import { withinHospitals } from '@/db/within-hospitals';
 import { openRecordDatabase, type RecordDatabase } from '@/tests/db/record-database';
 
@@ -137,21 +137,41 @@ describe('members and people', () => {
   });
 });
 
-describe('countFailures', () => {
-  test('counts by address typed since its last success, and by machine', async () => {
-    const emailHash = createHash('sha256').update('someone').digest();
-    const attempt = (succeeded: boolean, address: string) => noteAttempt(db.database.app, { emailHash, address, succeeded });
-    const count = (windowS = 60) => countFailures(db.database.app, emailHash, '127.0.0.9', windowS);
-    expect(await count()).toEqual({ byEmail: 0, byAddress: 0 });
-    await attempt(false, '127.0.0.9');
-    await attempt(false, '127.0.0.8');
-    expect(await count()).toEqual({ byEmail: 2, byAddress: 1 });
-    await attempt(true, '127.0.0.9');
-    expect(await count()).toEqual({ byEmail: 0, byAddress: 1 });
-    await attempt(false, '127.0.0.9');
-    expect(await count()).toEqual({ byEmail: 1, byAddress: 2 });
+describe('beginAttempt', () => {
+  const limits = { windowS: 60, perAccount: 3, perAddress: 5 };
+  const begin = (email: string, address: string, within: { readonly windowS: number } = limits) =>
+    beginAttempt(db.database.app, { emailHash: createHash('sha256').update(email).digest(), address }, { ...limits, ...within });
+
+  test('counts by address typed since its last success, and by machine, what stood before', async () => {
+    expect(await begin('someone', '127.0.0.9')).toMatchObject({ byEmail: 0, byAddress: 0 });
+    await begin('someone', '127.0.0.8');
+    const { id, ...counted } = await begin('someone', '127.0.0.9');
+    expect(counted).toEqual({ byEmail: 2, byAddress: 1 });
+    await noteSuccess(db.database.app, id ?? -1);
+    expect(await begin('someone', '127.0.0.9')).toMatchObject({ byEmail: 0, byAddress: 1 });
     await db.admin('sign_in_attempts').update({ at: db.admin.raw(`at - interval '2 minutes'`) });
-    expect(await count()).toEqual({ byEmail: 0, byAddress: 0 });
-    expect(await count(300)).toEqual({ byEmail: 1, byAddress: 2 });
+    expect(await begin('someone', '127.0.0.9')).toMatchObject({ byEmail: 0, byAddress: 0 });
+    expect(await begin('someone', '127.0.0.9', { windowS: 300 })).toMatchObject({ byEmail: 2, byAddress: 3 });
+  });
+
+  test('lets no more pass side by side than one after the other, of an account and of a machine, and counts none past it', async () => {
+    const passed = (begun: readonly { readonly id: number | null }[]) => begun.filter(({ id }) => id !== null).length;
+    const ofAccount = await Promise.all(Array.from({ length: 30 }, (_, index) => begin('guessed', `127.0.1.${index}`)));
+    const ofMachine = await Promise.all(Array.from({ length: 30 }, (_, index) => begin(`guessed ${index}`, '127.0.2.1')));
+    expect([passed(ofAccount), passed(ofMachine)]).toEqual([limits.perAccount, limits.perAddress]);
+    expect(await begin('guessed', '127.0.3.1')).toEqual({ id: null, byEmail: limits.perAccount, byAddress: 0 });
+  });
+});
+
+describe('removeOldAttempts', () => {
+  test('removes attempts of more than 30 days ago and no others, for the application alone', async () => {
+    await db.admin('sign_in_attempts').delete();
+    const emailHash = createHash('sha256').update('old').digest();
+    const at = (age: string) => db.admin('sign_in_attempts').insert({ email_hash: emailHash, address: age, succeeded: false, at: db.admin.raw('now() - ?::interval', [age]) });
+    for (const age of ['31 days', '29 days', '1 minute']) await at(age);
+    await expect(db.database.app('sign_in_attempts').delete()).rejects.toMatchObject({ code: '42501' });
+    await expect(removeOldAttempts(db.database.feed)).rejects.toMatchObject({ code: '42501' });
+    expect(await removeOldAttempts(db.database.app)).toBe(1);
+    expect(await db.admin('sign_in_attempts').orderBy('id').pluck('address')).toEqual(['29 days', '1 minute']);
   });
 });

@@ -2,6 +2,7 @@ import { createHash } from 'node:crypto';
 import type { Knex } from 'knex';
 import { v7 as uuidv7 } from 'uuid';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
+import { noteRead } from '@/db/repositories/reads/note-read';
 import { askPairing } from '@/db/repositories/screens/ask-pairing';
 import { endScreensForCase } from '@/db/repositories/screens/end-screens-for-case';
 import { findScreenByToken } from '@/db/repositories/screens/find-screen-by-token';
@@ -9,6 +10,7 @@ import { findWaitingScreen } from '@/db/repositories/screens/find-waiting-screen
 import { liveScreenIds } from '@/db/repositories/screens/live-screen-ids';
 import { noteScreenSeen } from '@/db/repositories/screens/note-screen-seen';
 import { pairScreen } from '@/db/repositories/screens/pair-screen';
+import { removeOldScreens } from '@/db/repositories/screens/remove-old-screens';
 import { revokeScreen } from '@/db/repositories/screens/revoke-screen';
 import { screensOfCase } from '@/db/repositories/screens/screens-of-case';
 import { withinHospitals } from '@/db/within-hospitals';
@@ -87,5 +89,35 @@ describe('a wall', () => {
     expect(await within(db.hospital, (transaction) => endScreensForCase(transaction, ended.caseId))).toEqual([]);
     expect(await liveScreenIds(db.database.feed, [id])).toEqual(new Set());
     expect((await findScreenByToken(db.database.app, tokenHash(id)))?.endedAt).not.toBeNull();
+  });
+});
+
+describe('removeOldScreens', () => {
+  const ageOf = (id: string, columns: Record<string, string>) => db.admin('wall_screens').where({ id }).update(Object.fromEntries(Object.entries(columns).map(([name, age]) => [name, db.admin.raw('now() - ?::interval', [age])])));
+  const isThere = async (id: string) => (await db.admin('wall_screens').where({ id })).length === 1;
+  const bound = async (code: string) => {
+    const id = await ask(code);
+    await within(db.hospital, (transaction) => pairScreen(transaction, pairing(id)));
+    return id;
+  };
+
+  test('removes walls that were never bound after a day, and those through for 30 days that no read names', async () => {
+    const [asking, given, up, live, ended, revoked, named] = [await ask('OLD001'), await ask('OLD002'), await ask('OLD003'), await bound('OLD004'), await bound('OLD005'), await bound('OLD006'), await bound('OLD007')];
+    await ageOf(given, { asked_at: '23 hours' });
+    await ageOf(up, { asked_at: '25 hours' });
+    await ageOf(live, { asked_at: '400 days', paired_at: '400 days' });
+    await ageOf(ended, { ended_at: '29 days' });
+    await ageOf(revoked, { ended_at: '40 days', revoked_at: '31 days' });
+    await ageOf(named, { ended_at: '40 days' });
+    await noteRead(db.database.app, { hospitalId: db.hospital.id, personId: null, screenId: named, caseId, what: 'follow', outcome: 'allowed', rule: 'wall-of-the-case' });
+    expect(await removeOldScreens(db.database.app)).toBe(2);
+    const left = await Promise.all([asking, given, up, live, ended, revoked, named].map(isThere));
+    expect(left).toEqual([true, true, false, true, true, false, true]);
+    expect(await removeOldScreens(db.database.app)).toBe(0);
+  });
+
+  test('is the only way: the application deletes no wall, and nobody else may ask', async () => {
+    await expect(within(db.hospital, (transaction) => transaction('wall_screens').delete())).rejects.toMatchObject({ code: '42501' });
+    for (const handle of [db.database.feed, db.database.audit]) await expect(removeOldScreens(handle)).rejects.toMatchObject({ code: '42501' });
   });
 });
