@@ -11,7 +11,7 @@ export interface JsonSchema {
   readonly allOf?: readonly JsonSchema[];
   readonly properties?: Readonly<Record<string, JsonSchema>>;
   readonly required?: readonly string[];
-  readonly items?: JsonSchema;
+  readonly 'items'?: JsonSchema;
   readonly minItems?: number;
   readonly maxItems?: number;
   readonly minLength?: number;
@@ -24,7 +24,7 @@ export interface JsonSchema {
 }
 
 /** Lists are kept short: long ones are tried by hand elsewhere. */
-const mostItems = 3;
+const longestList = 3;
 
 /** Values that a schema allows, as far as the schema says it. Throws at what it does not know rather than skip it. */
 export function arbitraryOfSchema(schema: JsonSchema, find: (ref: string) => JsonSchema): fc.Arbitrary<unknown> {
@@ -40,7 +40,7 @@ export function arbitraryOfSchema(schema: JsonSchema, find: (ref: string) => Jso
     case 'object':
       return objects(schema, of);
     case 'array':
-      return fc.array(of(schema.items ?? {}), { minLength: schema.minItems ?? 0, maxLength: Math.max(schema.minItems ?? 0, Math.min(schema.maxItems ?? mostItems, mostItems)) });
+      return fc.array(of(schema.items ?? {}), { minLength: schema.minItems ?? 0, maxLength: Math.max(schema.minItems ?? 0, Math.min(schema.maxItems ?? longestList, longestList)) });
     case 'string':
       return strings(schema);
     case 'integer':

@@ -13,7 +13,7 @@ export interface MachineReply {
 /** One call for each operation of the description, by its operationId: path words first, then query or body. */
 export type MachineClient = Readonly<Record<string, (...words: readonly unknown[]) => Promise<MachineReply>>>;
 
-type MadeCalls = Readonly<Record<string, (...words: readonly unknown[]) => Promise<Response & { data: unknown; error: unknown }>>>;
+type MadeCalls = Readonly<Record<string, (...words: readonly unknown[]) => Promise<Response & { 'data': unknown; error: unknown }>>>;
 type MadeModule = { readonly Api: new (config: object) => { readonly api: MadeCalls } };
 
 const folder = path.resolve(import.meta.dirname, '../../.out/machine-client');
@@ -31,8 +31,8 @@ export async function makeClient(description: object, access: { readonly url: st
       const reply = await call(...words).catch((failed: unknown) => failed);
       // A made client throws the answer when it is no 2xx; anything else that it throws is a fault of its own.
       if (!(reply instanceof Response)) throw reply;
-      const { status, data, error } = reply as Awaited<ReturnType<typeof call>>;
-      return { status, body: data ?? error };
+      const read = reply as Awaited<ReturnType<typeof call>>;
+      return { status: read.status, body: read.data ?? read.error };
     };
     return [name, answer] as const;
   });
