@@ -5,7 +5,7 @@ import { openLiveStorage } from '@/app/_live/live-storage';
 import { provisionalState } from '@/app/_live/provisional-state';
 import { freshBrowser, openTab, until } from '@/tests/app/live/desk-tab';
 import { FakeServer } from '@/tests/app/live/fake-server';
-import { caseId, desk, entries, say, script, tabs, texts } from '@/tests/app/live/ulnar-desk';
+import { caseId, desk, entries, say, script, texts } from '@/tests/app/live/ulnar-desk';
 import { adm } from '@/tests/support/ulnar-case';
 
 describe('LiveClient sends commands', () => {
