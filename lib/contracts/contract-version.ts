@@ -4,6 +4,7 @@
  * 1: first.
  * 2: the list of cases says how many there are.
  * 3: team at planning, examination, advice and its confirmation, the physician's acceptance of a baseline, people.
+ * 4: a plan may name its hospital.
  * @source house rule: a whole number from 1
  */
-export const contractVersion = 3;
+export const contractVersion = 4;

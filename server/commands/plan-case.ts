@@ -29,12 +29,12 @@ const mostReferences = 20;
 
 /** Plans a case: row, identity, the planner's assignment and the first entry, all or none. A repeat gives the same case. */
 export async function planCase(context: ServerContext, signedIn: SignedIn, request: PlanCaseRequest): Promise<CommandReply> {
-  const hospitalId = await hospitalForPlan(context, signedIn, request.plan.theatre);
+  const hospitalId = await hospitalForPlan(context, signedIn, { theatre: request.plan.theatre, hospitalId: request.hospitalId });
   const problem = planProblem(request.plan);
   if (problem !== null) throw failure('bad-request', 'plan-inconsistent', problem, 'plan');
   const team = await teamForPlan(context, hospitalId, request);
   const caseId = caseIdFor(signedIn.session.personId, request);
-  const digest = commandDigest({ authorId: signedIn.session.personId, eventAt: request.eventAt, name: 'plan-case', plan: request.plan, team: request.team ?? [] });
+  const digest = commandDigest({ authorId: signedIn.session.personId, eventAt: request.eventAt, name: 'plan-case', plan: request.plan, team: request.team ?? [], ...(request.hospitalId === undefined ? {} : { hospitalId: request.hospitalId }) });
   const planning: Planning = { caseId, hospitalId, digest, request, team };
   return context.queue.run(caseId, async () => {
     const repeated = await repeatedPlanning(context, signedIn, planning);

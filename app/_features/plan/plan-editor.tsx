@@ -6,6 +6,7 @@ import { CaseFields } from '@/app/_features/plan/case-fields';
 import { ChannelsTable } from '@/app/_features/plan/channels-table';
 import { NervesSection } from '@/app/_features/plan/nerves-section';
 import { formFromTemplate, templateOf, type PlanForm } from '@/app/_features/plan/plan-form';
+import type { PlanPlace } from '@/app/_features/plan/plan-places';
 import { planResolver } from '@/app/_features/plan/plan-resolver';
 import { RulesSection } from '@/app/_features/plan/rules-section';
 import { StepsTable } from '@/app/_features/plan/steps-table';
@@ -15,11 +16,11 @@ import { Button } from '@/app/_ui/button';
 import { templates } from '@/lib/reference/templates/templates';
 
 /** The whole plan of a case on one page; everything a template brings can be changed here. */
-export function PlanEditor({ theatreNames }: { readonly theatreNames: readonly string[] }) {
-  const firstTheatre = theatreNames[0] ?? '';
+export function PlanEditor({ places }: { readonly places: readonly PlanPlace[] }) {
+  const [first] = places;
   const start = formFromTemplate(templateOf(templates[0]?.templateId ?? ''));
   const form = useForm<PlanForm>({
-    defaultValues: { ...start, plan: { ...start.plan, theatre: firstTheatre } },
+    defaultValues: { ...start, hospitalId: first?.hospitalId ?? '', plan: { ...start.plan, theatre: first?.theatreNames[0] ?? '' } },
     resolver: planResolver,
     mode: 'onBlur',
     reValidateMode: 'onChange',
@@ -30,19 +31,19 @@ export function PlanEditor({ theatreNames }: { readonly theatreNames: readonly s
   const sentence = problem ?? errors.root?.message ?? (count > 0 ? 'Not planned yet: a field above has a sentence that says what is allowed' : null);
 
   const chooseTemplate = (templateId: string) => {
-    const { plan, identity } = form.getValues();
-    form.reset(formFromTemplate(templateOf(templateId), { identity, side: plan.side, theatre: plan.theatre }));
+    const { plan, identity, hospitalId } = form.getValues();
+    form.reset(formFromTemplate(templateOf(templateId), { identity, hospitalId, side: plan.side, theatre: plan.theatre }));
   };
   return (
     <FormProvider {...form}>
       <form
         method="post"
         noValidate
-        onSubmit={(event) => void form.handleSubmit(({ plan, identity }) => send({ plan, identity }))(event)}
+        onSubmit={(event) => void form.handleSubmit(({ plan, identity, hospitalId }) => send({ plan, identity, ...(places.length > 1 ? { hospitalId } : {}) }))(event)}
         className="mx-auto flex w-full max-w-6xl flex-col px-6 pt-8"
       >
         <h1 className="text-2xl font-bold">Plan a case</h1>
-        <CaseFields theatreNames={theatreNames} onTemplate={chooseTemplate} />
+        <CaseFields places={places} onTemplate={chooseTemplate} />
         <NervesSection />
         <ChannelsTable />
         <StepsTable />

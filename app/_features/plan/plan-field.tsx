@@ -4,6 +4,7 @@ import { get, useFormContext, type FieldPath } from 'react-hook-form';
 
 import { Field } from '@/app/_ui/field';
 import type { PlanForm } from '@/app/_features/plan/plan-form';
+import { mistakeSentence, typedNumber } from '@/app/_features/plan/typed-number';
 
 interface PlanFieldProps {
   readonly name: FieldPath<PlanForm>;
@@ -21,7 +22,7 @@ export function PlanField({ name, isNumeric = false, isKey = false, ...field }: 
   const { register, getValues, formState } = useFormContext<PlanForm>();
   const message = (get(formState.errors, name) as { readonly message?: unknown } | undefined)?.message;
   const bound = isNumeric
-    ? register(name, { valueAsNumber: true })
+    ? register(name, { setValueAs: typedNumber })
     : isKey
       ? register(name, { setValueAs: (typed: string | null) => (typed === null || typed.trim() === '' ? null : typed.trim().toLowerCase()) })
       : register(name);
@@ -33,13 +34,7 @@ export function PlanField({ name, isNumeric = false, isKey = false, ...field }: 
       isNumeric={isNumeric}
       autoComplete="off"
       {...(isKey ? { maxLength: 1 } : {})}
-      error={typeof message === 'string' ? sentenceOf(message, value) : null}
+      error={typeof message === 'string' ? mistakeSentence(message, value) : null}
     />
   );
-}
-
-/** The value that was typed, before the sentence that says what is allowed. */
-function sentenceOf(message: string, value: unknown): string {
-  if (typeof value === 'number' && !Number.isNaN(value)) return `${value}: ${message.charAt(0).toLowerCase()}${message.slice(1)}`;
-  return message;
 }

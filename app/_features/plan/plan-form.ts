@@ -6,17 +6,20 @@ import { templates } from '@/lib/reference/templates/templates';
 export interface PlanForm {
   plan: CasePlan;
   identity: PlanCaseRequest['identity'];
+  /** Where it is planned: asked only of a person of several hospitals. */
+  hospitalId: string;
   /** Keys of the channels that calm depends on. */
   requiredChannelIds: string[];
 }
 
 /** The form as a template fills it, with what was chosen already kept. */
-export function formFromTemplate(template: CasePlan, kept?: Pick<PlanForm, 'identity'> & { side: CasePlan['side']; theatre: string }): PlanForm {
+export function formFromTemplate(template: CasePlan, kept?: Pick<PlanForm, 'identity' | 'hospitalId'> & { side: CasePlan['side']; theatre: string }): PlanForm {
   const required = template.paths.filter((path) => path.isRequired).map((path) => path.channelId);
   const side = kept?.side ?? template.side;
   return {
     plan: { ...template, side, theatre: kept?.theatre ?? '', title: titleForSide(template.title, side) },
     identity: kept?.identity ?? { patientLabel: '', recordNumber: '' },
+    hospitalId: kept?.hospitalId ?? '',
     requiredChannelIds: [...new Set(required)],
   };
 }

@@ -3,6 +3,7 @@
 import { useQuery } from '@tanstack/react-query';
 
 import { PlanEditor } from '@/app/_features/plan/plan-editor';
+import { planPlaces } from '@/app/_features/plan/plan-places';
 import { readSession } from '@/app/_live/api';
 import { EmptyState } from '@/app/_ui/empty-state';
 import { NoticeBar } from '@/app/_ui/notice-bar';
@@ -13,16 +14,13 @@ export function PlanPage() {
   const session = useQuery({ queryKey: ['session'], queryFn: () => readSession() });
   if (session.isPending) return <Skeleton label="Fetching your theatres" rows={8} className="mx-auto w-full max-w-6xl px-6 py-8" />;
   if (session.isError) return <NoticeBar tone="strong">{session.error.message}</NoticeBar>;
-  const { theatres, memberships } = session.data;
-  const plannable = theatres.filter((theatre) =>
-    memberships.some((membership) => membership.hospitalId === theatre.hospitalId && membership.role === 'neurophysiologist'),
-  );
-  if (plannable.length === 0) {
+  const places = planPlaces(session.data);
+  if (places.length === 0) {
     return (
       <div className="mx-auto w-full max-w-6xl px-6 py-8">
         <EmptyState title="No theatre to plan for" text="A case is planned by a neurophysiologist, for a theatre of their hospital. Your account has none; the administrator can add one." />
       </div>
     );
   }
-  return <PlanEditor theatreNames={plannable.map((theatre) => theatre.name)} />;
+  return <PlanEditor places={places} />;
 }

@@ -113,6 +113,8 @@ export const planCaseRequestSchema = z.strictObject({
   commandId: uuid,
   eventAt: moment,
   plan: planSchema,
+  /** Where it is planned; needed only by a person of several hospitals whose theatres share a name. */
+  hospitalId: uuid.optional(),
   /** Who takes part besides the planner: they see the case from then on. */
   team: z.array(z.strictObject({ personId: uuid, role: z.enum(['neurophysiologist', 'surgeon', 'physician']) })).max(12).optional(),
   identity: z.strictObject({ patientLabel: boundedText(120), recordNumber: boundedText(60) }),

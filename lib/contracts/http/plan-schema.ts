@@ -1,11 +1,10 @@
 import { z } from 'zod';
 
 import type { CasePlan } from '@/lib/case/plan';
-import { quantity } from '@/lib/contracts/quantity';
+import { boundedNumber, quantity } from '@/lib/contracts/quantity';
 import { boundedText, pathSlug, slug } from '@/lib/contracts/text-schemas';
 
 const hotkey = z.string().regex(/^[a-z0-9]$/, 'Not a key: one lower-case letter or digit').nullable();
-const share = (min: number, max: number, reason: string) => z.number().min(min, reason).max(max, reason);
 
 const site = z.strictObject({
   id: slug,
@@ -43,26 +42,26 @@ const step = z.strictObject({
   hotkey,
 });
 
-const percent = share(1, 99, 'Out of range: 1 to 99 % is allowed');
+const percent = boundedNumber(1, 99, '1 to 99 % is allowed');
 const rules = z.strictObject({
   version: z.literal(1),
   amplitudeWatchFallPercent: percent,
   amplitudeNoticeFallPercent: percent,
   onsetNoticeRisePercent: percent,
-  onsetNoticeRiseMs: share(0.05, 5, 'Out of range: 0.05 to 5 ms is allowed'),
+  onsetNoticeRiseMs: boundedNumber(0.05, 5, '0.05 to 5 ms is allowed'),
   segmentTimeRisePercent: percent,
-  segmentTimeRiseMs: share(0.05, 5, 'Out of range: 0.05 to 5 ms is allowed'),
+  segmentTimeRiseMs: boundedNumber(0.05, 5, '0.05 to 5 ms is allowed'),
   amplitudeRatioFallPercent: percent,
-  lostBelowPercent: share(1, 20, 'Out of range: 1 to 20 % is allowed'),
-  recoveryMarginPercent: share(1, 30, 'Out of range: 1 to 30 % is allowed'),
-  worseningPercent: share(5, 50, 'Out of range: 5 to 50 points are allowed'),
-  freshnessMinutes: share(1, 30, 'Out of range: 1 to 30 min is allowed'),
-  repeatWithinSeconds: share(10, 600, 'Out of range: 10 to 600 s is allowed'),
-  repeatLostWithinSeconds: share(10, 600, 'Out of range: 10 to 600 s is allowed'),
-  tellWithinSeconds: share(10, 600, 'Out of range: 10 to 600 s is allowed'),
-  assumedAmplitudeScatter: share(0.01, 0.5, 'Out of range: 0.01 to 0.5 is allowed'),
-  distanceErrorMm: share(0.5, 20, 'Out of range: 0.5 to 20 mm is allowed'),
-  markerErrorMs: share(0.005, 1, 'Out of range: 0.005 to 1 ms is allowed'),
+  lostBelowPercent: boundedNumber(1, 20, '1 to 20 % is allowed'),
+  recoveryMarginPercent: boundedNumber(1, 30, '1 to 30 % is allowed'),
+  worseningPercent: boundedNumber(5, 50, '5 to 50 points are allowed'),
+  freshnessMinutes: boundedNumber(1, 30, '1 to 30 min is allowed'),
+  repeatWithinSeconds: boundedNumber(10, 600, '10 to 600 s is allowed'),
+  repeatLostWithinSeconds: boundedNumber(10, 600, '10 to 600 s is allowed'),
+  tellWithinSeconds: boundedNumber(10, 600, '10 to 600 s is allowed'),
+  assumedAmplitudeScatter: boundedNumber(0.01, 0.5, '0.01 to 0.5 is allowed'),
+  distanceErrorMm: boundedNumber(0.5, 20, '0.5 to 20 mm is allowed'),
+  markerErrorMs: boundedNumber(0.005, 1, '0.005 to 1 ms is allowed'),
 });
 
 /** The plan of a case as it comes from the plan page. Relations between its parts are checked by `planProblem`. */
