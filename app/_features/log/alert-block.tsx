@@ -1,6 +1,5 @@
 'use client';
 
-import { incidentsInOrder } from '@/app/_features/log/worst-incident';
 import { useLogCase } from '@/app/_features/log/log-context';
 import { useNow } from '@/app/_live/use-now';
 import { Band } from '@/app/_ui/band';
@@ -8,8 +7,10 @@ import { Button } from '@/app/_ui/button';
 import { PriorityMark } from '@/app/_ui/priority-mark';
 import type { Incident } from '@/lib/case/case-state';
 import { actionNames } from '@/lib/text/action-names';
-import { clockTime, durationWords } from '@/lib/text/format';
+import { durationWords } from '@/lib/text/format';
+import { handlingWords } from '@/lib/text/handling-words';
 import { incidentLine } from '@/lib/text/incident-line';
+import { incidentsInOrder } from '@/lib/text/incidents-in-order';
 import { sayThis } from '@/lib/text/say-this';
 import { msOfMoment } from '@/lib/units/ms-of-moment';
 
@@ -64,14 +65,4 @@ function SayLine({ words }: { readonly words: string }) {
       {`“${words}”`}
     </p>
   );
-}
-
-function handlingWords(incident: Incident, timeZone: string): string {
-  const done = [
-    incident.toldAt === null ? 'Not told yet' : `Told ${clockTime(incident.toldAt, timeZone)}`,
-    incident.readBackAt === null ? null : `read back ${clockTime(incident.readBackAt, timeZone)}`,
-    incident.actedAt === null ? null : `${incident.action ?? 'action'} ${clockTime(incident.actedAt, timeZone)}`,
-    incident.recoveredAt === null ? null : `back ${clockTime(incident.recoveredAt, timeZone)}`,
-  ];
-  return done.filter((words) => words !== null).join(', ');
 }

@@ -1,11 +1,11 @@
 'use client';
 
 import { useLogCase } from '@/app/_features/log/log-context';
-import { incidentsInOrder } from '@/app/_features/log/worst-incident';
 import { Band } from '@/app/_ui/band';
 import { joinClasses } from '@/app/_ui/join-classes';
 import { PriorityMark } from '@/app/_ui/priority-mark';
 import { incidentLine } from '@/lib/text/incident-line';
+import { incidentsInOrder } from '@/lib/text/incidents-in-order';
 
 /** Every open notice and alert in one line each, with its mark. */
 export function OpenAlerts({ className }: { readonly className?: string }) {

@@ -1,7 +1,7 @@
-import { theatreMark } from '@/app/_features/theatre/theatre-marks';
 import { joinClasses } from '@/app/_ui/join-classes';
 import { PriorityMark } from '@/app/_ui/priority-mark';
 import { nonBreakingSpace } from '@/lib/text/format';
+import { stateMark } from '@/lib/text/state-mark';
 import type { TheatreLine } from '@/lib/text/theatre-line';
 
 /**
@@ -18,7 +18,7 @@ export function LeadBand({ line }: { readonly line: TheatreLine }) {
       return (
         <section className="border-y border-rule px-(--edge-room) py-[0.55em] text-(length:--needed)">
           <div className="flex w-fit max-w-full items-center gap-[0.35em] border-[0.06em] border-low px-[0.35em] py-[0.12em] text-[calc(var(--headline)*0.85)] text-low">
-            <PriorityMark kind={theatreMark(line)} className="size-[0.8em] shrink-0" />
+            <PriorityMark kind={stateMark(line)} className="size-[0.8em] shrink-0" />
             <Headline text={line.headline} />
           </div>
           <Detail text={line.detail} className="mt-[0.4em] text-ink" />
@@ -28,7 +28,7 @@ export function LeadBand({ line }: { readonly line: TheatreLine }) {
       return (
         <section className={joinClasses('flex items-center border-y border-rule text-(length:--needed)', line.isCalm && 'bg-raised')}>
           <div className="flex w-full items-center gap-(--edge-room) px-(--edge-room) py-[0.8em]">
-            <PriorityMark kind={theatreMark(line)} className="w-[calc(var(--headline)*1.15)] shrink-0" />
+            <PriorityMark kind={stateMark(line)} className="w-[calc(var(--headline)*1.15)] shrink-0" />
             <Words line={line} detailClassName="text-second" />
           </div>
         </section>

@@ -2,12 +2,12 @@
 
 import { useRef } from 'react';
 
-import { pastHeadline, staysLarge } from '@/app/_features/theatre/past-words';
-import { theatreMark } from '@/app/_features/theatre/theatre-marks';
 import { useWallType } from '@/app/_features/theatre/use-wall-type';
 import type { WallSettings } from '@/app/_features/theatre/wall-settings';
 import { joinClasses } from '@/app/_ui/join-classes';
 import { PriorityMark } from '@/app/_ui/priority-mark';
+import { pastHeadline, staysLarge } from '@/lib/text/past-headline';
+import { stateMark } from '@/lib/text/state-mark';
 import type { TheatreLine } from '@/lib/text/theatre-line';
 
 interface NotLivePictureProps {
@@ -43,7 +43,7 @@ export function NotLivePicture({ place, procedure, reason, lastLive, lines, sett
         <ul className="flex flex-col gap-[0.6em]">
           {lines.map((line) => (
             <li key={`${line.kind}-${line.nerveId ?? ''}-${line.headline}`} className={joinClasses('flex items-center gap-[0.5em]', staysLarge(line) ? 'text-(length:--headline) leading-[1.06] font-bold' : 'text-second')}>
-              {line.priority === null ? null : <PriorityMark kind={theatreMark(line)} className="size-[0.95em] shrink-0" />}
+              {line.priority === null ? null : <PriorityMark kind={stateMark(line)} className="size-[0.95em] shrink-0" />}
               <span className="min-w-0 text-balance wrap-anywhere">{pastHeadline(line)}</span>
             </li>
           ))}

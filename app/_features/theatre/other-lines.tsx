@@ -1,6 +1,6 @@
-import { theatreMark } from '@/app/_features/theatre/theatre-marks';
 import { joinClasses } from '@/app/_ui/join-classes';
 import { PriorityMark } from '@/app/_ui/priority-mark';
+import { stateMark } from '@/lib/text/state-mark';
 import type { TheatreLine } from '@/lib/text/theatre-line';
 
 const labelClasses = {
@@ -18,7 +18,7 @@ export function OtherLines({ lines }: { readonly lines: readonly TheatreLine[] }
       {lines.map((line) => (
         <li key={`${line.kind}-${line.nerveId ?? ''}-${line.headline}`} className="flex flex-wrap items-baseline gap-x-[0.8em] py-[0.2em]">
           <strong className={joinClasses('inline-flex items-baseline gap-[0.4em] font-bold', labelClasses[line.priority ?? 'none'])}>
-            <PriorityMark kind={theatreMark(line)} className="size-[0.8em] shrink-0 self-center" />
+            <PriorityMark kind={stateMark(line)} className="size-[0.8em] shrink-0 self-center" />
             {line.headline}
           </strong>
           {line.detail === '' ? null : <span className="min-w-0 flex-1 basis-[12em] text-second text-pretty">{line.detail}</span>}

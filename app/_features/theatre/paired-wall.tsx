@@ -4,13 +4,13 @@ import { NotLivePicture } from '@/app/_features/theatre/not-live-picture';
 import { notLiveReason } from '@/app/_features/theatre/not-live-reason';
 import { TheatrePicture } from '@/app/_features/theatre/theatre-picture';
 import { usePaintConfirmation } from '@/app/_features/theatre/use-paint-confirmation';
-import { wallNerves } from '@/app/_features/theatre/wall-nerves';
 import type { WallSettings } from '@/app/_features/theatre/wall-settings';
 import { NotLiveLayer } from '@/app/_live/not-live-layer';
 import { useCaseFeed, type FollowedCase } from '@/app/_live/use-case-feed';
 import { useIsLive } from '@/app/_live/use-is-live';
 import { useNow } from '@/app/_live/use-now';
 import type { CaseState } from '@/lib/case/case-state';
+import { shownNerves } from '@/lib/chart/shown-nerves';
 import { clockTime } from '@/lib/text/format';
 import { theatreView } from '@/lib/text/theatre-view';
 
@@ -61,7 +61,7 @@ function LivePicture({ feed, state, checkedAt, timeZone, settings }: ShownCase &
       isLive={isLive}
       deskWords={feed.deskConnected ? null : deskWords(feed.deskSince, timeZone)}
       view={view}
-      nerves={wallNerves(state, view.lead.kind, nowMs)}
+      nerves={shownNerves(state, view.lead.kind, nowMs)}
       settings={settings}
     />
   );

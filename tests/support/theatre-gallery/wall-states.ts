@@ -1,4 +1,4 @@
-import { wallNerves } from '@/app/_features/theatre/wall-nerves';
+import { shownNerves } from '@/lib/chart/shown-nerves';
 import type { NerveLineView } from '@/lib/chart/nerve-line';
 import type { CasePlan } from '@/lib/case/plan';
 import type { CaseState } from '@/lib/case/case-state';
@@ -28,7 +28,7 @@ function shown(state: CaseState, time: string): WallState {
     procedure: state.plan.procedure,
     clock: time,
     view,
-    nerves: wallNerves(state, view.lead.kind, nowMs),
+    nerves: shownNerves(state, view.lead.kind, nowMs),
   };
 }
 

@@ -6,11 +6,11 @@ import { CommandDialog } from '@/app/_features/log/command-dialog';
 import { EndFirstDialog } from '@/app/_features/log/dialogs/end-first-dialog';
 import { dueTasks } from '@/app/_features/log/due-tasks';
 import { useLogCase } from '@/app/_features/log/log-context';
-import { incidentsInOrder } from '@/app/_features/log/worst-incident';
 import { useNow } from '@/app/_live/use-now';
 import { Field } from '@/app/_ui/field';
 import { actionNames } from '@/lib/text/action-names';
 import { incidentHeadline } from '@/lib/text/incident-headline';
+import { incidentsInOrder } from '@/lib/text/incidents-in-order';
 
 /** Closing ends the wall and takes no more entries. An open alert is ended first; an open notice is ticked; what is due is named. */
 export function CloseDialog({ onClose }: { readonly onClose: () => void }) {

@@ -2,11 +2,11 @@
 
 import { ConsoleDialog } from '@/app/_features/log/console-dialog';
 import { useLogCase } from '@/app/_features/log/log-context';
-import { incidentsInOrder } from '@/app/_features/log/worst-incident';
 import { Button } from '@/app/_ui/button';
 import { PriorityMark } from '@/app/_ui/priority-mark';
 import { actionNames } from '@/lib/text/action-names';
 import { incidentLine } from '@/lib/text/incident-line';
+import { incidentsInOrder } from '@/lib/text/incidents-in-order';
 
 /** What stands in the way of closing: each open alert in words, with the way to end it. Nothing is closed from here. */
 export function EndFirstDialog({ onClose }: { readonly onClose: () => void }) {

@@ -6,8 +6,17 @@ import type { TheatreKind } from '@/lib/text/theatre-line';
 
 const notMonitored: readonly TheatreKind[] = ['set-up', 'paused', 'take-down'];
 
-/** The nerves a wall draws: those at risk and those with an open alert; none once the case is closed. */
-export function wallNerves(state: CaseState, lead: TheatreKind, nowMs: number): readonly NerveLineView[] {
+/**
+ * The nerves that are drawn of a case: those at risk and those with an open alert; none once the case is closed.
+ * @param lead the state that leads the screen
+ * @param nowMs time of the picture, Unix ms
+ * @returns nerve lines, as outlines while nothing is monitored
+ * @source product rule (nerve line)
+ * @accuracy tests/lib/chart/shown-nerves.test.ts
+ * @example
+ * shownNerves(state, 'stable', nowMs).map((view) => view.nerveId) // => ['ulnar']
+ */
+export function shownNerves(state: CaseState, lead: TheatreKind, nowMs: number): readonly NerveLineView[] {
   if (lead === 'closed') return [];
   return state.plan.nerves
     .filter((nerve) => nerve.role === 'at-risk' || state.incidents[nerve.id] !== undefined)
