@@ -1,3 +1,5 @@
+import { velocityDigits } from '@/lib/text/velocity-digits';
+
 /** A space that does not break, between a number and its unit. */
 export const nonBreakingSpace = '\u00a0';
 const minus = '\u2212';
@@ -59,9 +61,9 @@ export function millivolts(amplitudeUv: number): string {
   return `${decimal(amplitudeUv / 1000, 1)}${nonBreakingSpace}mV`;
 }
 
-/** A velocity in whole m/s. @param value in m/s @returns "31 m/s" @source house rule @example metresPerSecond(31.4) // => '31 m/s' */
+/** A velocity in whole m/s, with one digit when very slow. @param value in m/s @returns "31 m/s", "3.5 m/s" @source house rule @example metresPerSecond(31.4) // => '31 m/s' */
 export function metresPerSecond(value: number): string {
-  return `${decimal(Math.round(value), 0)}${nonBreakingSpace}m/s`;
+  return `${decimal(value, velocityDigits(value))}${nonBreakingSpace}m/s`;
 }
 
 /**

@@ -11,6 +11,7 @@ import { ulnarAtElbow } from '@/lib/reference/templates/ulnar-at-elbow';
 import { connectViewer, type Viewer } from '@/tests/server/house/viewer';
 import { launchChromium } from '@/tests/support/chromium';
 import { DeskPerson } from '@/tests/support/desk-person';
+import { takeSession } from '@/tests/support/demo-session';
 import { HttpDesk } from '@/tests/support/http-desk';
 import { buildForTests, root } from '@/tests/support/product-build';
 import { startProduct, type Product } from '@/tests/support/start-product';
@@ -65,6 +66,14 @@ async function quietCase(product: Product): Promise<HttpDesk> {
   return http;
 }
 
+/** Cases beside the one that is monitored: one planned, one closed. */
+async function fillList(product: Product): Promise<void> {
+  await HttpDesk.plan(product, { ...sciaticAtHip, theatre: 'Theatre 1', side: 'right' });
+  const closed = await HttpDesk.plan(product, { ...ulnarAtElbow, title: 'Right ulnar nerve, decompression', side: 'right', theatre: 'Theatre 5' });
+  await closed.give({ name: 'open-case', clockOffsetMs: 0 }, { agoS: 900 });
+  await closed.give({ name: 'close-case', text: null }, { agoS: 600 });
+}
+
 async function shootDesk(browser: Browser, product: Product): Promise<void> {
   const http = await quietCase(product);
   const desks = await Promise.all(
@@ -81,7 +90,9 @@ async function shootDesk(browser: Browser, product: Product): Promise<void> {
     }
   };
   await each('sign-in', async (desk) => (await desk.goTo('/sign-in'), desk.button('Surgeon').waitFor()));
-  await each('cases', async (desk) => (await desk.signIn(), desk.page.getByRole('link', { name: /^Log of/ }).first().waitFor()));
+  await fillList(product);
+  // One code signs in once: both browsers take the session of the desk that planned.
+  await each('cases', async (desk) => (await takeSession(desk.watched.context, product, 'desk@demo.example'), await desk.goTo('/cases'), desk.page.getByRole('link', { name: /^Log of/ }).first().waitFor()));
   await each('plan', async (desk) => (await desk.goTo('/plan'), desk.button('Plan case').waitFor()));
   for (const { theme, desk } of desks) await desk.page.screenshot({ path: path.join(folder, `plan-whole-${theme}.png`), fullPage: true });
   const toLog = async (desk: DeskPerson) => (await desk.goTo(`/cases/${http.caseId}/log`), desk.focusSites());

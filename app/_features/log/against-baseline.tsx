@@ -1,6 +1,7 @@
+import { velocityWithError } from '@/app/_features/log/velocity-with-error';
 import { joinClasses } from '@/app/_ui/join-classes';
 import type { Finding, PathJudgement, SegmentJudgement } from '@/lib/alert/judgement';
-import { decimal, percent, signed } from '@/lib/text/format';
+import { percent, signed } from '@/lib/text/format';
 import { notComparedWords } from '@/lib/text/reason-words';
 
 /** What the judge would say of one channel of the run in the form. */
@@ -18,7 +19,7 @@ export function AgainstBaseline({ preview }: { readonly preview: ChannelPreview 
       {path.kind === 'compared' ? <ChangeWords path={path} /> : <span className="font-sans text-sm text-second">{`Not compared, ${notComparedWords[path.reason]}`}</span>}
       {segment?.velocity.kind === 'velocity' ? (
         <span className={segment.velocity.isImplausible ? 'font-bold' : 'text-second'}>
-          {`${decimal(Math.round(segment.velocity.velocityMps), 0)}\u00a0±${Math.ceil(segment.velocity.standardErrorMps)}\u00a0m/s`}
+          {`${velocityWithError(segment.velocity.velocityMps, segment.velocity.standardErrorMps).replace(' ', '\u00a0')}\u00a0m/s`}
         </span>
       ) : null}
     </span>

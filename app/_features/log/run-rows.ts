@@ -1,5 +1,6 @@
 import { shownAmplitude } from '@/app/_features/log/run-from-draft';
 import type { RowTone, RunRow } from '@/app/_features/log/log-row-model';
+import { velocityWithError } from '@/app/_features/log/velocity-with-error';
 import type { Finding, PathJudgement, SegmentJudgement } from '@/lib/alert/judgement';
 import type { EntryBodies } from '@/lib/case/entry-bodies';
 import type { CasePlan } from '@/lib/case/plan';
@@ -81,7 +82,7 @@ function velocity(segment: SegmentJudgement | undefined, isAlert: boolean): Pick
   if (segment?.velocity.kind !== 'velocity') return { velocity: dash, velocityTone: 'plain' };
   const { velocityMps, standardErrorMps } = segment.velocity;
   return {
-    velocity: `${decimal(Math.round(velocityMps), 0)} ±${Math.max(1, Math.round(standardErrorMps))}`,
+    velocity: velocityWithError(velocityMps, standardErrorMps),
     velocityTone: toneOf(segment.findings, ['segment-slowed', 'ratio-fall'], isAlert),
   };
 }
