@@ -35,6 +35,7 @@ export interface CommandDoors {
 export interface QueryDoors {
   session: { input: Record<string, never>; answer: SessionReply };
   cases: { input: Record<string, never>; answer: CaseListReply };
+  'case-access': { input: { caseId: string }; answer: { readonly caseId: string } };
   'case-head': { input: { caseId: string }; answer: CaseHeadReply };
   'case-entries': { input: { caseId: string; after: number; limit: number }; answer: EntriesReply };
   screens: { input: { caseId: string }; answer: ScreensReply };

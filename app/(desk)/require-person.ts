@@ -11,7 +11,7 @@ export async function requirePerson(): Promise<void> {
 
 /** A case that this person may not see is not there, in the page as in the interface. */
 export async function requireCase(caseId: string): Promise<void> {
-  const reply = await globalThis.fascicle.query('case-head', { caseId }, sourceOf(await headers()));
+  const reply = await globalThis.fascicle.query('case-access', { caseId }, sourceOf(await headers()));
   if (reply.isOk) return;
   if (reply.status === 401) redirect('/sign-in');
   if (reply.status === 404 || reply.status === 400) notFound();

@@ -2,6 +2,7 @@ import { requireSession } from '@/server/auth/read-session';
 import type { Door } from '@/server/doors/door-parts';
 import { failure } from '@/server/failure';
 import type { QueryDoors } from '@/server/fascicle-global';
+import { caseAccess } from '@/server/queries/case-access';
 import { caseEntries } from '@/server/queries/case-entries';
 import { caseHead } from '@/server/queries/case-head';
 import { casesForActor } from '@/server/queries/cases-for-actor';
@@ -15,6 +16,7 @@ import { sessionForActor } from '@/server/queries/session-for-actor';
 export const queryDoors: { readonly [Name in keyof QueryDoors]: Door<QueryDoors[Name]['input'], QueryDoors[Name]['answer']> } = {
   session: async ({ context }, _input, { cookie }) => sessionForActor(context, await requireSession(context, cookie)),
   cases: async ({ context }, _input, { cookie }) => casesForActor(context, await requireSession(context, cookie)),
+  'case-access': async ({ context }, { caseId }, { cookie }) => caseAccess(context, await requireSession(context, cookie), caseId),
   'case-head': async ({ context }, { caseId }, { cookie }) => caseHead(context, await requireSession(context, cookie), caseId),
   'case-entries': async ({ context }, asked, { cookie }) => caseEntries(context, (await requireSession(context, cookie)).actor, asked),
   screens: async ({ context, presence }, { caseId }, { cookie }) => screensOfCase(context, presence, await requireSession(context, cookie), caseId),
