@@ -33,6 +33,7 @@ function ShapeElement({ shape }: { readonly shape: Shape }) {
           y2={shape.y2}
           strokeWidth={shape.widthPx}
           strokeDasharray={shape.dashPx?.join(' ')}
+          strokeDashoffset={shape.dashOffsetPx}
         />
       );
     case 'rect':

@@ -3,9 +3,12 @@ import type { CaseState, PathRecord } from '@/lib/case/case-state';
 import { pathIdOf } from '@/lib/case/keys';
 import { brokenText } from '@/lib/chart/broken-text';
 import { findingPriority } from '@/lib/chart/finding-priority';
+import { findingsOf } from '@/lib/chart/findings-of';
+import { isLastNotCompared } from '@/lib/chart/is-last-not-compared';
 import type { NerveLineSegment } from '@/lib/chart/nerve-line';
 import { nerveLineSite } from '@/lib/chart/nerve-line-site';
 import { siteShare } from '@/lib/chart/site-share';
+import { standingText } from '@/lib/chart/standing-text';
 import { testedSince } from '@/lib/chart/tested-since';
 import { milliseconds } from '@/lib/text/format';
 
@@ -30,19 +33,25 @@ import { milliseconds } from '@/lib/text/format';
  */
 export function distalSegment(state: CaseState, nerve: Nerve, site: Site, channelId: string, endMm: number, nowMs: number): NerveLineSegment {
   const record = state.paths[pathIdOf(site.id, channelId)];
-  const isUntested = record?.compared == null || record.compared.at < testedSince(state, nerve.id);
+  const isNotCompared = isLastNotCompared(record);
+  const isUntested = isNotCompared || record?.compared == null || record.compared.at < testedSince(state, nerve.id);
   const share = siteShare(record);
   const isBroken = !isUntested && share === 0;
   const onset = onsetText(record);
+  const isOlder = isUntested && record?.compared != null;
+  const findings = record?.compared?.findings ?? [];
+  const priority = findingPriority(findings, state.incidents[nerve.id]);
   return {
     key: `${channelId}|${site.id}|end`,
     fromMm: site.positionMm,
     toMm: endMm,
     amplitudeShare: share,
     velocityShare: onsetShare(record),
-    ...(isBroken ? brokenText(record) : { text: onset, shortText: onset }),
-    priority: findingPriority(record?.compared?.findings ?? [], state.incidents[nerve.id]),
+    ...(isBroken ? brokenText(record) : standingText({ text: onset, shortText: onset }, isOlder ? 'older' : 'current')),
+    priority,
+    textPriority: isBroken ? priority : findingPriority(findingsOf(findings, 'time'), state.incidents[nerve.id]),
     isUntested,
+    isNotCompared,
     isDim: nerveLineSite(state, nerve, site, channelId, nowMs).isDim,
     isBroken,
     isShort: false,

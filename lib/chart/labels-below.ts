@@ -24,7 +24,7 @@ export interface LabelsBelow {
  * Velocities under their segments, and under them the age of each response at its site.
  *
  * Method: full words in one row or two; else short words in as many rows as it takes. No text is cut or left out; ages
- * are left out only when the caller asks for none.
+ * are left out only when the caller asks for none, and never that of a response that is older.
  *
  * @param view the nerve line; not modified
  * @param sizes its lengths
@@ -42,11 +42,11 @@ export function labelsBelow(view: NerveLineView, sizes: NerveLineSizes, toX: (po
       role: 'velocity',
       x: (toX(segment.fromMm) + toX(segment.toMm)) / 2,
       text: isShort ? segment.shortText : segment.text,
-      tone: toneOf(segment.priority, 'second'),
-      isBold: segment.priority !== null,
+      tone: toneOf(segment.textPriority, 'second'),
+      isBold: segment.textPriority !== null,
     }));
   const ages = view.sites.flatMap<Caption>((site) =>
-    sizes.hasAges && site.ageText !== null
+    (sizes.hasAges || site.isDim) && site.ageText !== null
       ? [{ key: `age-${site.siteId}`, role: 'age', x: toX(site.positionMm), text: `${site.ageText} ago`, tone: 'second', isBold: false }]
       : [],
   );

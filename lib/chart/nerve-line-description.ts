@@ -13,8 +13,8 @@ export function nerveLineDescription(view: Omit<NerveLineView, 'description'>): 
   const names = [...view.sites.map((site) => site.name), view.end?.name ?? 'the channel'];
   const sites = view.sites.map((site) => `${site.name} ${site.text}${site.ageText === null ? '' : `, ${site.ageText} ago`}.`);
   const segments = view.segments.map((segment, index) => {
-    const state = segment.isUntested ? ', not tested since' : '';
-    const words = `${segment.text}${state}`.replace(/^, /, '');
+    const state = segment.isNotCompared ? 'not compared' : segment.isUntested ? 'not tested since' : '';
+    const words = segment.text.endsWith(state) ? segment.text : `${segment.text}, ${state}`.replace(/^, /, '');
     return words === '' ? '' : `${names[index] ?? ''} to ${lowerFirst(names[index + 1] ?? '', index + 1 === names.length - 1)}: ${words}.`;
   });
   return [`${view.nerveName} nerve, recorded at ${view.end?.name ?? 'no channel'}.`, ...sites, ...segments.filter((sentence) => sentence !== '')].join(' ');

@@ -3,9 +3,12 @@ import type { Priority, SegmentJudgement } from '@/lib/alert/judgement';
 import type { CaseState, PathRecord } from '@/lib/case/case-state';
 import { pathIdOf, segmentKey } from '@/lib/case/keys';
 import { findingPriority } from '@/lib/chart/finding-priority';
+import { findingsOf } from '@/lib/chart/findings-of';
 import type { NerveLineSegment } from '@/lib/chart/nerve-line';
+import { isLastNotCompared } from '@/lib/chart/is-last-not-compared';
 import { nerveLineSite } from '@/lib/chart/nerve-line-site';
 import { siteShare } from '@/lib/chart/site-share';
+import type { Standing } from '@/lib/chart/standing-text';
 import { testedSince } from '@/lib/chart/tested-since';
 import { velocityText } from '@/lib/chart/velocity-text';
 import { brokenText } from '@/lib/chart/broken-text';
@@ -17,7 +20,8 @@ import { shortSegmentMm } from '@/lib/conduction/short-segment-mm';
  * Method: the amplitude share is the proximal response over the distal one now, against the same ratio at baseline; so
  * a lesion is thin where it is and the nerve above keeps its thickness. It needs comparable runs at both ends, and it
  * cannot be told when there is no response from the distal end. The velocity share is
- * conduction time at baseline over the time now: the distance is the same, so its error cancels.
+ * conduction time at baseline over the time now: the distance is the same, so its error cancels. The velocity takes a
+ * priority only where the conduction time passed its limit.
  *
  * @param state the case; not modified
  * @param nerve the nerve of both sites
@@ -35,8 +39,10 @@ export function nerveLineSegment(state: CaseState, nerve: Nerve, proximal: Site,
   const key = segmentKey(channelId, proximal.id, distal.id);
   const ends = [state.paths[pathIdOf(proximal.id, channelId)], state.paths[pathIdOf(distal.id, channelId)]] as const;
   const segment = state.segments[key];
-  const isUntested = !ends.every((end) => isTested(end, testedSince(state, nerve.id)));
+  const isNotCompared = ends.some(isLastNotCompared);
+  const isUntested = isNotCompared || !ends.every((end) => isTested(end, testedSince(state, nerve.id)));
   const amplitudeShare = ratio(siteShare(ends[0]), siteShare(ends[1]));
+  const priority = segmentPriority(state, nerve.id, key, proximal, distal);
   const isBroken = !isUntested && ends[0]?.compared?.reading.kind === 'absent' && amplitudeShare === 0;
   return {
     key,
@@ -44,9 +50,11 @@ export function nerveLineSegment(state: CaseState, nerve: Nerve, proximal: Site,
     toMm: distal.positionMm,
     amplitudeShare,
     velocityShare: velocityShare(segment),
-    ...(isBroken ? brokenText(ends[0]) : velocityText(segment)),
-    priority: segmentPriority(state, nerve.id, key, proximal, distal),
+    ...(isBroken ? brokenText(ends[0]) : velocityText(segment, standingOf(segment, ends, testedSince(state, nerve.id)))),
+    priority,
+    textPriority: isBroken ? priority : findingPriority(findingsOf(segment?.findings ?? [], 'time'), state.incidents[nerve.id]),
     isUntested,
+    isNotCompared,
     isDim: [proximal, distal].some((site) => nerveLineSite(state, nerve, site, channelId, nowMs).isDim),
     isBroken,
     isShort: distal.positionMm - proximal.positionMm < shortSegmentMm.value,
@@ -55,6 +63,16 @@ export function nerveLineSegment(state: CaseState, nerve: Nerve, proximal: Site,
 
 function isTested(record: PathRecord | undefined, since: string): boolean {
   return record?.compared != null && record.compared.at >= since;
+}
+
+/** Before the first baseline there is nothing to compare with, and nothing is older. */
+function standingOf(segment: SegmentJudgement | undefined, ends: readonly (PathRecord | undefined)[], since: string): Standing {
+  if (segment === undefined || ends.some((end) => end?.lastNotCompared === 'no-baseline')) return 'current';
+  const runAts = [segment.proximalAt, segment.distalAt];
+  if (runAts.every((at) => at < since)) return 'older';
+  const notCompared = [0, 1].filter((index) => isLastNotCompared(ends[index]));
+  if (notCompared.length === 0) return 'current';
+  return notCompared.some((index) => ends[index]?.lastAt === runAts[index]) ? 'not-compared' : 'older';
 }
 
 function ratio(proximal: number | null, distal: number | null): number | null {

@@ -2,6 +2,7 @@ import type { Nerve, Site } from '@/lib/alert/nerve-plan';
 import type { CaseState, PathRecord } from '@/lib/case/case-state';
 import { pathIdOf } from '@/lib/case/keys';
 import { findingPriority } from '@/lib/chart/finding-priority';
+import { findingsOf } from '@/lib/chart/findings-of';
 import type { NerveLineSite } from '@/lib/chart/nerve-line';
 import { testedSince } from '@/lib/chart/tested-since';
 import { durationWords, millivolts, percent } from '@/lib/text/format';
@@ -10,7 +11,8 @@ import { durationWords, millivolts, percent } from '@/lib/text/format';
  * One site of the nerve line: the response from there as % of baseline, with its age.
  *
  * Method: the newest comparable run is shown; before there is one, the newest reading with its own unit. No response
- * is "none", never 0 %. Dim means older than the last risk step or than the freshness limit, it does not mean harmless.
+ * is "none", never 0 %. Dim means older than the last risk step, than the freshness limit or than a run that is not
+ * compared; it does not mean harmless. The response takes a priority only where its amplitude passed a limit.
  *
  * @param state the case; not modified
  * @param nerve the nerve of the site
@@ -27,6 +29,7 @@ export function nerveLineSite(state: CaseState, nerve: Nerve, site: Site, channe
   const record = state.paths[pathIdOf(site.id, channelId)];
   const shownAt = record?.compared?.at ?? record?.lastAt ?? null;
   const ageMs = shownAt === null ? null : Math.max(0, nowMs - Date.parse(shownAt));
+  const findings = record?.compared?.findings ?? [];
   const isOld = ageMs === null || ageMs > state.plan.rules.freshnessMinutes * 60_000;
   return {
     siteId: site.id,
@@ -34,8 +37,9 @@ export function nerveLineSite(state: CaseState, nerve: Nerve, site: Site, channe
     positionMm: site.positionMm,
     text: record === undefined ? 'not tested' : responseText(record),
     ageText: ageMs === null ? null : durationWords(ageMs),
-    priority: findingPriority(record?.compared?.findings ?? [], state.incidents[nerve.id]),
-    isDim: isOld || record?.compared == null || shownAt === null || shownAt < lastRiskStep(state, nerve.id),
+    priority: findingPriority(findings, state.incidents[nerve.id]),
+    textPriority: findingPriority(findingsOf(findings, 'amplitude'), state.incidents[nerve.id]),
+    isDim: isOld || record?.compared == null || record.lastNotCompared !== null || shownAt === null || shownAt < lastRiskStep(state, nerve.id),
   };
 }
 

@@ -8,7 +8,9 @@ export interface NerveLineSite {
   readonly text: string;
   readonly ageText: string | null;
   readonly priority: Priority | null;
-  /** True for a response older than the last risk step or than the freshness limit. */
+  /** Priority of the response shown; null where only its time passed a limit. */
+  readonly textPriority: Priority | null;
+  /** True for a response older than the last risk step, the freshness limit or a run that is not compared. */
   readonly isDim: boolean;
 }
 
@@ -25,8 +27,12 @@ export interface NerveLineSegment {
   readonly text: string;
   readonly shortText: string;
   readonly priority: Priority | null;
-  /** True without a comparable run at both ends after the last risk step and after the first run of an open alert. */
+  /** Priority of the text; null where only the amplitude passed a limit. */
+  readonly textPriority: Priority | null;
+  /** True without a comparable run at both ends, each the newest there, after the last risk step and the first run of an open alert. */
   readonly isUntested: boolean;
+  /** True while the newest run at either end cannot be set against its baseline. */
+  readonly isNotCompared: boolean;
   /** True when the response at either end is dim. */
   readonly isDim: boolean;
   readonly isBroken: boolean;

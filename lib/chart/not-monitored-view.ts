@@ -1,7 +1,8 @@
-import type { NerveLineView } from '@/lib/chart/nerve-line';
+import type { NerveLineSegment, NerveLineView } from '@/lib/chart/nerve-line';
+import { standingText } from '@/lib/chart/standing-text';
 
 /**
- * The nerve line while nothing is monitored: the last values stay, as outlines and dim.
+ * The nerve line while nothing is monitored: the last values stay, in the past tense, as outlines and dim.
  * @param view the nerve line; not modified
  * @returns the same nerve with every site dim and every segment an outline
  * @source product rule: only stable and improved look calm
@@ -13,6 +14,12 @@ export function notMonitoredView(view: NerveLineView): NerveLineView {
   return {
     ...view,
     sites: view.sites.map((site) => ({ ...site, isDim: true })),
-    segments: view.segments.map((segment) => ({ ...segment, isDim: true, isUntested: true })),
+    segments: view.segments.map((segment) => ({ ...segment, ...pastText(segment), isDim: true, isUntested: true })),
   };
+}
+
+/** Only a measured value was; a reason without a number still holds. */
+function pastText(segment: NerveLineSegment) {
+  const isMeasured = !segment.isUntested && /\d/.test(segment.text);
+  return standingText({ text: segment.text, shortText: segment.shortText }, isMeasured ? 'older' : 'current');
 }

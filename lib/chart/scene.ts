@@ -17,6 +17,8 @@ export type Shape =
       readonly y2: number;
       readonly widthPx: number;
       readonly dashPx: readonly number[] | null;
+      /** How far into the pattern of dashes the line begins; 0 when left out. */
+      readonly dashOffsetPx?: number;
     }
   | {
       readonly kind: 'rect';

@@ -1,17 +1,20 @@
-import { fitDashes } from '@/lib/chart/fit-dashes';
+import { centredDashes } from '@/lib/chart/centred-dashes';
 import type { NerveLineSegment } from '@/lib/chart/nerve-line';
 import type { NerveLineSizes } from '@/lib/chart/nerve-line-sizes';
-import type { Shape } from '@/lib/chart/scene';
+import type { Shape, Tone } from '@/lib/chart/scene';
 import { toneOf } from '@/lib/chart/tone-of';
 
 /** Most that is drawn of a gain: a response above baseline stands out of its ghost, but never hides its neighbours. */
 const mostShare = 1.25;
+/** Least that is drawn of a velocity: below it dashes could not be told from a bar. @source house rule */
+const leastVelocityShare = 0.15;
 
 /**
- * One segment over its baseline ghost: thickness is its own share of amplitude, dash length its share of velocity.
+ * One segment over its baseline ghost: thickness is its own share of amplitude, dash and gap its share of velocity.
  *
  * Method: an outline only while it is untested or its share cannot be told; a break with end bars where no response
- * was recorded; a solid bar where the velocity is not known. Shares above 1 are drawn up to 1.25.
+ * was recorded; a solid bar where the velocity is not known. The ghost has the dashes of the baseline, so that kept
+ * velocity lies on it dash by dash, whatever the length. Thickness above 1 is drawn up to 1.25.
  *
  * @param segment the segment; not modified
  * @param fromX left end in px, beside the node
@@ -25,23 +28,29 @@ const mostShare = 1.25;
  */
 export function segmentShapes(segment: NerveLineSegment, fromX: number, toX: number, sizes: NerveLineSizes): readonly Shape[] {
   if (toX - fromX < 1) return [];
-  const ghost = bar(`ghost-${segment.key}`, 'ghost', 'ghost', fromX, toX, sizes.thicknessPx, null);
+  const line = (role: string, tone: Tone, widthPx: number, velocityShare: number | null = 1) =>
+    dashed(bar(`${role}-${segment.key}`, role, tone, fromX, toX, widthPx), velocityShare, sizes);
+  const ghost = line('ghost', 'ghost', sizes.thicknessPx);
   if (segment.isBroken) return [ghost, ...broken(segment, fromX, toX, sizes)];
   if (segment.isUntested || segment.amplitudeShare === null) return [outline(segment, fromX, toX, sizes)];
   const share = Math.min(segment.amplitudeShare, mostShare);
   const thickness = Math.max(sizes.leastThicknessPx, sizes.thicknessPx * share);
   const tone = toneOf(segment.priority, segment.isDim ? 'second' : 'ink');
-  if (segment.velocityShare === null) return [ghost, bar(`segment-${segment.key}`, 'segment', tone, fromX, toX, thickness, null)];
-  const wanted = sizes.dashPx * Math.min(Math.max(segment.velocityShare, 0.15), mostShare);
-  const fitted = fitDashes(toX - fromX, wanted, sizes.gapPx);
-  const from = fromX + fitted.insetPx;
-  const to = toX - fitted.insetPx;
-  const dashes = bar(`segment-${segment.key}`, 'segment', tone, from, to, thickness, [fitted.dashPx, fitted.gapPx]);
-  return tone === 'medium' ? [ghost, bar(`edge-${segment.key}`, 'edge', 'medium-edge', from, to, thickness + 2, null), dashes] : [ghost, dashes];
+  const own = line('segment', tone, thickness, segment.velocityShare);
+  return tone === 'medium' ? [ghost, line('edge', 'medium-edge', thickness + 2, segment.velocityShare), own] : [ghost, own];
 }
 
-function bar(key: string, role: string, tone: Extract<Shape, { kind: 'line' }>['tone'], x1: number, x2: number, widthPx: number, dashPx: readonly number[] | null): Shape {
-  return { kind: 'line', key, role, tone, x1, y1: 0, x2, y2: 0, widthPx, dashPx };
+type Line = Extract<Shape, { kind: 'line' }>;
+
+function bar(key: string, role: string, tone: Tone, x1: number, x2: number, widthPx: number): Line {
+  return { kind: 'line', key, role, tone, x1, y1: 0, x2, y2: 0, widthPx, dashPx: null };
+}
+
+function dashed(line: Line, velocityShare: number | null, sizes: NerveLineSizes): Line {
+  if (velocityShare === null) return line;
+  const share = Math.max(velocityShare, leastVelocityShare);
+  const { dashPx, gapPx, offsetPx } = centredDashes(line.x2 - line.x1, sizes.dashPx * share, sizes.gapPx * share);
+  return { ...line, dashPx: [dashPx, gapPx], dashOffsetPx: offsetPx };
 }
 
 function outline(segment: NerveLineSegment, fromX: number, toX: number, sizes: NerveLineSizes): Shape {
@@ -67,8 +76,8 @@ function broken(segment: NerveLineSegment, fromX: number, toX: number, sizes: Ne
   const width = Math.max(1.5, sizes.strokePx);
   const end = (side: string, x: number): Shape => ({ kind: 'line', key: `bar-${side}-${segment.key}`, role: 'break', tone, x1: x, y1: -sizes.thicknessPx * 0.75, x2: x, y2: sizes.thicknessPx * 0.75, widthPx: width, dashPx: null });
   return [
-    bar(`stub-a-${segment.key}`, 'break', tone, fromX, middle - halfGap, width, null),
-    bar(`stub-b-${segment.key}`, 'break', tone, middle + halfGap, toX, width, null),
+    bar(`stub-a-${segment.key}`, 'break', tone, fromX, middle - halfGap, width),
+    bar(`stub-b-${segment.key}`, 'break', tone, middle + halfGap, toX, width),
     end('a', middle - halfGap),
     end('b', middle + halfGap),
   ];

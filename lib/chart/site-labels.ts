@@ -70,7 +70,7 @@ function blocksOf(
     return { key, x: toX(positionMm), nameLines, value, valueSizePx, tone, widthPx };
   };
   const sites = view.sites.map((site) =>
-    block(site.siteId, site.positionMm, site.name, site.text, toneOf(site.priority, site.isDim ? 'second' : 'ink')),
+    block(site.siteId, site.positionMm, site.name, site.text, toneOf(site.textPriority, site.isDim ? 'second' : 'ink')),
   );
   return view.end === null ? sites : [...sites, block('end', view.end.positionMm, view.end.caption, view.end.name, 'second')];
 }

@@ -1,4 +1,5 @@
 import type { NoVelocityReason, SegmentJudgement } from '@/lib/alert/judgement';
+import { standingText, type Standing } from '@/lib/chart/standing-text';
 import { metresPerSecond } from '@/lib/text/format';
 
 /** The words of a segment, and the same where there is little room. */
@@ -21,18 +22,23 @@ const reasons: Record<NoVelocityReason, SegmentText> = {
  * What stands under a segment: its velocity, marked when short, else why there is none.
  *
  * Method: copies the judgement. A short segment says so, because its velocity carries a large error; the error itself
- * is in the log.
+ * is in the log. A value that does not say how the nerve is now says so.
  *
  * @param segment the newest judgement of the segment; undefined before the first pair
+ * @param standing whether its pair is current, older, or not compared
  * @returns text and short text; empty before the first pair, because the sites say that they are not tested
  * @source product rule: under 80 mm marked short, "not computable" with its reason
  * @accuracy tests/lib/chart/velocity-text.test.ts
  * @example
- * velocityText(undefined).text // => ''
+ * velocityText(undefined, 'current').text // => ''
  */
-export function velocityText(segment: SegmentJudgement | undefined): SegmentText {
+export function velocityText(segment: SegmentJudgement | undefined, standing: Standing): SegmentText {
   if (segment === undefined) return { text: '', shortText: '' };
-  if (segment.velocity.kind === 'not-computable') return reasons[segment.velocity.reason];
+  if (segment.velocity.kind === 'not-computable') {
+    const words = reasons[segment.velocity.reason];
+    return segment.velocity.reason === 'no-response' ? standingText(words, standing) : words;
+  }
   const velocity = metresPerSecond(segment.velocity.velocityMps);
-  return segment.velocity.isShort ? { text: `${velocity}, short`, shortText: `${velocity}, short` } : { text: velocity, shortText: velocity };
+  const text = segment.velocity.isShort ? `${velocity}, short` : velocity;
+  return standingText({ text, shortText: text }, standing);
 }

@@ -9,12 +9,12 @@ type Text = Extract<Shape, { kind: 'text' }>;
 
 const segmentBase: NerveLineSegment = {
   key: 'a', fromMm: 0, toMm: 100, amplitudeShare: 1, velocityShare: 1, text: '54\u00a0m/s', shortText: '54\u00a0m/s',
-  priority: null, isUntested: false, isDim: false, isBroken: false, isShort: false,
+  priority: null, textPriority: null, isUntested: false, isNotCompared: false, isDim: false, isBroken: false, isShort: false,
 };
 
 /** Two sites 100 mm apart, no end, and between them the segment given. */
 function twoSites(segment: Partial<NerveLineSegment>): NerveLineView {
-  const site = { priority: null, isDim: false, ageText: '20\u00a0s' };
+  const site = { priority: null, textPriority: null, isDim: false, ageText: '20\u00a0s' };
   return {
     nerveId: 'ulnar', nerveName: 'Ulnar', description: 'Ulnar nerve.', end: null,
     sites: [{ ...site, siteId: 'a', name: 'Above elbow', positionMm: 0, text: '98\u00a0%' }, { ...site, siteId: 'b', name: 'Below elbow', positionMm: 100, text: '98\u00a0%' }],
@@ -33,9 +33,23 @@ describe('nerveLineScene', () => {
     const [segment] = lineOf(scene, 'segment');
     expect(segment!.widthPx / ghost!.widthPx).toBeCloseTo(0.39, 6);
   });
-  it('draws the kept velocity as dash length', () => {
-    const dashOf = (velocityShare: number) => lineOf(nerveLineScene(twoSites({ velocityShare }), options), 'segment')[0]!.dashPx![0]!;
-    expect(dashOf(0.57) / dashOf(1)).toBeCloseTo(0.57, 6);
+  it.each([0.57, 1.3, 0.16])('draws %s of the velocity as exactly that share of dash and gap', (velocityShare) => {
+    const scene = nerveLineScene(twoSites({ velocityShare }), options);
+    const [baseDash, baseGap] = lineOf(scene, 'ghost')[0]!.dashPx!;
+    const [dash, gap] = lineOf(scene, 'segment')[0]!.dashPx!;
+    expect(dash! / baseDash!).toBeCloseTo(velocityShare, 9);
+    expect(gap! / baseGap!).toBeCloseTo(velocityShare, 9);
+  });
+  it('lays kept velocity on the dashes of its ghost, whatever the length', () => {
+    fc.assert(
+      fc.property(fc.integer({ min: 200, max: 4000 }), (widthPx) => {
+        const scene = nerveLineScene(twoSites({}), { ...options, widthPx });
+        const dashesOf = (role: string) => lineOf(scene, role).map(({ x1, x2, dashPx, dashOffsetPx }) => ({ x1, x2, dashPx, dashOffsetPx }));
+        expect(dashesOf('segment')).toEqual(dashesOf('ghost'));
+        // The same pattern in every segment: a gap is never stretched to fit.
+        expect(dashesOf('segment')[0]!.dashPx).toEqual([16 * 0.95, 16 * 0.2]);
+      }),
+    );
   });
   it('draws a bar without dashes where the velocity is not known', () => {
     expect(lineOf(nerveLineScene(twoSites({ velocityShare: null }), options), 'segment')[0]!.dashPx).toBeNull();
@@ -59,6 +73,18 @@ describe('nerveLineScene', () => {
     const [a, b, c] = nodes.map((node) => (node.kind === 'node' ? node.x : 0));
     expect((c! - b!) / (b! - a!)).toBeCloseTo(2.1, 6);
   });
+  it('gives a number the tone of its own priority, not of its place', () => {
+    const view = twoSites({ priority: 'alert', textPriority: null });
+    const scene = nerveLineScene({ ...view, sites: view.sites.map((site) => ({ ...site, priority: 'notice', textPriority: null })) }, options);
+    expect(lineOf(scene, 'segment')[0]!.tone).toBe('high');
+    expect(texts(scene).filter((text) => ['high', 'medium', 'low'].includes(text.tone))).toEqual([]);
+  });
+  it('never leaves out the age of a response that is older', () => {
+    const view = twoSites({});
+    const sites = view.sites.map((site, index) => ({ ...site, isDim: index === 0, ageText: `${index + 1}\u00a0min` }));
+    const ages = texts(nerveLineScene({ ...view, sites }, { ...options, hasAges: false })).filter((text) => text.role === 'age');
+    expect(ages.map((age) => age.text)).toEqual(['1\u00a0min ago']);
+  });
   it('leaves out ages only when asked', () => {
     expect(texts(nerveLineScene(twoSites({}), options)).filter((text) => text.role === 'age')).toHaveLength(2);
     expect(texts(nerveLineScene(twoSites({}), { ...options, hasAges: false })).filter((text) => text.role === 'age')).toEqual([]);
@@ -78,7 +104,7 @@ const anyLine: fc.Arbitrary<NerveLineView> = fc
   .record({ gaps: fc.array(fc.integer({ min: 1, max: 400 }), { minLength: 1, maxLength: 9 }), hasEnd: fc.boolean(), seed: fc.array(fc.tuple(names, values, ages, words), { minLength: 9, maxLength: 9 }) })
   .map(({ gaps, hasEnd, seed }) => {
     const positions = gaps.map((_, index) => gaps.slice(0, index).reduce((sum, gap) => sum + gap, 0));
-    const sites = positions.map((positionMm, index) => ({ siteId: `s${index}`, name: seed[index]![0], positionMm, text: seed[index]![1], ageText: seed[index]![2], priority: null, isDim: false }));
+    const sites = positions.map((positionMm, index) => ({ siteId: `s${index}`, name: seed[index]![0], positionMm, text: seed[index]![1], ageText: seed[index]![2], priority: null, textPriority: null, isDim: index % 3 === 0 }));
     const end = hasEnd ? { caption: 'Muscle', name: 'ADM', positionMm: positions.at(-1)! + gaps.at(-1)! } : null;
     const stops = [...positions, ...(end === null ? [] : [end.positionMm])];
     const segments = stops.slice(1).map((toMm, index) => ({ ...segmentBase, key: `g${index}`, fromMm: stops[index]!, toMm, text: seed[index]![3], shortText: seed[index]![3] }));

@@ -47,6 +47,7 @@ describe('nerveLineView of a lesion between above and below elbow', () => {
   });
   it('carries the priority at the lesion and at the sites behind it only', () => {
     expect([upper, lesion, forearm, distal].map((segment) => segment?.priority)).toEqual([null, 'alert', null, null]);
+    expect([upper, lesion, forearm, distal].map((segment) => segment?.textPriority)).toEqual([null, 'alert', null, null]);
     expect(lineAt(ulnarAlert().state, '10:43:20').sites.map((site) => site.priority)).toEqual(['alert', 'alert', null, null]);
   });
 });
@@ -56,6 +57,7 @@ describe('nerveLineView of what is not known', () => {
     const line = lineAt(ulnarStable().give('10:41:20', lifted).state, '10:41:50');
     expect(line.segments.every((segment) => segment.isUntested)).toBe(true);
     expect(line.sites.every((site) => site.isDim)).toBe(true);
+    expect(line.segments.map((segment) => segment.text)).toEqual(['was 61\u00a0m/s', 'was 53\u00a0m/s', 'was 59\u00a0m/s', 'was 2.90\u00a0ms']);
   });
   it('is an outline where only one end was tested since', () => {
     const script = ulnarStable().give('10:41:20', lifted);
@@ -83,6 +85,61 @@ describe('nerveLineView of what is not known', () => {
   it('has nothing to draw for a nerve outside the plan', () => expect(nerveLineView(ulnarStable().state, 'radial', 0).sites).toEqual([]));
 });
 
+describe('nerveLineView of a run that is not compared', () => {
+  const weak = (script = ulnarStable()) => script.run('10:40:00', 'above-elbow', 9, { adm: [8.4, 6.1] }, { isSupramaximal: false });
+  const line = lineAt(weak().state, '10:40:20');
+
+  it('keeps the last response that was compared, dim and with its own age', () => {
+    expect(line.sites.map((site) => `${site.text} ${site.ageText} ${site.isDim}`)).toEqual([
+      '98\u00a0% 3\u00a0min false', '97\u00a0% 2\u00a0min true', '98\u00a0% 1\u00a0min false', '99\u00a0% 1\u00a0min false',
+    ]);
+  });
+  it('outlines the segments that end there, and only those', () => {
+    expect(line.segments.map((segment) => segment.isUntested)).toEqual([true, true, false, false]);
+    expect(line.segments.map((segment) => segment.isNotCompared)).toEqual([true, true, false, false]);
+  });
+  it('says that the velocities of that run are not compared', () => {
+    // 150 mm in 10.77 − 8.40 = 2.37 ms; 100 mm in 8.40 − 6.46 = 1.94 ms.
+    expect(line.segments.slice(0, 2).map((segment) => segment.text)).toEqual(['63\u00a0m/s, not compared', '52\u00a0m/s, not compared']);
+    expect(line.description).toContain('Above elbow to below elbow: 52\u00a0m/s, not compared.');
+  });
+  it('says a velocity from before as what it was, when the run gave none', () => {
+    const script = ulnarStable();
+    const unusable = { channelId: 'adm', reading: { kind: 'unusable', reason: 'cautery' } } as const;
+    script.run('10:40:00', 'wrist', 14, {}, { readings: [unusable] });
+    expect(lineAt(script.state, '10:40:20').segments.map((segment) => segment.text)).toEqual(['61\u00a0m/s', '53\u00a0m/s', 'was 59\u00a0m/s', 'was 2.90\u00a0ms']);
+  });
+  it('is current again with the next run that is compared', () => {
+    const script = weak();
+    ulnarRun(script, '10:40:30', 'above-elbow', 0.97, 0.02);
+    expect(lineAt(script.state, '10:40:40').segments.some((segment) => segment.isUntested || segment.isNotCompared)).toBe(false);
+  });
+});
+
+describe('nerveLineView of a lesion that takes amplitude alone', () => {
+  const script = ulnarStable();
+  for (const time of ['10:39:40', '10:39:55']) ulnarRun(script, time, 'above-elbow', 0.4);
+  ulnarRun(script, '10:40:05', 'below-elbow', 0.98);
+  ulnarRun(script, '10:40:15', 'wrist', 0.99);
+  const line = lineAt(script.state, '10:40:20');
+
+  it('marks the segment and the response, not the velocity, which did not change', () => {
+    expect(line.segments[1]).toMatchObject({ priority: 'alert', textPriority: null, text: '54\u00a0m/s' });
+    expect(line.sites[1]).toMatchObject({ priority: 'alert', textPriority: 'alert' });
+  });
+  it('marks no latency at the end where only the amplitude moved', () => {
+    ulnarRun(script, '10:40:30', 'wrist', 0.62);
+    expect(lineAt(script.state, '10:40:40').segments[3]).toMatchObject({ priority: 'watch', textPriority: null, text: '2.90\u00a0ms' });
+  });
+  it('marks the place and not the response where only the onset came late', () => {
+    const late = ulnarStable();
+    ulnarRun(late, '10:39:40', 'wrist', 0.99, 0.4);
+    const { sites, segments } = lineAt(late.state, '10:39:50');
+    expect(sites[3]).toMatchObject({ priority: 'notice', textPriority: null, text: '99\u00a0%' });
+    expect(segments[3]).toMatchObject({ priority: 'notice', textPriority: 'notice', text: '3.30\u00a0ms' });
+  });
+});
+
 describe('nerveLineView of a lost response', () => {
   const script = ulnarStable().give('10:41:20', lifted);
   ulnarRun(script, '10:41:55', 'above-elbow', 0);
@@ -91,7 +148,7 @@ describe('nerveLineView of a lost response', () => {
   const line = lineAt(script.state, '10:43:20');
 
   it('breaks the segment and says the highest current tried', () => {
-    expect(line.segments[1]).toMatchObject({ isBroken: true, amplitudeShare: 0, text: 'no response up to 18\u00a0mA', priority: 'alert' });
+    expect(line.segments[1]).toMatchObject({ isBroken: true, amplitudeShare: 0, text: 'no response up to 18\u00a0mA', priority: 'alert', textPriority: 'alert' });
   });
   it('says "none" at the site, never 0 %', () => expect(line.sites[1]?.text).toBe('none'));
   it('breaks no other segment', () => expect(line.segments.filter((segment) => segment.isBroken)).toHaveLength(1));

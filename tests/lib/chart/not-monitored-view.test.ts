@@ -14,5 +14,14 @@ describe('notMonitoredView', () => {
     expect(view.segments.every((segment) => segment.isUntested && segment.isDim)).toBe(true);
     expect(view.sites.every((site) => site.isDim)).toBe(true);
   });
+  it('says each velocity in the past tense, once', () => {
+    const past = ['was 61\u00a0m/s', 'was 53\u00a0m/s', 'was 59\u00a0m/s', 'was 2.90\u00a0ms'];
+    expect(view.segments.map((segment) => segment.text)).toEqual(past);
+    expect(notMonitoredView(view).segments.map((segment) => segment.text)).toEqual(past);
+  });
+  it('leaves a reason as it is', () => {
+    const reason = { ...live.segments[0]!, text: 'distance not measured', shortText: 'no mm' };
+    expect(notMonitoredView({ ...live, segments: [reason] }).segments[0]?.text).toBe('distance not measured');
+  });
   it('hides no value', () => expect(view.sites.map((site) => site.text)).toEqual(live.sites.map((site) => site.text)));
 });

@@ -15,12 +15,18 @@ function withReason(reason: NoVelocityReason): SegmentJudgement {
 }
 
 describe('velocityText', () => {
-  it('gives the velocity with its unit', () => expect(velocityText(segment).text).toBe('54\u00a0m/s'));
+  it('gives the velocity with its unit', () => expect(velocityText(segment, 'current').text).toBe('54\u00a0m/s'));
   it('marks a short segment', () => {
     const short = { ...segment, velocity: { ...segment.velocity, distanceMm: 60, isShort: true } } as SegmentJudgement;
-    expect(velocityText(short)).toEqual({ text: '54\u00a0m/s, short', shortText: '54\u00a0m/s, short' });
+    expect(velocityText(short, 'current')).toEqual({ text: '54\u00a0m/s, short', shortText: '54\u00a0m/s, short' });
   });
-  it('is empty before the first pair', () => expect(velocityText(undefined).text).toBe(''));
+  it('says how an older or not compared velocity stands', () => {
+    expect(velocityText(segment, 'older').text).toBe('was 54\u00a0m/s');
+    expect(velocityText(segment, 'not-compared').text).toBe('54\u00a0m/s, not compared');
+    expect(velocityText(withReason('no-response'), 'older').text).toBe('was no response');
+  });
+  it('leaves a reason as it is: it holds now', () => expect(velocityText(withReason('distances-not-measured'), 'older').text).toBe('distance not measured'));
+  it('is empty before the first pair', () => expect(velocityText(undefined, 'older').text).toBe(''));
 
   it.each([
     ['partner-not-tested', 'not tested'],
@@ -30,5 +36,5 @@ describe('velocityText', () => {
     ['no-response', 'no response'],
     ['latencies-exchanged', 'latencies exchanged'],
     ['latencies-equal', 'latencies equal'],
-  ] as const)('says why there is no velocity: %s', (reason, words) => expect(velocityText(withReason(reason)).text).toBe(words));
+  ] as const)('says why there is no velocity: %s', (reason, words) => expect(velocityText(withReason(reason), 'current').text).toBe(words));
 });
