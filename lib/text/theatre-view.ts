@@ -23,7 +23,8 @@ const rank: readonly TheatreKind[] = [
  * The theatre screen in words, from the state of the case and the time alone.
  *
  * Method: every statement that holds, the worst first. An open alert leads whatever the phase. Calm is only said when
- * every nerve at risk earned it; otherwise the first nerve that did not is named.
+ * every nerve at risk earned it; otherwise the first nerve that did not is named. In take-down nothing is judged any
+ * more: besides what is still open it says only that monitoring ended.
  *
  * @param state the case
  * @param nowMs ms since 1970, the server's clock
@@ -54,8 +55,11 @@ function theatreLines(state: CaseState, nowMs: number, timeZone: string): Theatr
   const incidents = Object.values(state.incidents);
   const lines = incidents.map((incident) => incidentLine(state, incident, timeZone));
   if (state.status === 'planned') return [...lines, plain('set-up', 'Set-up', 'Case not opened yet. Not monitored.')];
-  lines.push(...withdrawnLines(state, nowMs), ...judgeLines(state, nowMs, timeZone), ...cuffLines(state, nowMs));
+  lines.push(...withdrawnLines(state, nowMs));
   const phase = phaseLine(state, timeZone);
+  // Monitoring is over: nothing is asked for any more. What is still open stays until the desk ends it.
+  if (phase?.kind === 'take-down') return [...lines, phase];
+  lines.push(...judgeLines(state, nowMs, timeZone), ...cuffLines(state, nowMs));
   if (phase !== null) return [...lines, phase];
   return [...lines, ...nerveLines(state, nowMs, timeZone)];
 }

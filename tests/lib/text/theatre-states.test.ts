@@ -76,6 +76,23 @@ describe('theatreView, states', () => {
     }
   });
 
+  it('theatreView asks for nothing in take-down: only what is still open stands beside it', () => {
+    const script = monitoredUlnar().at('10:41');
+    for (const site of ulnarSites) script.run(site, { adm: absent(20) });
+    script.run('median-wrist', { apb: absent(20) });
+    script.give(cuff(true));
+    const end = (alertId: string) => script.give({ name: 'end-alert', alertId, outcome: 'none', cause: 'undetermined', text: null });
+    script.at('10:50').give({ name: 'change-phase', phase: 'take-down', reason: null });
+    const kinds = () => [lead(script), ...script.view().others].map((line) => line.kind);
+    expect(kinds()).toEqual(['alert', 'notice', 'take-down']);
+    for (const { alertId } of Object.values(script.state.incidents)) end(alertId);
+    expect(lead(script)).toMatchObject({ kind: 'take-down', isCalm: false, headline: 'Take-down', detail: 'Monitoring ended 10:50. Not monitored.' });
+    expect(kinds()).toEqual(['take-down']);
+    // Monitoring that goes on judges again, and says so.
+    script.give({ name: 'change-phase', phase: 'monitoring', reason: null });
+    expect(lead(script).kind).toBe('cannot-be-judged');
+  });
+
   it('theatreView says that nothing can be judged when the control is lost too, high after 60 s without a train-of-four', () => {
     const script = monitoredUlnar().at('10:41');
     for (const site of ulnarSites) script.run(site, { adm: absent(20) });
