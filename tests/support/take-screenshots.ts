@@ -68,7 +68,7 @@ async function quietCase(product: Product): Promise<HttpDesk> {
 
 /** Cases beside the one that is monitored: one planned, one closed. */
 async function fillList(product: Product): Promise<void> {
-  await HttpDesk.plan(product, { ...sciaticAtHip, theatre: 'Theatre 1', side: 'right' });
+  await HttpDesk.plan(product, { ...sciaticAtHip, title: sciaticAtHip.title.replace('Left', 'Right'), theatre: 'Theatre 1', side: 'right' });
   const closed = await HttpDesk.plan(product, { ...ulnarAtElbow, title: 'Right ulnar nerve, decompression', side: 'right', theatre: 'Theatre 5' });
   await closed.give({ name: 'open-case', clockOffsetMs: 0 }, { agoS: 900 });
   await closed.give({ name: 'close-case', text: null }, { agoS: 600 });

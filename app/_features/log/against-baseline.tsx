@@ -1,5 +1,6 @@
+import type { RowTone } from '@/app/_features/log/log-row-model';
+import { Toned } from '@/app/_features/log/toned';
 import { velocityWithError } from '@/app/_features/log/velocity-with-error';
-import { joinClasses } from '@/app/_ui/join-classes';
 import type { Finding, PathJudgement, SegmentJudgement } from '@/lib/alert/judgement';
 import { percent, signed } from '@/lib/text/format';
 import { notComparedWords } from '@/lib/text/reason-words';
@@ -32,17 +33,17 @@ function ChangeWords({ path }: { readonly path: PathJudgement & { kind: 'compare
   const said = isNotice ? ', past a limit' : '';
   return (
     <>
-      {onsetChangeMs === null ? null : <span className={toneOf(path.findings, ['onset-late', 'amplitude-and-onset'])}>{`${signed(onsetChangeMs, 2)}\u00a0ms`}</span>}
+      {onsetChangeMs === null ? null : <span><Toned tone={toneOf(path.findings, ['onset-late', 'amplitude-and-onset'])}>{`${signed(onsetChangeMs, 2)}\u00a0ms`}</Toned></span>}
       {percentOfBaseline === null ? null : (
-        <span className={toneOf(path.findings, ['amplitude-fall', 'amplitude-and-onset', 'response-lost', 'amplitude-watch'])}>{percent(percentOfBaseline)}</span>
+        <span><Toned tone={toneOf(path.findings, ['amplitude-fall', 'amplitude-and-onset', 'response-lost', 'amplitude-watch'])}>{percent(percentOfBaseline)}</Toned></span>
       )}
       {said === '' ? null : <span className="font-sans text-sm font-semibold">{said.slice(2)}</span>}
     </>
   );
 }
 
-function toneOf(findings: readonly Finding[], kinds: readonly Finding['kind'][]): string {
+function toneOf(findings: readonly Finding[], kinds: readonly Finding['kind'][]): RowTone {
   const found = findings.filter((finding) => kinds.includes(finding.kind));
-  if (found.some((finding) => finding.priority === 'notice')) return 'font-bold text-medium-text';
-  return joinClasses(found.length > 0 && 'text-low');
+  if (found.some((finding) => finding.priority === 'notice')) return 'medium';
+  return found.length > 0 ? 'low' : 'plain';
 }

@@ -32,9 +32,9 @@ export function ConditionsPanel() {
             const words = kept === undefined ? null : conditionWords(kept.condition);
             return (
               <tr key={kind} className="align-baseline">
-                <th scope="row" className="py-0.5 pr-3 text-left font-normal whitespace-nowrap text-second">{words?.name ?? name}</th>
-                <td className="py-0.5 text-right font-mono text-[0.9rem] break-words">{words?.value ?? '–'}</td>
-                <td className="py-0.5 pl-3 text-right text-sm whitespace-nowrap text-second">{kept === undefined ? 'not measured' : durationWords(nowMs - msOfMoment(kept.at))}</td>
+                <th scope="row" className="py-0.5 pr-2 text-left font-normal whitespace-nowrap text-second">{words?.name ?? name}</th>
+                <td className="py-0.5 text-right font-mono text-[0.85rem] tracking-tight break-words">{words?.value ?? '–'}</td>
+                <td className="py-0.5 pl-2 text-right text-sm whitespace-nowrap text-second">{kept === undefined ? 'not measured' : durationWords(nowMs - msOfMoment(kept.at))}</td>
               </tr>
             );
           })}

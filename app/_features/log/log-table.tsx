@@ -3,8 +3,9 @@
 import { memo, useMemo } from 'react';
 
 import { useLogCase } from '@/app/_features/log/log-context';
-import type { LogRow, RowTone, RunRow } from '@/app/_features/log/log-row-model';
+import type { LogRow, RunRow } from '@/app/_features/log/log-row-model';
 import { logRows } from '@/app/_features/log/log-rows';
+import { Toned } from '@/app/_features/log/toned';
 import { joinClasses } from '@/app/_ui/join-classes';
 import { Cell, HeadCell } from '@/app/_ui/table';
 import { upcast } from '@/lib/case/upcast';
@@ -48,13 +49,6 @@ export function LogTable() {
   );
 }
 
-const tones: Readonly<Record<RowTone, string>> = {
-  plain: '',
-  low: 'text-low font-semibold',
-  medium: 'text-medium-text font-bold',
-  high: 'text-high-text font-bold',
-};
-
 const LogLine = memo(function LogLine({ row, timeZone }: { readonly row: LogRow; readonly timeZone: string }) {
   const time = clockTime(row.at, timeZone, { seconds: true });
   if (row.kind === 'run') return <RunLine row={row} time={time} />;
@@ -76,10 +70,10 @@ function RunLine({ row, time }: { readonly row: RunRow; readonly time: string })
       <Cell className={struck}>{row.channelName}</Cell>
       <Cell isNumeric className={struck}>{row.intensity}</Cell>
       <Cell isNumeric className={struck}>{row.onset}</Cell>
-      <Cell isNumeric className={joinClasses(tones[row.changeTone], struck)}>{row.change}</Cell>
+      <Cell isNumeric className={struck}><Toned tone={row.changeTone}>{row.change}</Toned></Cell>
       <Cell isNumeric className={struck}>{row.amplitude}</Cell>
-      <Cell isNumeric className={joinClasses(tones[row.percentTone], struck)}>{row.percent}</Cell>
-      <Cell isNumeric className={joinClasses(tones[row.velocityTone], struck)}>{row.velocity}</Cell>
+      <Cell isNumeric className={struck}><Toned tone={row.percentTone}>{row.percent}</Toned></Cell>
+      <Cell isNumeric className={struck}><Toned tone={row.velocityTone}>{row.velocity}</Toned></Cell>
       <Cell className="pr-5 text-sm">{note}</Cell>
     </tr>
   );

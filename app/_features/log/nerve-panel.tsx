@@ -19,7 +19,7 @@ export function NervePanel() {
         return (
           <figure key={nerve.id} className="min-w-0">
             <figcaption className={nerves.length > 1 ? 'mb-1 text-sm font-bold' : 'sr-only'}>{nerve.name}</figcaption>
-            <MeasuredScene draw={(widthPx) => nerveLineScene(view, { widthPx, textPx: nerves.length > 1 ? 12.5 : 14, hasAges: true })} />
+            <MeasuredScene draw={(widthPx, remPx) => nerveLineScene(view, { widthPx, textPx: (nerves.length > 1 ? 0.78 : 0.875) * remPx, hasAges: true })} />
           </figure>
         );
       })}

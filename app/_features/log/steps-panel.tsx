@@ -18,12 +18,13 @@ export function StepsPanel({ onProblem }: { readonly onProblem: (problem: string
     onProblem(outcome.kind === 'refused' ? outcome.message : null);
   };
   return (
-    <Panel title="Step" isPinned action={last === undefined ? null : <span className="text-sm text-second">{`${last.since}, ${clockTime(last.at, timeZone)}`}</span>}>
-      <StepButtons steps={state.plan.steps.filter((step) => !step.isRisk)} isOff={isOff} onLog={log} />
+    <Panel title="Step and condition" isPinned action={last === undefined ? null : <span className="text-sm text-second">{`${last.since}, ${clockTime(last.at, timeZone)}`}</span>}>
+      <StepButtons steps={state.plan.steps.filter((step) => !step.isRisk)} isOff={isOff} onLog={log}>
+        <Button isWide hotkey="C" disabled={isOff} onClick={() => openDialog({ kind: 'condition', condition: 'train-of-four' })} className={stepClasses}>Condition</Button>
+      </StepButtons>
       <h3 className="mt-1.5 mb-1 text-sm text-second">Risk step: every test before it is old</h3>
       <StepButtons steps={state.plan.steps.filter((step) => step.isRisk)} isOff={isOff} onLog={log}>
         <Button isWide hotkey="O" disabled={isOff} onClick={() => openDialog({ kind: 'other-step' })} className={stepClasses}>Other step</Button>
-        <Button isWide hotkey="C" disabled={isOff} onClick={() => openDialog({ kind: 'condition', condition: 'train-of-four' })} className={stepClasses}>Condition</Button>
       </StepButtons>
     </Panel>
   );

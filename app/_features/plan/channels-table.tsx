@@ -57,11 +57,11 @@ export function ChannelsTable() {
             return (
               <tr key={channel.rowKey}>
                 <Cell className="min-w-24"><PlanField name={`${row}.name`} label={`Short name of ${said}`} isLabelHidden /></Cell>
-                <Cell className="min-w-48"><PlanField name={`${row}.longName`} label={`Full name of ${said}`} isLabelHidden /></Cell>
-                <Cell className="min-w-36"><SelectField label={`Nerve of ${said}`} isLabelHidden {...register(`${row}.nerveId`)} options={nerves.map((nerve) => ({ value: nerve.id, label: nerve.name === '' ? 'Unnamed nerve' : nerve.name }))} /></Cell>
+                <Cell className="min-w-60"><PlanField name={`${row}.longName`} label={`Full name of ${said}`} isLabelHidden /></Cell>
+                <Cell className="min-w-40"><SelectField label={`Nerve of ${said}`} isLabelHidden {...register(`${row}.nerveId`)} options={nerves.map((nerve) => ({ value: nerve.id, label: nerve.name === '' ? 'Unnamed nerve' : nerve.name }))} /></Cell>
                 <Cell className="min-w-28"><PlanField name={`${row}.positionMm`} label={`Position of ${said}`} isLabelHidden isNumeric unit="mm" /></Cell>
                 <Cell className="min-w-28"><SelectField label={`Kind of ${said}`} isLabelHidden {...register(`${row}.kind`)} options={kinds} /></Cell>
-                <Cell className="min-w-40"><SelectField label={`How the amplitude of ${said} is read`} isLabelHidden {...register(`${row}.convention`)} options={conventions} /></Cell>
+                <Cell className="min-w-44"><SelectField label={`How the amplitude of ${said} is read`} isLabelHidden {...register(`${row}.convention`)} options={conventions} /></Cell>
                 <Cell>
                   <label className="inline-flex min-h-9 min-w-9 items-center align-middle">
                     <input type="checkbox" value={channel.id} {...register('requiredChannelIds')} className="size-4 accent-stain" />

@@ -40,7 +40,7 @@ export function PlanEditor({ places }: { readonly places: readonly PlanPlace[] }
         method="post"
         noValidate
         onSubmit={(event) => void form.handleSubmit(({ plan, identity, hospitalId }) => send({ plan, identity, ...(places.length > 1 ? { hospitalId } : {}) }))(event)}
-        className="mx-auto flex w-full max-w-6xl flex-col px-6 pt-8"
+        className="mx-auto flex w-full max-w-7xl flex-col px-6 pt-8"
       >
         <h1 className="text-2xl font-bold">Plan a case</h1>
         <CaseFields places={places} onTemplate={chooseTemplate} />

@@ -24,7 +24,7 @@ export function PlanLine({ nerveIndex }: { readonly nerveIndex: number }) {
   const view = nerveLineView({ ...initialState('plan'), plan }, nerve.id, 0);
   if (view.sites.length === 0) return <p className="py-6 text-second">The nerve is drawn when a channel records distal to its sites.</p>;
   const planned = { ...view, sites: view.sites.map((site) => ({ ...site, text: `${site.positionMm}\u00a0mm` })), segments: view.segments.map(withLength) };
-  return <MeasuredScene className="py-3" draw={(widthPx) => nerveLineScene(planned, { widthPx, textPx: 14, hasAges: false })} />;
+  return <MeasuredScene className="py-3" draw={(widthPx, remPx) => nerveLineScene(planned, { widthPx, textPx: 0.875 * remPx, hasAges: false })} />;
 }
 
 /** Nothing is tested while planning: the length stands where the velocity will. */

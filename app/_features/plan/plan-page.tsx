@@ -12,12 +12,12 @@ import { Skeleton } from '@/app/_ui/skeleton';
 /** Planning starts when it is known in which theatres this person works. */
 export function PlanPage() {
   const session = useQuery({ queryKey: ['session'], queryFn: () => readSession() });
-  if (session.isPending) return <Skeleton label="Fetching your theatres" rows={8} className="mx-auto w-full max-w-6xl px-6 py-8" />;
+  if (session.isPending) return <Skeleton label="Fetching your theatres" rows={8} className="mx-auto w-full max-w-7xl px-6 py-8" />;
   if (session.isError) return <NoticeBar tone="strong">{session.error.message}</NoticeBar>;
   const places = planPlaces(session.data);
   if (places.length === 0) {
     return (
-      <div className="mx-auto w-full max-w-6xl px-6 py-8">
+      <div className="mx-auto w-full max-w-7xl px-6 py-8">
         <EmptyState title="No theatre to plan for" text="A case is planned by a neurophysiologist, for a theatre of their hospital. Your account has none; the administrator can add one." />
       </div>
     );

@@ -15,12 +15,12 @@ interface TrendChartProps {
   readonly timeZone: string;
 }
 
-const heightPx = 260;
+const heightRem = 16.25;
 const leastTopPercent = 120;
 
 /** One nerve over time: a line for each required path, the limit dotted, alerts as triangles, risk steps as uprights. */
 export function TrendChart({ trend, steps, limitPercent, timeZone }: TrendChartProps) {
-  const { ref, widthPx } = useElementWidth();
+  const { ref, widthPx, remPx } = useElementWidth();
   const percents = trend.lines.flatMap((line) => line.points.map((point) => point.percent));
   const times = trend.lines.flatMap((line) => line.points.map((point) => point.atMs));
   const from = Math.min(...times);
@@ -38,13 +38,13 @@ export function TrendChart({ trend, steps, limitPercent, timeZone }: TrendChartP
       </figcaption>
       <div ref={ref} role="img" aria-label={label} className="h-65">
         {widthPx === null ? null : (
-          <LineChart width={widthPx} height={heightPx} margin={{ top: 24, right: 20, bottom: 4, left: 0 }} accessibilityLayer={false}>
+          <LineChart width={widthPx} height={heightRem * remPx} margin={{ top: 1.5 * remPx, right: 1.25 * remPx, bottom: 0.25 * remPx, left: 0 }} accessibilityLayer={false}>
             <CartesianGrid vertical={false} stroke="var(--rule)" />
-            <XAxis type="number" dataKey="atMs" domain={[from, to]} scale="time" ticks={[...ticks.atMs]} interval={0} tickFormatter={time} stroke="var(--edge)" tick={{ fill: 'var(--second)', fontSize: 13 }} allowDuplicatedCategory={false} />
-            <YAxis type="number" domain={[0, top]} ticks={[0, 50, 100]} width={48} stroke="var(--edge)" tick={{ fill: 'var(--second)', fontSize: 13 }} />
-            <ReferenceLine y={limitPercent} stroke="var(--second)" strokeDasharray="2 5" label={{ value: `limit ${limitPercent} %, custom`, position: 'insideBottomRight', fill: 'var(--second)', fontSize: 12 }} />
+            <XAxis type="number" dataKey="atMs" domain={[from, to]} scale="time" ticks={[...ticks.atMs]} interval={0} tickFormatter={time} stroke="var(--edge)" tick={{ fill: 'var(--second)', fontSize: 0.8125 * remPx }} allowDuplicatedCategory={false} />
+            <YAxis type="number" domain={[0, top]} ticks={[0, 50, 100]} width={3 * remPx} stroke="var(--edge)" tick={{ fill: 'var(--second)', fontSize: 0.8125 * remPx }} />
+            <ReferenceLine y={limitPercent} stroke="var(--second)" strokeDasharray="2 5" label={{ value: `limit ${limitPercent} %, custom`, position: 'insideBottomRight', fill: 'var(--second)', fontSize: 0.75 * remPx }} />
             {steps.filter((step) => step.atMs >= from && step.atMs <= to).map((step) => (
-              <ReferenceLine key={step.atMs} x={step.atMs} stroke="var(--edge)" label={{ value: step.label, position: 'top', fill: 'var(--second)', fontSize: 12 }} />
+              <ReferenceLine key={step.atMs} x={step.atMs} stroke="var(--edge)" label={{ value: step.label, position: 'top', fill: 'var(--second)', fontSize: 0.75 * remPx }} />
             ))}
             {trend.lines.map((line, index) => (
               <Line

@@ -9,8 +9,9 @@ export function trendDash(index: number): { readonly strokeDasharray?: string } 
 /** The mark of one run: a shape for its line, a red triangle where an alert was raised. */
 export function TrendMark({ x, y, lineIndex, isAlert }: { readonly x: number; readonly y: number; readonly lineIndex: number; readonly isAlert: boolean }) {
   if (isAlert) return <path d={`M${x} ${y - 8}l8 14h-16Z`} fill="var(--high)" />;
-  if (lineIndex % 3 === 1) return <rect x={x - 3.5} y={y - 3.5} width={7} height={7} fill="var(--ink)" />;
-  if (lineIndex % 3 === 2) return <circle cx={x} cy={y} r={4} fill="var(--ground)" stroke="var(--ink)" strokeWidth={1.75} />;
+  if (lineIndex % 4 === 1) return <rect x={x - 3.5} y={y - 3.5} width={7} height={7} fill="var(--ink)" />;
+  if (lineIndex % 4 === 2) return <circle cx={x} cy={y} r={4} fill="var(--ground)" stroke="var(--ink)" strokeWidth={1.75} />;
+  if (lineIndex % 4 === 3) return <path d={`M${x} ${y - 5.5}l5.5 5.5 -5.5 5.5 -5.5 -5.5Z`} fill="var(--ground)" stroke="var(--ink)" strokeWidth={1.75} />;
   return <circle cx={x} cy={y} r={3.75} fill="var(--ink)" />;
 }
 
