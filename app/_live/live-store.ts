@@ -6,6 +6,7 @@ import type { CaseState } from '@/lib/case/case-state';
 import type { EndedMessage } from '@/lib/contracts/channel/messages';
 import type { PersonCommand } from '@/lib/contracts/http/commands';
 import type { WireEntry } from '@/lib/contracts/http/replies';
+import type { ConnectedPerson } from '@/lib/text/today-context';
 
 /** Why a case cannot be shown live, apart from a missing link. None of them passes by itself except `not-found`. */
 export type FeedProblem = 'newer-version' | 'fork' | 'not-found' | 'unreadable';
@@ -25,6 +26,8 @@ export interface CaseFeed {
   readonly deskConnected: boolean;
   readonly deskSince: string | null;
   readonly wallsConnected: number;
+  /** People who have the case open now; empty on a wall. True only while the case is live. */
+  readonly peopleConnected: readonly ConnectedPerson[];
 }
 
 /** The one connection of this tab. */
@@ -89,6 +92,7 @@ export const emptyFeed: CaseFeed = {
   deskConnected: false,
   deskSince: null,
   wallsConnected: 0,
+  peopleConnected: [],
 };
 
 /** Contents before the first connection: nothing known, nothing calm. */

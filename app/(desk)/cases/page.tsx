@@ -1,7 +1,7 @@
 import type { Metadata } from 'next';
 
+import { pageLinks } from '@/app/(desk)/page-links';
 import { requirePerson } from '@/app/(desk)/require-person';
-import { deskLinks } from '@/app/(desk)/desk-links';
 import { CaseList } from '@/app/_features/cases/case-list';
 import { AccountAside } from '@/app/_features/sign-in/account-aside';
 import { QueryProvider } from '@/app/_ui/query-provider';
@@ -11,10 +11,10 @@ export const metadata: Metadata = { title: 'Cases' };
 
 /** The cases a person may see. */
 export default async function CasesPage() {
-  await requirePerson();
+  const person = await requirePerson();
   return (
     <QueryProvider>
-      <Shell links={deskLinks} aside={<AccountAside />}>
+      <Shell links={pageLinks(person)} aside={<AccountAside />}>
         <CaseList />
       </Shell>
     </QueryProvider>

@@ -1,7 +1,7 @@
 import type { Metadata } from 'next';
 
+import { pageLinks } from '@/app/(desk)/page-links';
 import { requirePerson } from '@/app/(desk)/require-person';
-import { deskLinks } from '@/app/(desk)/desk-links';
 import { PlanPage } from '@/app/_features/plan/plan-page';
 import { AccountAside } from '@/app/_features/sign-in/account-aside';
 import { QueryProvider } from '@/app/_ui/query-provider';
@@ -11,10 +11,10 @@ export const metadata: Metadata = { title: 'Plan a case' };
 
 /** Planning: what will be stimulated, where it is recorded, what counts as a change. */
 export default async function Plan() {
-  await requirePerson();
+  const person = await requirePerson();
   return (
     <QueryProvider>
-      <Shell links={deskLinks} aside={<AccountAside />}>
+      <Shell links={pageLinks(person)} aside={<AccountAside />}>
         <PlanPage />
       </Shell>
     </QueryProvider>

@@ -4,11 +4,11 @@ import { useCallback, useMemo, useState } from 'react';
 
 import { ConsoleBody } from '@/app/_features/log/console-body';
 import { ConsoleNotices } from '@/app/_features/log/console-notices';
-import { giveCommand } from '@/app/_features/log/give-command';
 import { LogContext, type LogCase } from '@/app/_features/log/log-context';
 import type { LogDialog } from '@/app/_features/log/log-dialog';
 import { LogDialogs } from '@/app/_features/log/log-dialogs';
 import { LogHeaderAside, LogHeaderTitle } from '@/app/_features/log/log-header';
+import { giveCommand } from '@/app/_live/give-command';
 import { useCaseFeed } from '@/app/_live/use-case-feed';
 import { useProvisionalCase } from '@/app/_live/use-provisional-case';
 import { Shell } from '@/app/_ui/shell';

@@ -54,8 +54,8 @@ export function SignInForm({ typed, onType, submitRef }: SignInFormProps) {
   );
 }
 
-/** The page that was asked for before, when it is one of ours; else the list of cases. */
+/** The page that was asked for before, when it is one of ours; else the start, which leads each person to their page. */
 function wantedPage(): string {
   const wanted = new URLSearchParams(window.location.search).get('next') ?? '';
-  return /^\/(?![/\\])[\w/-]*$/.test(wanted) ? wanted : '/cases';
+  return /^\/(?![/\\])[\w/-]*$/.test(wanted) ? wanted : '/';
 }
