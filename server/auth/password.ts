@@ -6,7 +6,7 @@ const strength = { memoryCost: 19_456, timeCost: 2, parallelism: 1 } as const;
 let unknownPersonsHash: Promise<string> | null = null;
 
 /** Hash of a password as it is stored. */
-export function hashPassword(password: string): Promise<string> {
+function hashPassword(password: string): Promise<string> {
   return hash(password, strength);
 }
 

@@ -5,7 +5,7 @@ import { readCookies } from '@/server/auth/read-cookies';
 const dayS = 86_400;
 
 /** Name of the cookie that holds a wall's token. */
-export function screenCookieName(publicUrl: string): string {
+function screenCookieName(publicUrl: string): string {
   return publicUrl.startsWith('https:') ? '__Host-fascicle-screen' : 'fascicle-screen';
 }
 

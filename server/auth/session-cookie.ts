@@ -6,7 +6,7 @@ import { deriveSecret } from '@/server/auth/derive-secret';
 const uuid = /^[0-9a-f]{8}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{12}$/;
 
 /** Name of the cookie that holds the session's token; over https only the name that browsers guard is taken. */
-export function sessionCookieName(publicUrl: string): string {
+function sessionCookieName(publicUrl: string): string {
   return publicUrl.startsWith('https:') ? '__Secure-next-auth.session-token' : 'next-auth.session-token';
 }
 

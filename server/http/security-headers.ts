@@ -6,7 +6,7 @@ export interface PolicyFacts {
 }
 
 /** The content policy of one response. Scripts and styles by nonce only; the live channel on the own origin only. */
-export function contentPolicy({ nonce, publicUrl, isDevelopment }: PolicyFacts): string {
+function contentPolicy({ nonce, publicUrl, isDevelopment }: PolicyFacts): string {
   const channel = publicUrl.replace(/^http/, 'ws');
   const lines: Record<string, string> = {
     'default-src': "'none'",

@@ -11,7 +11,6 @@ import { giveCommandMessage } from '@/server/live/give-command-message';
 import { admit, viewerOf } from '@/server/live/handshake';
 import { reply, type LiveServer, type LiveSocket, type SocketFacts } from '@/server/live/live-socket';
 import { notePainted } from '@/server/live/note-painted';
-import { makePaintedAlerts } from '@/server/live/painted-alerts';
 import type { Presence } from '@/server/cases/presence';
 import { makePump, type Pump } from '@/server/live/pump';
 import { pulseOnce } from '@/server/live/pulse-once';
@@ -97,7 +96,6 @@ type Parts = { context: ServerContext; presence: Presence; pump: Pump; departure
 function listenToViewers(io: LiveServer, parts: Parts): void {
   const { context, departures } = parts;
   const limit: RateLimit = makeRateLimit({ perSecond: 20, burst: 60, nowMs: context.nowMs });
-  const painted = makePaintedAlerts();
   io.on('connection', (socket) => {
     const tooMany = (answer: unknown): boolean => {
       if (limit.take(socket.id)) return false;
@@ -112,7 +110,7 @@ function listenToViewers(io: LiveServer, parts: Parts): void {
     });
     socket.on('painted', (message, answer) => {
       if (tooMany(answer)) return;
-      const isNoted = notePainted(context, painted, socket, message);
+      const isNoted = notePainted(context, socket, message);
       reply(answer, isNoted ? { kind: 'noted' } : { kind: 'refused', code: 'bad-request', message: 'Not noted: a wall confirms what it painted of its own case only.' });
     });
     socket.on('error', (cause) => context.log.warn({ err: cause }, 'A socket met a fault.'));

@@ -39,6 +39,6 @@ export async function readPage(context: Pick<ServerContext, 'database'>, visitor
 }
 
 /** A wall reads numbers, hashes and what the allow-list holds; a person reads all. */
-export function forVisitor(visitor: Visitor): (entry: WireEntry) => WireEntry {
+function forVisitor(visitor: Visitor): (entry: WireEntry) => WireEntry {
   return visitor.kind === 'screen' ? wallEntry : (entry) => entry;
 }

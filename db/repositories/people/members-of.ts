@@ -1,5 +1,11 @@
 import type { Handle } from '@/db/connection';
-import type { PersonName } from './find-people';
+
+/** A person as colleagues see them. */
+export interface PersonName {
+  readonly personId: string;
+  readonly email: string;
+  readonly displayName: string;
+}
 
 /** People with a role in a hospital now, by name: whom a case can be assigned to. */
 export async function membersOf(handle: Handle, hospitalId: string, role: string): Promise<PersonName[]> {

@@ -62,10 +62,7 @@ export const endedMessageSchema = z.strictObject({ caseId: z.string(), reason: z
 /** Wall to server: an alert or a state was painted. */
 export const paintedMessageSchema = z.strictObject({ caseId: uuid, seq: z.int().min(1), alertId: alertSlug.nullable(), paintedAt: moment });
 
-export type FollowRequest = z.infer<typeof followRequestSchema>;
 export type FollowReply = z.infer<typeof followReplySchema>;
-export type CommandMessage = z.infer<typeof commandMessageSchema>;
 export type EntriesMessage = z.infer<typeof entriesMessageSchema>;
 export type PulseMessage = z.infer<typeof pulseMessageSchema>;
 export type EndedMessage = z.infer<typeof endedMessageSchema>;
-export type PaintedMessage = z.infer<typeof paintedMessageSchema>;

@@ -6,7 +6,6 @@ import { assignmentsOf } from '@/db/repositories/cases/assignments-of';
 import { endAssignment } from '@/db/repositories/cases/end-assignment';
 import { eraseIdentity } from '@/db/repositories/cases/erase-identity';
 import { findCase } from '@/db/repositories/cases/find-case';
-import { getCase } from '@/db/repositories/cases/get-case';
 import { insertCase } from '@/db/repositories/cases/insert-case';
 import { readIdentity } from '@/db/repositories/cases/read-identity';
 import { findHospital } from '@/db/repositories/hospitals/find-hospital';
@@ -30,7 +29,6 @@ describe('findCase', () => {
     const { caseId } = await addCase(db.database.app, db.hospital);
     expect(await within(db.hospital, (transaction) => findCase(transaction, caseId))).toMatchObject({ id: caseId, hospitalId: db.hospital.id, plannedBy: db.hospital.deskId });
     expect(await within(db.other, (transaction) => findCase(transaction, caseId))).toBeNull();
-    await expect(within(db.other, (transaction) => getCase(transaction, caseId))).rejects.toThrow(`There is no case ${caseId}.`);
   });
 
   test('a reference stands once in a hospital and may stand in another', async () => {

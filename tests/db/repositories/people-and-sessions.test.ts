@@ -5,17 +5,13 @@ import { acceptSecondFactorStep } from '@/db/repositories/people/accept-second-f
 import { demoPeople } from '@/db/repositories/people/demo-people';
 import { findCredentialsByEmail } from '@/db/repositories/people/find-credentials-by-email';
 import { findCredentialsByPerson } from '@/db/repositories/people/find-credentials-by-person';
-import { findPeople } from '@/db/repositories/people/find-people';
 import { liveMemberships } from '@/db/repositories/people/live-memberships';
 import { membersOf } from '@/db/repositories/people/members-of';
 import { findLiveSession } from '@/db/repositories/sessions/find-live-session';
 import { findLiveSessions } from '@/db/repositories/sessions/find-live-sessions';
 import { insertSession } from '@/db/repositories/sessions/insert-session';
-import { liveSessionIds } from '@/db/repositories/sessions/live-session-ids';
 import { noteReauthenticated } from '@/db/repositories/sessions/note-reauthenticated';
-import { noteSessionSeen } from '@/db/repositories/sessions/note-session-seen';
 import { revokeSession } from '@/db/repositories/sessions/revoke-session';
-import { revokeSessionsOf } from '@/db/repositories/sessions/revoke-sessions-of';
 import { removeOldAttempts } from '@/db/repositories/sign-in/remove-old-attempts';
 import { beginAttempt, noteSuccess } from '@/db/repositories/sign-in/begin-attempt';
 import { withinHospitals } from '@/db/within-hospitals';
@@ -89,7 +85,6 @@ describe('findLiveSession', () => {
     const past = await begin();
     await db.admin('sessions').where({ id: past }).update({ created_at: '2020-01-01Z', expires_at: '2020-01-02Z' });
     for (const id of [revoked, past, uuidv7()]) expect(await findLiveSession(db.database.app, id)).toBeNull();
-    expect(await liveSessionIds(db.database.app, [revoked, past])).toEqual(new Set());
     expect(await noteReauthenticated(db.database.app, revoked)).toBe(false);
   });
 
@@ -112,28 +107,17 @@ describe('findLiveSession', () => {
 
   test('shows that the person gave their credentials again', async () => {
     const id = await begin();
-    await noteSessionSeen(db.database.app, id);
     expect(await noteReauthenticated(db.database.app, id)).toBe(true);
     expect((await findLiveSession(db.database.app, id))?.reauthenticatedAt).toMatch(/^\d{4}-.+\.\d{3}Z$/);
   });
 });
 
-describe('revokeSessionsOf', () => {
-  test('ends all of a person and names them', async () => {
-    const ids = [await begin(), await begin()];
-    expect(await liveSessionIds(db.database.app, ids)).toEqual(new Set(ids));
-    expect(await revokeSessionsOf(db.database.app, db.hospital.deskId)).toEqual(expect.arrayContaining(ids));
-    expect(await liveSessionIds(db.database.app, ids)).toEqual(new Set());
-  });
-});
-
-describe('members and people', () => {
-  test('are found within the hospital only', async () => {
+describe('membersOf', () => {
+  test('finds people within the hospital only', async () => {
     const desk = { personId: db.hospital.deskId, email: 'desk@north.example', displayName: 'neurophysiologist' };
     const within = <Result>(work: Parameters<typeof withinHospitals<Result>>[2]) => withinHospitals(db.database.app, [db.hospital.id], work);
     expect(await within((transaction) => membersOf(transaction, db.hospital.id, 'neurophysiologist'))).toEqual([desk]);
     expect(await within((transaction) => membersOf(transaction, db.other.id, 'neurophysiologist'))).toEqual([]);
-    expect(await within((transaction) => findPeople(transaction, [db.hospital.deskId, db.other.deskId]))).toEqual([desk]);
   });
 });
 

@@ -2,6 +2,7 @@ import { v7 as newId } from 'uuid';
 import { afterAll, afterEach, beforeAll, describe, expect, test } from 'vitest';
 
 import { entriesMessageSchema, followReplySchema, pulseMessageSchema } from '@/lib/contracts/channel/messages';
+import { contractVersion } from '@/lib/contracts/contract-version';
 
 import { commit, envelope, planCaseAs, runCommand } from '@/tests/server/house/client';
 import { openTestHouse, type TestHouse } from '@/tests/server/house/open-test-house';
@@ -72,7 +73,7 @@ describe('follow', () => {
     expect(await foreign.follow(newId())).toEqual(refused);
     await commit(house, desk, caseId, { name: 'send-message', text: 'Not for the other hospital' });
     expect(await foreign.follow(caseId, 0, 99)).toMatchObject({ code: 'newer-version' });
-    for (const message of [null, 7, 'x', [], {}, { contractVersion: 1, caseId, after: -1 }, { contractVersion: 1, caseId: '\u0000', after: 0 }, { contractVersion: 1, caseId, after: 0, extra: 1 }, Buffer.from([1, 2])]) {
+    for (const message of [null, 7, 'x', [], {}, { contractVersion, caseId, after: -1 }, { contractVersion, caseId: '\u0000', after: 0 }, { contractVersion, caseId, after: 0, extra: 1 }, Buffer.from([1, 2])]) {
       expect(await foreign.ask('follow', message)).toMatchObject({ kind: 'refused', code: 'bad-request', message: expect.stringMatching(/^Not a request/) });
     }
     expect(foreign.raw.join()).not.toContain('Not for the other hospital');
@@ -124,7 +125,7 @@ describe('a command over the channel', () => {
 
   test('a flood is held back in words that say "send again", and ends nobody', async () => {
     const viewer = await connect(desk, 'desk');
-    const answers = await Promise.all(Array.from({ length: 120 }, () => viewer.ask('follow', { contractVersion: 1, caseId, after: 1_000_000 })));
+    const answers = await Promise.all(Array.from({ length: 120 }, () => viewer.ask('follow', { contractVersion, caseId, after: 1_000_000 })));
     expect(answers.filter((answer) => (answer as { code?: string }).code === 'not-saved').length).toBeGreaterThan(20);
     expect(viewer.socket.connected).toBe(true);
   });
