@@ -2,7 +2,7 @@ import { v7 as newId } from 'uuid';
 
 import type { CasePlan } from '@/lib/case/plan';
 import type { RunBody } from '@/lib/case/run-body';
-import type { PersonCommand } from '@/lib/contracts/http/commands';
+import type { PersonCommand, PlanCaseRequest } from '@/lib/contracts/http/commands';
 import type { CommandReply, WireEntry } from '@/lib/contracts/http/replies';
 import type { Reading } from '@/lib/response/reading';
 import { send, type HttpAnswer } from '@/tests/server/house/client';
@@ -23,12 +23,17 @@ export class HttpDesk {
   ) {}
 
   /** Signs in and plans a case. */
-  static async plan(product: { readonly url: string }, plan: CasePlan, email = 'desk@demo.example'): Promise<HttpDesk> {
+  static async plan(product: { readonly url: string }, plan: CasePlan, email = 'desk@demo.example', team: PlanCaseRequest['team'] = []): Promise<HttpDesk> {
     const cookie = await demoSession(product, email);
-    const body = { commandId: newId(), eventAt: new Date().toISOString(), plan, identity: { patientLabel: 'Invented patient', recordNumber: 'DEMO-1' } };
+    const body = { commandId: newId(), eventAt: new Date().toISOString(), plan, ...(team.length === 0 ? {} : { team }), identity: { patientLabel: 'Invented patient', recordNumber: 'DEMO-1' } };
     const { status, body: reply } = await send(product, 'POST', '/api/cases', { cookie, body });
     if (status !== 200) throw new Error(`Planning answered ${status}: ${JSON.stringify(reply)}`);
     return new HttpDesk(product, cookie, (reply as CommandReply & { kind: 'committed' }).caseId, plan);
+  }
+
+  /** The same case in the hands of another demo person. */
+  async as(email: string): Promise<HttpDesk> {
+    return new HttpDesk(this.product, await demoSession(this.product, email), this.caseId, this.plan);
   }
 
   /** Gives a command that must be committed; the entries it wrote. */

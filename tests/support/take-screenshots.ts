@@ -1,6 +1,6 @@
 /*
  * Pictures of every page and every state of the wall, played through the real product, for the eye:
- * node --import tsx tests/support/take-screenshots.ts [desk|wall] [--width=1440]. They go to tests/.out/screens.
+ * node --import tsx tests/support/take-screenshots.ts [desk|wall|today] [--width=1440]. They go to tests/.out/screens.
  */
 import { mkdir } from 'node:fs/promises';
 import path from 'node:path';
@@ -16,6 +16,7 @@ import { HttpDesk } from '@/tests/support/http-desk';
 import { buildForTests, root } from '@/tests/support/product-build';
 import { startProduct, type Product } from '@/tests/support/start-product';
 import { chooseTheme } from '@/tests/support/theme-cookie';
+import { shootToday } from '@/tests/support/today-pictures';
 import { adm, apb } from '@/tests/support/ulnar-case';
 import { wallCourse } from '@/tests/support/wall-course';
 import { WallScreen } from '@/tests/support/wall-screen';
@@ -196,6 +197,7 @@ const browser = await launchChromium();
 try {
   if (wants('desk')) await shootDesk(browser, product);
   if (wants('wall')) await shootWall(browser, product);
+  if (wants('today')) await shootToday(browser, product, folder, shoot);
 } finally {
   await browser.close();
   await product.stop();

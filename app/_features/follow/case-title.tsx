@@ -14,7 +14,7 @@ export function CaseTitle() {
   const session = useLiveStore((store) => store.session);
   const viewer = { personId: 'personId' in session ? session.personId : '', role: head.role };
   return (
-    <header className="flex flex-wrap items-baseline gap-x-6 gap-y-1 border-b border-rule px-4 py-3 sm:px-6 min-[2400px]:text-[26px] min-[2400px]:leading-[1.4]">
+    <header className="flex flex-wrap items-baseline gap-x-6 gap-y-1 border-b border-rule px-4 py-3 sm:px-6">
       <h1 className="text-[1.3em] leading-snug font-bold">{state.plan.title}</h1>
       <span className="text-second">{`${state.plan.theatre}, ${head.reference}`}</span>
       <StatusDot isOn={isLive}>{isLive ? 'Live' : `Not live since ${clockTime(feed.checkedAt ?? state.phaseAt, timeZone, { seconds: true })}`}</StatusDot>

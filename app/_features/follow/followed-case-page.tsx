@@ -35,7 +35,7 @@ export function FollowedCasePage({ caseId, head }: { readonly caseId: string; re
     <FollowContext.Provider value={held}>
       <FollowNotices caseId={caseId} />
       <CaseTitle />
-      <div className="grid min-w-0 flex-1 lg:grid-cols-[minmax(0,1fr)_24rem] 2xl:grid-cols-[minmax(0,1fr)_32rem] min-[2400px]:grid-cols-[minmax(0,1fr)_60rem] min-[2400px]:text-[26px] min-[2400px]:leading-[1.4]">
+      <div className="grid min-w-0 flex-1 lg:grid-cols-[minmax(0,1fr)_24rem] 2xl:grid-cols-[minmax(0,1fr)_32rem]">
         <div className="relative min-w-0">
           <div inert={!held.isLive} aria-hidden={!held.isLive}>
             <LivePart />

@@ -20,7 +20,7 @@ export function TodayPage() {
   return (
     <>
       {problem === null ? null : <NoticeBar tone="strong">{`${problem.message} A case that was opened since may be missing here.`}</NoticeBar>}
-      <div className="mx-auto w-full max-w-[112rem] px-4 py-5 sm:px-6 min-[2400px]:max-w-none min-[2400px]:px-16 min-[2400px]:text-[26px] min-[2400px]:leading-[1.4]">
+      <div className="mx-auto w-full max-w-[112rem] px-4 py-5 sm:px-6">
         {isLoading ? (
           <>
             <h1 className="mb-5 text-[1.7em] leading-tight font-bold">Today</h1>
