@@ -24,7 +24,7 @@ export function ConsoleBody({ areKeysOn }: { readonly areKeysOn: boolean }) {
   const isRunning = state.status === 'open' && head.mayWrite;
   return (
     <div onKeyDownCapture={() => setHint(null)} className="grid min-h-0 flex-1 grid-cols-1 overflow-y-auto lg:grid-cols-[minmax(0,1fr)_21rem] lg:overflow-hidden xl:grid-cols-[minmax(0,1fr)_23rem]">
-      <div className="flex min-h-0 min-w-0 flex-col">
+      <div className="flex min-w-0 flex-col lg:min-h-0">
         <SetUpBar onProblem={setProblem} />
         {problem === null ? null : (
           <div role="alert" className="flex items-center justify-between gap-4 border-b border-rule px-5 py-1.5 font-semibold">
@@ -37,7 +37,7 @@ export function ConsoleBody({ areKeysOn }: { readonly areKeysOn: boolean }) {
         {isRunning ? <RunForm areKeysOn={areKeysOn} /> : null}
         <LogTable />
       </div>
-      <aside aria-label="State of the case" className="flex min-h-0 flex-col border-l border-rule">
+      <aside aria-label="State of the case" className="flex min-w-0 flex-col border-rule lg:min-h-0 lg:border-l">
         <AlertBlocks />
         <div className="min-h-20 flex-1 lg:overflow-y-auto">
           <DuePanel />

@@ -93,6 +93,13 @@ describe('the focus after a question', () => {
 });
 
 describe('an open alert', () => {
+  it.each(['told', 'read-back', 'action', 'end'] as const)('is named in the question that speaks of it: %s', (kind) => {
+    const script = fallenUlnar(2);
+    const { alertId } = Object.values(script.state.incidents)[0]!;
+    open(script, 'Ask', { kind, alertId });
+    expect(screen.getByRole('dialog', { description: /Alert: Ulnar at 40\s% of baseline/ })).toBeTruthy();
+  });
+
   it('stands in the question too, where the window has no column for it', () => {
     const { dialog } = open(fallenUlnar(2), 'Keys', { kind: 'keys' });
     expect(dialog.textContent).toContain('Alert: Ulnar at 40\u00a0% of baseline');

@@ -3,6 +3,7 @@
 import { useState } from 'react';
 
 import { CommandDialog } from '@/app/_features/log/command-dialog';
+import { useAlertHeadline } from '@/app/_features/log/use-alert-headline';
 import { Choice } from '@/app/_ui/choice';
 import { Field } from '@/app/_ui/field';
 import { SelectField } from '@/app/_ui/select-field';
@@ -24,12 +25,14 @@ const causes = [
 
 /** Only a person ends an alert: with its outcome and the judged cause. */
 export function EndDialog({ alertId, onClose }: { readonly alertId: string; readonly onClose: () => void }) {
+  const headline = useAlertHeadline(alertId);
   const [outcome, setOutcome] = useState<Outcome | null>(null);
   const [cause, setCause] = useState<AlertCause | ''>('');
   const [text, setText] = useState('');
   return (
     <CommandDialog
       title={`${actionNames.ended}: how it came out`}
+      description={headline}
       action={actionNames.ended}
       command={() => {
         if (outcome === null) return 'Outcome missing: full, partial or no recovery';

@@ -21,7 +21,7 @@ export function KeysDialog({ onClose }: { readonly onClose: () => void }) {
     { title: 'Site, while the site group has the focus', rows: sites.flatMap((site) => (site.hotkey === null ? [] : [[site.hotkey, site.name]])) },
     { title: 'Alert', rows: Object.entries(consoleKeys).filter(([key]) => 'tbae'.includes(key)) },
     { title: 'Step', rows: [...state.plan.steps.flatMap((step) => (step.hotkey === null ? [] : [[step.hotkey, step.label]])), ['o', consoleKeys.o]] },
-    { title: 'Other', rows: [['c', consoleKeys.c], ['m', consoleKeys.m], ['?', 'Keys'], ['Esc', 'Leave a question']] },
+    { title: 'Other', rows: [['c', consoleKeys.c], ['m', consoleKeys.m], ['v', consoleKeys.v], ['?', 'Keys'], ['Esc', 'Leave a question']] },
   ];
   return (
     <ConsoleDialog isOpen isWide onOpenChange={onClose} title="Keys" description="Letters act when no number is half typed and no text is being written.">

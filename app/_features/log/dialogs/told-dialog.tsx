@@ -4,6 +4,7 @@ import { useState } from 'react';
 
 import { CommandDialog } from '@/app/_features/log/command-dialog';
 import { useLogCase } from '@/app/_features/log/log-context';
+import { useAlertHeadline } from '@/app/_features/log/use-alert-headline';
 import { Choice } from '@/app/_ui/choice';
 import { TextArea } from '@/app/_ui/text-area';
 import { actionNames } from '@/lib/text/action-names';
@@ -22,6 +23,7 @@ const ways = [
 
 /** Who was told, how, in which words; the words stand ready, Enter confirms them. */
 export function ToldDialog({ alertId, onClose }: { readonly alertId: string; readonly onClose: () => void }) {
+  const headline = useAlertHeadline(alertId);
   const { state } = useLogCase();
   const incident = Object.values(state.incidents).find((open) => open.alertId === alertId);
   const [words, setWords] = useState(() => (incident === undefined ? '' : sayThis(state, incident)));
@@ -30,6 +32,7 @@ export function ToldDialog({ alertId, onClose }: { readonly alertId: string; rea
   return (
     <CommandDialog
       title={actionNames.told}
+      description={headline}
       action={actionNames.told}
       command={() => (words.trim() === '' ? 'Words missing: log what was said' : { name: 'tell-alert', alertId, whom, how, words })}
       onClose={onClose}
