@@ -1,8 +1,8 @@
 import { joinClasses } from '@/app/_ui/join-classes';
 import { PriorityMark } from '@/app/_ui/priority-mark';
-import { nonBreakingSpace } from '@/lib/text/format';
 import { stateMark } from '@/lib/text/state-mark';
 import type { TheatreLine } from '@/lib/text/theatre-line';
+import { theatreWrap } from '@/lib/text/theatre-wrap';
 
 /**
  * The one statement that matters. High fills the whole band, medium its headline, low is outlined, calm rests on a
@@ -78,11 +78,9 @@ function Words({ line, detailClassName }: { readonly line: TheatreLine; readonly
 }
 
 function Headline({ text }: { readonly text: string }) {
-  return <h1 className="min-w-0 leading-[1.06] font-bold text-balance wrap-anywhere">{text}</h1>;
+  return <h1 className="min-w-0 leading-[1.06] font-bold text-balance wrap-anywhere">{theatreWrap(text)}</h1>;
 }
 
 function Detail({ text, className }: { readonly text: string; readonly className: string }) {
-  // A time or a count never stands alone at the start of a line.
-  const words = text.replaceAll(/ (?=\d)/g, nonBreakingSpace);
-  return text === '' ? null : <p className={joinClasses('leading-[1.25] text-balance wrap-anywhere', className)}>{words}</p>;
+  return text === '' ? null : <p className={joinClasses('leading-[1.25] text-balance wrap-anywhere', className)}>{theatreWrap(text)}</p>;
 }

@@ -9,6 +9,7 @@ import { PriorityMark } from '@/app/_ui/priority-mark';
 import { pastHeadline, staysLarge } from '@/lib/text/past-headline';
 import { stateMark } from '@/lib/text/state-mark';
 import type { TheatreLine } from '@/lib/text/theatre-line';
+import { theatreWrap } from '@/lib/text/theatre-wrap';
 
 interface NotLivePictureProps {
   readonly place: string;
@@ -44,7 +45,7 @@ export function NotLivePicture({ place, procedure, reason, lastLive, lines, sett
           {lines.map((line) => (
             <li key={`${line.kind}-${line.nerveId ?? ''}-${line.headline}`} className={joinClasses('flex items-center gap-[0.5em]', staysLarge(line) ? 'text-(length:--headline) leading-[1.06] font-bold' : 'text-second')}>
               {line.priority === null ? null : <PriorityMark kind={stateMark(line)} className="size-[0.95em] shrink-0" />}
-              <span className="min-w-0 text-balance wrap-anywhere">{pastHeadline(line)}</span>
+              <span className="min-w-0 text-balance wrap-anywhere">{theatreWrap(pastHeadline(line))}</span>
             </li>
           ))}
         </ul>

@@ -34,9 +34,16 @@ describe('LeadBand', () => {
     expect(shown.shape).not.toBe(calm.shape);
   });
 
+  it('never ends a line inside a fact', () => {
+    render(<LeadBand line={{ ...line, detail: 'Between above and below elbow. Last good 11:22, first seen 11:24.' }} />);
+    const words = screen.getByText(/^Between/).textContent ?? '';
+    expect(words).toContain('Last\u00a0good\u00a011:22');
+    expect(words).toContain('first\u00a0seen\u00a011:24');
+  });
+
   it('says the words', () => {
     render(<LeadBand line={line} />);
-    expect(screen.getByRole('heading', { level: 1 }).textContent).toBe('Ulnar at 36\u00a0% of baseline');
+    expect(screen.getByRole('heading', { level: 1 }).textContent).toBe('Ulnar at\u00a036\u00a0% of baseline');
     expect(screen.getByText('Last good 10:38.')).toBeDefined();
   });
 });

@@ -7,7 +7,7 @@ import { nodeShapes } from '@/lib/chart/node-shapes';
 const sizes = nerveLineSizes({ widthPx: 800, textPx: 16, hasAges: false });
 
 function nodesOf(priority: Priority | null, isDim = false) {
-  const site = { siteId: 's', name: 'Wrist', positionMm: 0, text: '98\u00a0%', ageText: null, priority, isDim };
+  const site = { siteId: 's', name: 'Wrist', positionMm: 0, text: '98\u00a0%', ageText: null, priority, textPriority: priority, isDim };
   return nodeShapes({ nerveId: 'n', nerveName: 'N', description: '', segments: [], end: null, sites: [site] }, sizes, () => 100);
 }
 

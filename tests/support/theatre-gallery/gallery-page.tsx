@@ -7,7 +7,9 @@ import { wallSettings } from '@/app/_features/theatre/wall-settings';
 import { wallStates } from '@/tests/support/theatre-gallery/wall-states';
 
 const settings = wallSettings(window.location.search, null);
-const name = new URLSearchParams(window.location.search).get('state') ?? '';
+const query = new URLSearchParams(window.location.search);
+const name = query.get('state') ?? '';
+const deskWords = query.has('desk') ? 'Desk not connected since 10:41' : null;
 
 function Gallery() {
   if (name === 'not-paired') return <PairingPicture pairing={{ code: 'K7Q4XM', words: 'amber kestrel' }} ended={null} problem={null} settings={settings} />;
@@ -26,7 +28,7 @@ function Gallery() {
     );
   }
   const shown = wallStates[name]?.();
-  return shown === undefined ? <p>{Object.keys(wallStates).join(' ')}</p> : <TheatrePicture {...shown} isLive deskWords={name === 'not-tested' ? 'Desk not connected since 10:41' : null} settings={settings} />;
+  return shown === undefined ? <p>{Object.keys(wallStates).join(' ')}</p> : <TheatrePicture {...shown} isLive deskWords={deskWords} settings={settings} />;
 }
 
 const root = document.getElementById('root');
