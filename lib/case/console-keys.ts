@@ -22,6 +22,7 @@ export const consoleKeys = {
   s: 'Site',
   t: 'Told',
   u: 'Correct last run',
+  v: 'Advice confirmed',
 } as const satisfies Readonly<Record<string, string>>;
 
 /** A key of the console. */

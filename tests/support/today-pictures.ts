@@ -43,7 +43,10 @@ export async function shootToday(browser: Browser, product: Product, folder: str
   await physician.give({ name: 'give-advice', text: 'Release traction and test the axilla again' });
   await each('follow-alert', async (person) => (await person.goTo(`/cases/${alert.caseId}/follow`), person.page.getByRole('heading', { name: /Ulnar at 36/ }).first().waitFor()));
   await each('follow-untested', async (person) => (await person.goTo(`/cases/${untested.caseId}/follow`), person.page.getByRole('button', { name: /^Accept baseline/ }).waitFor()));
-  await each('follow-alert', async (person) => person.goTo(`/cases/${alert.caseId}/follow`));
+  for (const { person } of people) {
+    await person.goTo(`/cases/${alert.caseId}/follow`);
+    await person.page.getByRole('heading', { name: /Ulnar at 36/ }).first().waitFor();
+  }
   await product.stopServer();
   for (const { person } of people) person.watched.expectError(/./);
   await each('follow-not-live', (person) => person.page.waitForFunction(() => Number(getComputedStyle(document.querySelector('[data-live]')!).opacity) === 1));

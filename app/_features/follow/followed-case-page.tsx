@@ -7,6 +7,7 @@ import { FollowContext, type FollowCase } from '@/app/_features/follow/follow-co
 import { FollowNotices } from '@/app/_features/follow/follow-notices';
 import { LivePart } from '@/app/_features/follow/live-part';
 import { NotLiveCover } from '@/app/_features/follow/not-live-cover';
+import { RecentEntries } from '@/app/_features/follow/recent-entries';
 import { TalkPanel } from '@/app/_features/follow/talk-panel';
 import { giveCommand } from '@/app/_live/give-command';
 import { NotLiveLayer } from '@/app/_live/not-live-layer';
@@ -19,7 +20,7 @@ import { upcast } from '@/lib/case/upcast';
 import type { PersonCommand } from '@/lib/contracts/http/commands';
 import type { CaseHeadReply } from '@/lib/contracts/http/replies';
 
-/** Left what is live, under the layer that covers it whenever it is not; right the talk with the desk, which also works without a link. */
+/** Left what is live, under the layer that covers it whenever it is not; right the talk with the desk, which also works without a link; the entries below. */
 export function FollowedCasePage({ caseId, head }: { readonly caseId: string; readonly head: CaseHeadReply }) {
   const held = useFollowed(caseId, head);
   if (held === null) {
@@ -35,7 +36,7 @@ export function FollowedCasePage({ caseId, head }: { readonly caseId: string; re
     <FollowContext.Provider value={held}>
       <FollowNotices caseId={caseId} />
       <CaseTitle />
-      <div className="grid min-w-0 flex-1 lg:grid-cols-[minmax(0,1fr)_24rem] 2xl:grid-cols-[minmax(0,1fr)_32rem]">
+      <div className="grid min-w-0 flex-1 lg:grid-rows-[auto_1fr] lg:grid-cols-[minmax(0,1fr)_24rem] 2xl:grid-cols-[minmax(0,1fr)_32rem]">
         <div className="relative min-w-0">
           <div inert={!held.isLive} aria-hidden={!held.isLive}>
             <LivePart />
@@ -45,6 +46,7 @@ export function FollowedCasePage({ caseId, head }: { readonly caseId: string; re
           </NotLiveLayer>
         </div>
         <TalkPanel />
+        <RecentEntries />
       </div>
     </FollowContext.Provider>
   );

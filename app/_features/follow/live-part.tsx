@@ -5,12 +5,11 @@ import { ConditionList } from '@/app/_features/follow/condition-list';
 import { useFollowCase } from '@/app/_features/follow/follow-context';
 import { IncidentList } from '@/app/_features/follow/incident-list';
 import { LeadState } from '@/app/_features/follow/lead-state';
-import { RecentEntries } from '@/app/_features/follow/recent-entries';
 import { NervePictures } from '@/app/_ui/nerve-pictures';
 import { shownNerves } from '@/lib/chart/shown-nerves';
 import { theatreView } from '@/lib/text/theatre-view';
 
-/** What the case shows now: the state as on the wall, the nerve, the open alerts, conditions, baselines, entries. */
+/** What the case shows now: the state as on the wall, the nerve, the open alerts, conditions, baselines. */
 export function LivePart() {
   const { state, timeZone, nowMs } = useFollowCase();
   const view = theatreView(state, nowMs, timeZone);
@@ -25,7 +24,6 @@ export function LivePart() {
         <ConditionList />
         <BaselineList />
       </div>
-      <RecentEntries />
     </>
   );
 }

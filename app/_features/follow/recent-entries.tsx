@@ -8,11 +8,11 @@ const mostShown = 40;
 
 /** The newest entries in sentences, newest first; all of them stand in the record. */
 export function RecentEntries() {
-  const { caseId, entries, state, timeZone } = useFollowCase();
+  const { caseId, entries, state, timeZone, isLive, feed } = useFollowCase();
   const shown = entries.slice(-mostShown).reverse();
   return (
-    <section aria-labelledby="entries" className="px-4 py-3 sm:px-6">
-      <h2 id="entries" className="mb-1 font-bold">Entries</h2>
+    <section aria-labelledby="entries" className="min-w-0 px-4 py-3 sm:px-6">
+      <h2 id="entries" className="mb-1 font-bold">{isLive ? 'Entries' : `Entries known at ${clockTime(feed.checkedAt ?? state.phaseAt, timeZone, { seconds: true })}`}</h2>
       <ol reversed start={shown[0]?.seq ?? 1}>
         {shown.map((entry) => (
           <li key={entry.seq} className="slides-in flex gap-3 border-b border-rule py-1">

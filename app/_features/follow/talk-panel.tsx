@@ -12,7 +12,7 @@ export function TalkPanel() {
   const lines = talkLines(entries, waitingEntries);
   const mayWrite = state.status !== 'closed' && (head.role === 'physician' || head.mayWrite);
   return (
-    <aside aria-label="Messages and advice" className="flex min-w-0 flex-col border-rule px-4 py-3 max-lg:border-t sm:px-6 lg:border-l">
+    <aside aria-label="Messages and advice" className="flex min-w-0 flex-col border-rule px-4 py-3 max-lg:border-b sm:px-6 lg:row-span-2 lg:border-l">
       <h2 className="mb-1 font-bold">Messages and advice</h2>
       {lines.length === 0 ? <p className="mb-3 text-second">What the desk and the physician write to each other stands here</p> : null}
       <ol className="mb-3 lg:max-h-[60dvh] lg:overflow-y-auto" tabIndex={lines.length > 0 ? 0 : undefined} aria-label="Written so far">

@@ -1,6 +1,8 @@
 'use client';
 
+import { AdviceBlocks } from '@/app/_features/log/advice-block';
 import { useLogCase } from '@/app/_features/log/log-context';
+import { useWallWord } from '@/app/_features/log/use-wall-word';
 import { useNow } from '@/app/_live/use-now';
 import { Band } from '@/app/_ui/band';
 import { Button } from '@/app/_ui/button';
@@ -21,6 +23,7 @@ export function AlertBlocks() {
   return (
     <div aria-live="assertive" aria-atomic="false" className="relative z-45 shrink-0 bg-ground lg:max-h-[58%] lg:overflow-y-auto">
       {incidents.map((incident, index) => <AlertBlock key={incident.alertId} incident={incident} isFirst={index === 0} />)}
+      <AdviceBlocks />
     </div>
   );
 }
@@ -29,6 +32,7 @@ export function AlertBlocks() {
 function AlertBlock({ incident, isFirst }: { readonly incident: Incident; readonly isFirst: boolean }) {
   const { state, timeZone, head, openDialog } = useLogCase();
   const nowMs = useNow(1000);
+  const wall = useWallWord(incident, nowMs);
   const line = incidentLine(state, incident, timeZone);
   const key = (letter: string) => (isFirst ? letter : null);
   const open = (kind: 'told' | 'read-back' | 'action' | 'end') => () => openDialog({ kind, alertId: incident.alertId });
@@ -38,7 +42,8 @@ function AlertBlock({ incident, isFirst }: { readonly incident: Incident; readon
         {line.priority === null ? null : <PriorityMark kind={line.priority} className="size-5 shrink-0" />}
         {line.headline}
       </h2>
-      <p className="mt-0.5 text-sm font-semibold">{`${incident.level === 'alert' ? 'Alert' : 'Notice'} for ${durationWords(nowMs - msOfMoment(incident.raisedAt))}. ${handlingWords(incident, timeZone)}`}</p>
+      <p className="mt-0.5 text-sm font-semibold">{`${incident.level === 'alert' ? 'Alert' : 'Notice'} for ${durationWords(nowMs - msOfMoment(incident.raisedAt))}. ${handlingWords(incident, timeZone)}${wall === null || wall.isMissing ? '' : `. ${wall.text}`}`}</p>
+      {wall?.isMissing === true ? <p className="mt-1 w-fit rounded bg-ink px-2 font-bold text-ground">{wall.text}</p> : null}
       {isFirst ? (
         <>
           <p className="mt-1">{line.detail}</p>

@@ -1,21 +1,24 @@
 'use client';
 
-import { useState, type FormEvent } from 'react';
+import { useMemo, useState, type FormEvent } from 'react';
 
 import { useLogCase } from '@/app/_features/log/log-context';
 import { Panel } from '@/app/_features/log/panel';
+import { PhysicianConnected } from '@/app/_features/log/physician-connected';
 import { Button } from '@/app/_ui/button';
 import { Field } from '@/app/_ui/field';
+import { upcast } from '@/lib/case/upcast';
 import { clockTime } from '@/lib/text/format';
+import { talkLines, talkNote } from '@/lib/text/talk-lines';
 
-const shownMessages = 3;
+const shownLines = 4;
 
-/** The last messages of the case, and a line to write one. */
+/** The last messages and pieces of advice, who is there to read them, and a line to write one. */
 export function MessagesPanel() {
-  const { state, entries, timeZone, give } = useLogCase();
+  const { state, entries, waitingEntries, timeZone, give } = useLogCase();
   const [text, setText] = useState('');
   const [problem, setProblem] = useState<string | null>(null);
-  const messages = entries.filter((entry) => entry.kind === 'message.sent').slice(-shownMessages);
+  const lines = useMemo(() => talkLines(entries.map(upcast).filter((entry) => entry !== null), waitingEntries).slice(-shownLines), [entries, waitingEntries]);
   const handleSubmit = async (event: FormEvent) => {
     event.preventDefault();
     if (text.trim() === '') return;
@@ -26,12 +29,14 @@ export function MessagesPanel() {
     setProblem(outcome.message);
   };
   return (
-    <Panel title="Messages">
-      {messages.length === 0 ? <p className="mb-2 text-second">Messages with the physician stand here</p> : null}
-      <ul className="mb-2 flex flex-col gap-1">
-        {messages.map((entry) => (
-          <li key={entry.seq}>
-            <span className="font-mono text-sm text-second">{clockTime(entry.eventAt, timeZone)}</span> <b>{entry.author.displayName}</b> {String(entry.body?.['text'] ?? '')}
+    <Panel title="Messages" action={<PhysicianConnected />}>
+      {lines.length === 0 ? <p className="mb-2 text-second">Messages with the physician stand here</p> : null}
+      <ul aria-live="polite" className="mb-2 flex flex-col gap-1">
+        {lines.map((line) => (
+          <li key={line.key}>
+            <span className="font-mono text-sm text-second">{clockTime(line.at, timeZone)}</span> <b>{line.who}</b>
+            {line.isAdvice ? <b> Advice:</b> : null} {line.text}
+            {talkNote(line, timeZone) === '' ? null : <span className="block text-sm text-second">{talkNote(line, timeZone)}</span>}
           </li>
         ))}
       </ul>

@@ -30,6 +30,11 @@ export function useConsoleKeys(areKeysOn: boolean, onProblem: (problem: string |
           e: onAlert('end'),
           c: () => openDialog({ kind: 'condition', condition: 'train-of-four' }),
           o: () => openDialog({ kind: 'other-step' }),
+          v: () => {
+            const advice = state.advice.find((one) => one.confirmedAt === null);
+            if (advice === undefined) onHint('No advice waits');
+            else void give({ name: 'confirm-advice', adviceSeq: advice.seq, text: null }).then((outcome) => onProblem(outcome.kind === 'refused' ? outcome.message : null));
+          },
           m: () => document.querySelector<HTMLElement>('[data-message]')?.focus(),
           '?': () => openDialog({ kind: 'keys' }),
         }

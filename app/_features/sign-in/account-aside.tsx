@@ -31,7 +31,7 @@ export function AccountAside({ hasTheme = true }: { readonly hasTheme?: boolean 
   };
   return (
     <>
-      <span className="text-second">{session.data?.displayName ?? ''}</span>
+      <span className="text-second max-sm:sr-only">{session.data?.displayName ?? ''}</span>
       {hasTheme ? <ThemeToggle /> : null}
       <Button onClick={handleSignOut}>Sign out</Button>
       <Dialog isOpen={warning !== null} onOpenChange={(isOpen) => (isOpen ? undefined : setWarning(null))} title="Entries are waiting" description={warning ?? ''}>

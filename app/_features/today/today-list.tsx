@@ -24,7 +24,7 @@ export function TodayList({ cases, person }: { readonly cases: readonly CaseLine
       <div className="mb-3 flex flex-wrap items-end justify-between gap-x-8 gap-y-1">
         <h1 className="text-[1.7em] leading-tight font-bold">{todayHeading(shown.map(({ line }) => line))}</h1>
         {cases.length > 0 ? (
-          <p className="hidden items-center gap-2 text-[0.9em] text-second pointer-fine:flex">
+          <p className="hidden items-center gap-2 text-[0.9em] text-second sm:pointer-fine:flex">
             <Kbd>↑</Kbd><Kbd>↓</Kbd> choose <Kbd>Enter</Kbd> follow
           </p>
         ) : null}

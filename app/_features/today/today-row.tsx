@@ -1,7 +1,6 @@
 'use client';
 
 import Link from 'next/link';
-import type { ReactNode } from 'react';
 
 import type { TodayCase } from '@/app/_features/today/use-today-cases';
 import { feedProblemWords } from '@/app/_live/feed-words';
@@ -23,15 +22,17 @@ export function TodayRow({ listed, feed, state, nowMs, line, past }: TodayCase) 
   return (
     <li className="relative grid border-b border-rule has-focus-visible:outline-2 has-focus-visible:-outline-offset-2 has-focus-visible:outline-stain">
       <div inert={!line.isLive} aria-hidden={!line.isLive} className={rowClasses}>
-        <Title listed={listed} line={line} />
-        <div className="min-w-0 [grid-area:nerve]">
+        <Title title={listed.title} />
+        <div className="min-w-0 self-center [grid-area:nerve]">
           {state === null || lead === null ? null : <NervePictures views={shownNerves(state, lead, nowMs)} />}
         </div>
         <State line={line} problem={problem} />
+        <Facts line={line} />
       </div>
       <NotLiveLayer caseId={listed.caseId} className={joinClasses('hatched z-10', rowClasses)}>
-        <Title listed={listed} line={past} />
+        <Title title={listed.title} />
         <State line={past} problem={problem} />
+        <Facts line={past} />
       </NotLiveLayer>
       <Link href={`/cases/${listed.caseId}/follow`} prefetch={false} data-case-link className="absolute inset-0 z-20 outline-none">
         <span className="sr-only">{`Follow ${listed.title}, ${listed.theatre}: ${line.headline}`}</span>
@@ -41,24 +42,13 @@ export function TodayRow({ listed, feed, state, nowMs, line, past }: TodayCase) 
 }
 
 const rowClasses = joinClasses(
-  '[grid-area:1/1] grid min-w-0 gap-x-8 gap-y-1 px-1 py-3',
-  "[grid-template-areas:'case'_'state'_'nerve'] md:[grid-template-areas:'case_state'_'nerve_nerve'] md:grid-cols-2",
-  "xl:[grid-template-areas:'case_nerve_state'] xl:grid-cols-[minmax(0,1fr)_minmax(0,2fr)_minmax(0,1.35fr)] xl:items-center xl:py-4",
+  '[grid-area:1/1] grid min-w-0 content-start gap-x-8 gap-y-1 px-1 py-3',
+  "[grid-template-areas:'case'_'state'_'facts'_'nerve'] md:[grid-template-areas:'case_state'_'facts_state'_'nerve_nerve'] md:grid-cols-2 md:grid-rows-[auto_1fr]",
+  "xl:[grid-template-areas:'case_nerve_state'_'facts_nerve_state'] xl:grid-cols-[minmax(0,1fr)_minmax(0,2fr)_minmax(0,1.35fr)] xl:py-4",
 );
 
-function Title({ listed, line }: Pick<TodayCase, 'listed'> & { readonly line: TodayLine }) {
-  return (
-    <div className="min-w-0 [grid-area:case]">
-      <h2 className="text-[1.15em] leading-snug font-bold text-balance">{listed.title}</h2>
-      <Facts>
-        <Fact>{line.place}</Fact>
-        <Fact>{line.tested}</Fact>
-        <Fact>{line.phase}</Fact>
-        <Fact>{line.desk}</Fact>
-        <Fact>{line.people}</Fact>
-      </Facts>
-    </div>
-  );
+function Title({ title }: { readonly title: string }) {
+  return <h2 className="min-w-0 text-[1.15em] leading-snug font-bold text-balance [grid-area:case]">{title}</h2>;
 }
 
 function State({ line, problem }: { readonly line: TodayLine; readonly problem: string | null }) {
@@ -74,11 +64,13 @@ function State({ line, problem }: { readonly line: TodayLine; readonly problem: 
   );
 }
 
-function Facts({ children }: { readonly children: ReactNode }) {
-  return <ul className="flex flex-wrap gap-x-[0.4em] text-[0.95em] leading-snug text-second">{children}</ul>;
-}
-
-/** A fact never breaks inside; the dot that parts it from the one before stays with it. */
-function Fact({ children }: { readonly children: string }) {
-  return <li className="not-first:before:mr-[0.4em] not-first:before:content-['·']">{children}</li>;
+/** Where, how long, how old, who is there: what explains the state, quieter than it. */
+function Facts({ line }: { readonly line: TodayLine }) {
+  return (
+    <div className="min-w-0 text-[0.95em] leading-snug text-second [grid-area:facts]">
+      <p>{`${line.place}. ${line.tested}`}</p>
+      <p>{line.phase}</p>
+      <p>{`${line.desk}. ${line.people}`}</p>
+    </div>
+  );
 }
