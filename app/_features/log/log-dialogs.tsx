@@ -7,6 +7,7 @@ import { ConditionDialog } from '@/app/_features/log/dialogs/condition-dialog';
 import { CorrectDialog } from '@/app/_features/log/dialogs/correct-dialog';
 import { DistancesDialog } from '@/app/_features/log/dialogs/distances-dialog';
 import { EndDialog } from '@/app/_features/log/dialogs/end-dialog';
+import { ExaminationDialog } from '@/app/_features/log/dialogs/examination-dialog';
 import { KeysDialog } from '@/app/_features/log/dialogs/keys-dialog';
 import { OtherStepDialog } from '@/app/_features/log/dialogs/other-step-dialog';
 import { PairDialog } from '@/app/_features/log/dialogs/pair-dialog';
@@ -45,6 +46,8 @@ export function LogDialogs({ dialog, onClose }: { readonly dialog: LogDialog; re
       return <PairDialog onClose={onClose} />;
     case 'close':
       return <CloseDialog onClose={onClose} />;
+    case 'examination':
+      return <ExaminationDialog onClose={onClose} />;
     case 'keys':
       return <KeysDialog onClose={onClose} />;
   }

@@ -15,6 +15,8 @@ export function SetUpBar({ onProblem }: { readonly onProblem: (problem: string |
     const outcome = await give({ name: 'open-case', clockOffsetMs: isOffsetMeasured ? offsetMs : null });
     onProblem(outcome.kind === 'refused' ? outcome.message : null);
   };
+  // A patient is examined before the work at the nerve and after it.
+  const isExamined = state.status === 'planned' || state.phase === 'set-up' || state.phase === 'take-down';
   const patient = [head.patientLabel, head.recordNumber].filter((text) => text !== null).join(', ');
   return (
     <div className="flex min-h-12 shrink-0 flex-wrap items-center gap-2 border-b border-rule px-5 py-1.5">
@@ -34,6 +36,7 @@ export function SetUpBar({ onProblem }: { readonly onProblem: (problem: string |
           <Button onClick={() => openDialog({ kind: 'close' })}>{actionNames.closeCase}</Button>
         </>
       )}
+      {isExamined ? <Button onClick={() => openDialog({ kind: 'examination' })}>{actionNames.examination}</Button> : null}
       <Button hotkey="?" onClick={() => openDialog({ kind: 'keys' })}>Keys</Button>
       <span className="ml-auto text-sm text-second">{patient}</span>
     </div>
