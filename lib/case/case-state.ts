@@ -135,6 +135,7 @@ export interface CaseState {
   readonly seq: number;
   readonly hash: string;
   readonly status: 'planned' | 'open' | 'closed';
+  readonly plannedAt: string;
   readonly reference: string;
   readonly plan: CasePlan;
   readonly phase: Phase;

@@ -38,6 +38,7 @@ export function initialState(caseId: string): CaseState {
     seq: 0,
     hash: hashBeforeFirst,
     status: 'planned',
+    plannedAt: '',
     reference: '',
     plan: emptyPlan,
     phase: 'set-up',

@@ -24,7 +24,7 @@ export async function giveCommand(context: ServerContext, signedIn: SignedIn, ca
     author: { id: session.personId, role: roleOfRule(opened.rule) ?? 'person', displayName: session.displayName },
     command,
   };
-  const problem = eventTimeProblem(eventAt, context.nowMs());
+  const problem = eventTimeProblem(eventAt, context.nowMs(), Date.parse(opened.state.plannedAt));
   // What is in the log already was in time when it came, however late its answer is asked for again.
   const repeated = problem === null ? null : await repeatReply(context, allowed);
   if (problem !== null && repeated === null) throw problem;
