@@ -8,7 +8,8 @@ import { siteName, siteNames } from '@/lib/text/site-name';
 
 type AlertEntry = Extract<CaseEntry, { kind: `alert.${string}` | `notice.${string}` }>;
 
-const findings: { readonly [F in FindingKind]: string } = {
+/** What was found, in the trade's words. Common practice. */
+export const findingNames: { readonly [F in FindingKind]: string } = {
   'response-lost': 'response lost',
   'amplitude-and-onset': 'amplitude down and onset late together',
   'amplitude-fall': 'amplitude down',
@@ -19,7 +20,8 @@ const findings: { readonly [F in FindingKind]: string } = {
   'threshold-rise': 'more current needed',
 };
 
-const worsenings: { readonly [W in Worsening]: string } = {
+/** Which way an alert got worse, in words. House rule. */
+export const worseningNames: { readonly [W in Worsening]: string } = {
   lost: 'lost',
   'twenty-points': 'further down',
   'another-muscle': 'another muscle',
@@ -62,7 +64,7 @@ export function alertSentence(entry: AlertEntry, plan: CasePlan, timeZone: strin
     case 'alert.raised':
       return `Alert, ${nerve}: ${evidence(entry.body, plan, timeZone)}. ${entry.body.isRepeated ? 'Confirmed' : 'Not repeated'}`;
     case 'alert.worsened':
-      return `Alert worse, ${nerve}: ${entry.body.worsening.map((word) => worsenings[word]).join(', ')}. ${evidence(entry.body, plan, timeZone)}`;
+      return `Alert worse, ${nerve}: ${entry.body.worsening.map((word) => worseningNames[word]).join(', ')}. ${evidence(entry.body, plan, timeZone)}`;
     case 'alert.located':
       return `Alert located, ${nerve}: ${locationWords(entry.body.location, plan)}`;
     case 'alert.recovered': {
@@ -103,7 +105,7 @@ function evidence(body: AlertEvidence, plan: CasePlan, timeZone: string): string
   const good = body.lastGoodAt === null ? 'No good run before it' : `Last good ${clockTime(body.lastGoodAt, timeZone)}`;
   const steps = body.stepsBetween.length === 0 ? '' : `, after ${body.stepsBetween.join(', ')}`;
   const where = paths.length === 0 ? '' : `, ${paths.join(', ')}`;
-  return `${findings[body.finding]}${amount}${where}. ${good}, first seen ${clockTime(body.firstBadAt, timeZone)}${steps}`;
+  return `${findingNames[body.finding]}${amount}${where}. ${good}, first seen ${clockTime(body.firstBadAt, timeZone)}${steps}`;
 }
 
 function locationWords(location: Location, plan: CasePlan): string {

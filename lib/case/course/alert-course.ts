@@ -14,8 +14,10 @@ export interface PathValue {
 /** What a path of an alert showed while it was open. */
 export interface PathCourse {
   readonly pathId: string;
-  /** The lowest amplitude, else the latest onset; null when nothing was compared. */
+  /** The lowest amplitude; null when none was compared. */
   readonly worst: PathValue | null;
+  /** The latest onset; null when none was compared. */
+  readonly slowest: PathValue | null;
   /** The newest by its own time. */
   readonly last: PathValue | null;
 }

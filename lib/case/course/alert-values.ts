@@ -20,21 +20,25 @@ export function pathValues(runSeq: number, at: string, paths: readonly PathJudge
 }
 
 /**
- * Worst and last of what a path showed.
+ * Lowest, slowest and last of what a path showed.
  * @param pathId the path
  * @param values its compared runs while the alert was open; not modified
- * @returns the lowest amplitude, or the latest onset where no amplitude was read; the last by event time
+ * @returns the lowest amplitude, the latest onset, and the last by event time
  * @source product rule: worst value and last value
  * @accuracy exact; tests/lib/case/course/alert-courses.test.ts
  */
 export function pathCourse(pathId: string, values: readonly PathValue[]): PathCourse {
-  const worst = values.reduce<PathValue | null>((found, value) => (found === null || isWorse(value, found) ? value : found), null);
+  const worst = extreme(values, (value) => value.percentOfBaseline);
+  const slowest = extreme(values, (value) => (value.onsetChangeMs === null ? null : -value.onsetChangeMs));
   const last = values.reduce<PathValue | null>((found, value) => (found === null || value.at >= found.at ? value : found), null);
-  return { pathId, worst, last };
+  return { pathId, worst, slowest, last };
 }
 
-function isWorse(value: PathValue, other: PathValue): boolean {
-  if (value.percentOfBaseline !== null && other.percentOfBaseline !== null) return value.percentOfBaseline < other.percentOfBaseline;
-  if (value.percentOfBaseline !== null || other.percentOfBaseline !== null) return value.percentOfBaseline !== null;
-  return (value.onsetChangeMs ?? 0) > (other.onsetChangeMs ?? 0);
+/** The value with the lowest measure, the first of equal ones. */
+function extreme(values: readonly PathValue[], measure: (value: PathValue) => number | null): PathValue | null {
+  return values.reduce<PathValue | null>((found, value) => {
+    const own = measure(value);
+    if (own === null) return found;
+    return found === null || own < (measure(found) ?? own) ? value : found;
+  }, null);
 }

@@ -34,6 +34,7 @@ describe('alertCourses', () => {
       {
         pathId: 'above-elbow/adm',
         worst: expect.objectContaining({ at: clock('10:44'), percentOfBaseline: 0, isLost: true }),
+        slowest: expect.objectContaining({ at: clock('10:42:12'), onsetChangeMs: 1.38 }),
         last: expect.objectContaining({ at: clock('10:46'), percentOfBaseline: 92, isLost: false }),
       },
     ]);
