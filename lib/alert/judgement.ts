@@ -103,4 +103,4 @@ export type Location =
  * The judge's version, written into every judgement; replay is equal within one version.
  * @source house rule: a whole number from 1, raised when the same runs would be judged otherwise
  */
-export const judgeVersion = 1;
+export const judgeVersion = 2;

@@ -1,7 +1,7 @@
 import type { CaseCommand } from '@/lib/case/commands';
 import type { CaseState } from '@/lib/case/case-state';
+import { isRepeatOverdue } from '@/lib/case/is-repeat-overdue';
 import { momentOfMs } from '@/lib/units/moment-of-ms';
-import { msOfMoment } from '@/lib/units/ms-of-moment';
 
 /** A command of time, with an id derived from its fact: many processes that see it act once. */
 export interface DueTimer {
@@ -23,7 +23,7 @@ export interface DueTimer {
 export function dueTimers(state: CaseState, nowMs: number): readonly DueTimer[] {
   if (state.status !== 'open') return [];
   return Object.values(state.incidents)
-    .filter((incident) => incident.level === 'notice' && incident.repeatDueAt !== null && nowMs >= msOfMoment(incident.repeatDueAt))
+    .filter((incident) => isRepeatOverdue(state, incident, nowMs))
     .map((incident) => ({
       commandId: `repeat/${incident.alertId}/${incident.firstSeq}`,
       eventAt: momentOfMs(nowMs),

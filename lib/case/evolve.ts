@@ -5,8 +5,9 @@ import { evolveJudgement } from '@/lib/case/evolve/evolve-judgement';
 import { evolvePlan } from '@/lib/case/evolve/evolve-plan';
 import { evolveTalk } from '@/lib/case/evolve/evolve-talk';
 import { evolveRun } from '@/lib/case/evolve/evolve-run';
-import type { CaseState, KeptCondition, KeptStep } from '@/lib/case/case-state';
+import type { CaseState, Incident, KeptCondition, KeptStep } from '@/lib/case/case-state';
 import type { CaseEntry } from '@/lib/case/entry-bodies';
+import { stepsBetween } from '@/lib/case/steps-between';
 
 /** Steps the state remembers: enough for every onset bracket, since older ones lie before the last good run. */
 const keptStepCount = 40;
@@ -88,8 +89,15 @@ function keptSteps(steps: readonly KeptStep[]): readonly KeptStep[] {
 function evolveStep(state: CaseState, entry: CaseEntry & { kind: 'step.logged' }): CaseState {
   const step: KeptStep = { seq: entry.seq, at: entry.eventAt, since: entry.body.since, isRisk: entry.body.isRisk };
   const steps = keptSteps([...state.steps, step]);
-  if (!entry.body.voidsDistances) return { ...state, steps };
+  const incidents = Object.fromEntries(Object.entries(state.incidents).map(([id, incident]) => [id, withLateStep(incident, step, steps)]));
+  if (!entry.body.voidsDistances) return { ...state, steps, incidents };
   const nerveIds = state.plan.nerves.filter((nerve) => nerve.role === 'at-risk').map((nerve) => nerve.id);
   const voided = Object.fromEntries(nerveIds.map((id) => [id, entry.eventAt]));
-  return { ...state, steps, distancesVoidSince: { ...state.distancesVoidSince, ...voided } };
+  return { ...state, steps, incidents, distancesVoidSince: { ...state.distancesVoidSince, ...voided } };
+}
+
+/** A step whose entry came after the change it lies before belongs to the onset bracket all the same. */
+function withLateStep(incident: Incident, step: KeptStep, steps: readonly KeptStep[]): Incident {
+  const isBetween = step.at < incident.firstBadAt && stepsBetween([step], incident).length > 0;
+  return !isBetween ? incident : { ...incident, stepsBetween: stepsBetween(steps, incident) };
 }

@@ -1,6 +1,7 @@
 import type { Nerve } from '@/lib/alert/nerve-plan';
 import type { CaseState, ComparedRecord, Incident } from '@/lib/case/case-state';
 import { isAbnormal } from '@/lib/case/is-abnormal';
+import { isRebased } from '@/lib/case/is-rebased';
 import { isSegmentBack } from '@/lib/case/is-segment-back';
 import { isSince } from '@/lib/case/is-since';
 
@@ -10,6 +11,7 @@ import { isSince } from '@/lib/case/is-since';
  * Method: each path that was past a limit needs its newest `runsNeeded` comparable runs, all made after the first
  * abnormal one and with the amplitude read, inside the limit plus margin; so does the onset where it was part of the
  * finding. A slowed segment needs a newer pair inside its limit. No other path of the nerve tested since may be past one.
+ * Being like a baseline that was set after the loss is no recovery.
  *
  * @param state the case with the newest judgement
  * @param nerve the nerve
@@ -27,7 +29,8 @@ export function hasRecovered(state: CaseState, nerve: Nerve, incident: Incident,
     record !== null && record.seq !== first.seq && isSince(record, first) && isInside(state, incident, record);
   const evidenceIsBack = incident.badPathIds.every((pathId) => {
     const record = state.paths[pathId];
-    return record !== undefined && isBack(record.compared) && (runsNeeded === 1 || isBack(record.previous));
+    if (record === undefined || isRebased(state, pathId, first.at)) return false;
+    return isBack(record.compared) && (runsNeeded === 1 || isBack(record.previous));
   });
   const otherIsBad = state.plan.paths
     .filter((path) => path.nerveId === nerve.id)

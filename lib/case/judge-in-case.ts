@@ -3,8 +3,9 @@ import { judgePath } from '@/lib/alert/judge-path';
 import { comparability, type RunConditions } from '@/lib/change/comparability';
 import type { Baseline, CaseState } from '@/lib/case/case-state';
 import { judgeSegments } from '@/lib/case/judge-segments';
+import { baselineOfTime } from '@/lib/case/baseline-of-time';
 import { isAbnormal } from '@/lib/case/is-abnormal';
-import { baselineKey, pathIdOf } from '@/lib/case/keys';
+import { pathIdOf } from '@/lib/case/keys';
 import type { RunBody } from '@/lib/case/run-body';
 import type { RunToJudge } from '@/lib/case/run-to-judge';
 import type { ChannelReading } from '@/lib/response/reading';
@@ -40,10 +41,8 @@ function judgeReading(state: CaseState, judged: RunToJudge, row: ChannelReading)
   if (state.timeoutAt === null || judged.at < state.timeoutAt) return notCompared('not-timed-out');
   if (row.reading.kind === 'not-read') return notCompared('not-read');
   if (row.reading.kind === 'unusable') return notCompared('unusable');
-  const baseline = state.baselines[baselineKey(pathId, run.electrodeId, run.family)];
-  if (baseline === undefined) return notCompared(missingBaselineReason(state, pathId, run));
-  // A run that its baseline was made of, or a late entry from before it, had no baseline at its own time.
-  if (judged.at <= baseline.at) return notCompared('no-baseline');
+  const baseline = baselineOfTime(state, judged, pathId);
+  if (baseline === null) return notCompared(missingBaselineReason(state, pathId, run));
   const likeness = comparability(conditionsOf(state, run, row.channelId), baselineConditions(state, baseline, row.channelId));
   if (likeness.kind === 'not-compared') return notCompared(likeness.reason);
   const seen = judgePath(row.reading, pathBaseline(baseline), state.plan.rules);
@@ -59,6 +58,7 @@ function judgeReading(state: CaseState, judged: RunToJudge, row: ChannelReading)
 function missingBaselineReason(state: CaseState, pathId: string, run: RunBody): NotComparedReason {
   const ofPath = Object.values(state.baselines).filter((baseline) => baseline.pathId === pathId);
   if (ofPath.length === 0) return 'no-baseline';
+  if (ofPath.some((baseline) => baseline.family === run.family && baseline.electrodeId === run.electrodeId)) return 'no-baseline';
   return ofPath.some((baseline) => baseline.family === run.family) ? 'electrode-differs' : 'family-differs';
 }
 

@@ -34,7 +34,10 @@ export function judgeSegments(state: CaseState, judged: RunToJudge, paths: reado
 
 function endOf(state: CaseState, judged: RunToJudge, channelId: string, paths: readonly PathJudgement[]): SegmentEnd | null {
   const pathId = pathIdOf(judged.run.siteId, channelId);
-  const isComparable = paths.some((path) => path.pathId === pathId && path.kind === 'compared');
+  const working = state.baselines[baselineKey(pathId, judged.run.electrodeId, judged.run.family)];
+  // A late run held against an older baseline has no partner that is held against the same.
+  const isOfWorking = working !== undefined && judged.at > working.at;
+  const isComparable = isOfWorking && paths.some((path) => path.pathId === pathId && path.kind === 'compared');
   return segmentEnd(state, judged.run, judged.at, channelId, isComparable);
 }
 

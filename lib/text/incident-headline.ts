@@ -1,4 +1,5 @@
 import type { CaseState, Incident } from '@/lib/case/case-state';
+import { isReturnUnproven } from '@/lib/case/is-return-unproven';
 import { metresPerSecond, milliseconds, percent } from '@/lib/text/format';
 import { insideSentence, nerveTitle } from '@/lib/text/nerve-title';
 
@@ -12,7 +13,8 @@ export function percentNow(state: CaseState, incident: Incident): number | null 
 
 /**
  * The one sentence of a notice or alert: which nerve, what changed, how much.
- * @returns "Ulnar at 38 % of baseline", "No ulnar response", "Ulnar slower, 31 m/s"
+ * @returns "Ulnar at 38 % of baseline", "No ulnar response", "Ulnar slower, 31 m/s"; "Ulnar was at 38 % of baseline" where newer
+ *   runs are good and prove no return
  * @source house rule: one number for one fact; amplitude as % of baseline
  * @accuracy whole percent; tests/lib/text/theatre-view.test.ts
  */
@@ -20,6 +22,7 @@ export function incidentHeadline(state: CaseState, incident: Incident): string {
   const name = nerveTitle(state.plan, incident.nerveId);
   const now = percentNow(state, incident);
   if (incident.recoveredAt !== null) return now === null ? `${name} back inside its limits` : `${name} back at ${percent(now)} of baseline`;
+  if (isReturnUnproven(state, incident)) return pastHeadline(state, incident, name);
   if (now !== null && now < state.plan.rules.lostBelowPercent) return `No ${insideSentence(name)} response`;
   if (needsMoreCurrent(state, incident)) return `${name} needs more current`;
   switch (incident.finding) {
@@ -31,6 +34,22 @@ export function incidentHeadline(state: CaseState, incident: Incident): string {
       return `${name} lower proximally`;
     default:
       return now === null ? `${name} changed` : `${name} at ${percent(now)} of baseline`;
+  }
+}
+
+/** What a late entry showed although newer runs are good: the % of now would deny it. */
+function pastHeadline(state: CaseState, incident: Incident, name: string): string {
+  const worst = incident.worstPercentOfBaseline;
+  if (incident.isLost || (worst !== null && worst < state.plan.rules.lostBelowPercent)) return `${name} response was lost`;
+  switch (incident.finding) {
+    case 'segment-slowed':
+      return `${name} was slower`;
+    case 'onset-late':
+      return `${name} was later`;
+    case 'ratio-fall':
+      return `${name} was lower proximally`;
+    default:
+      return worst === null ? `${name} was changed` : `${name} was at ${percent(worst)} of baseline`;
   }
 }
 

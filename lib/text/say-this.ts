@@ -1,4 +1,5 @@
 import type { CaseState, Incident } from '@/lib/case/case-state';
+import { isReturnUnproven } from '@/lib/case/is-return-unproven';
 import { decimal } from '@/lib/text/format';
 import { needsMoreCurrent, percentNow } from '@/lib/text/incident-headline';
 import { siteName, siteNames } from '@/lib/text/site-name';
@@ -29,8 +30,14 @@ function channelName(state: CaseState, pathId: string): string {
 }
 
 function amountWords(state: CaseState, incident: Incident): string {
-  const now = percentNow(state, incident);
-  if (now !== null && now < state.plan.rules.lostBelowPercent) return 'no response';
+  const isPast = incident.recoveredAt === null && isReturnUnproven(state, incident);
+  const now = isPast ? incident.worstPercentOfBaseline : percentNow(state, incident);
+  if (now !== null && now < state.plan.rules.lostBelowPercent) return isPast ? 'was without response' : 'no response';
+  const words = stateWords(state, incident, now);
+  return isPast ? `was ${words}` : words;
+}
+
+function stateWords(state: CaseState, incident: Incident, now: number | null): string {
   if (needsMoreCurrent(state, incident)) return 'needs more current than at baseline';
   if (incident.finding === 'onset-late' || incident.finding === 'segment-slowed') return 'slower than baseline';
   return now === null ? 'changed from baseline' : `at ${decimal(Math.round(now), 0)} per cent of baseline`;

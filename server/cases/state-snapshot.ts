@@ -3,7 +3,7 @@ import type { CaseState } from '@/lib/case/case-state';
 import type { KeptCase } from '@/server/cases/kept-case';
 
 /** Raised whenever the shape of the state, or what `evolve` copies into it, changes: older snapshots are then passed over. */
-export const stateVersion = 2;
+export const stateVersion = 3;
 
 const snapshotEvery = 500;
 

@@ -4,6 +4,7 @@ import type { DecideContext } from '@/lib/case/decide/decide-context';
 import { draft } from '@/lib/case/decide/draft';
 import { judgeVersion } from '@/lib/alert/judgement';
 import type { EntryDraft } from '@/lib/case/entry-bodies';
+import { isRepeatOverdue } from '@/lib/case/is-repeat-overdue';
 import { msOfMoment } from '@/lib/units/ms-of-moment';
 
 type AlertCommand = CaseCommand & {
@@ -37,16 +38,19 @@ export function decideAlert(state: CaseState, command: AlertCommand, context: De
       return isNews ? [draft('alert.painted', { alertId, entrySeq, screenId, paintedAt })] : [];
     }
     case 'miss-repeat':
-      return missRepeat(incident, context);
+      return missRepeat(state, incident, context);
   }
 }
 
-function missRepeat(incident: Incident, context: DecideContext): readonly EntryDraft[] | Refusal {
+function missRepeat(state: CaseState, incident: Incident, context: DecideContext): readonly EntryDraft[] | Refusal {
   if (incident.level !== 'notice' || incident.repeatDueAt === null) {
     return { code: 'repeat-not-due', message: 'Repeat not due: the notice was repeated or is an alert already' };
   }
   if (context.nowMs < msOfMoment(incident.repeatDueAt)) {
     return { code: 'repeat-not-due', message: `Repeat not due before ${incident.repeatDueAt}` };
+  }
+  if (!isRepeatOverdue(state, incident, context.nowMs)) {
+    return { code: 'repeat-not-due', message: 'Repeat not due: a newer run of the same path is known' };
   }
   const { alertId, nerveId, firstSeq, pathIds, finding, worstPercentOfBaseline, location } = incident;
   const { lastGoodAt, firstBadAt, stepsBetween } = incident;

@@ -4,7 +4,7 @@ import { alertDrafts } from '@/lib/case/decide/alert-drafts';
 import type { DecideContext } from '@/lib/case/decide/decide-context';
 import { draft } from '@/lib/case/decide/draft';
 import { evolveDraft } from '@/lib/case/decide/evolve-draft';
-import { judgedDraft } from '@/lib/case/decide/judged-draft';
+import { judgedDraft, type Judged } from '@/lib/case/decide/judged-draft';
 import { roundRun } from '@/lib/case/decide/round-run';
 import { runProblem } from '@/lib/case/decide/run-problem';
 import type { EntryDraft } from '@/lib/case/entry-bodies';
@@ -13,8 +13,8 @@ import type { EntryDraft } from '@/lib/case/entry-bodies';
  * Corrects or withdraws a run and judges its paths again.
  *
  * Method: an alert whose every abnormal run is gone is withdrawn and says so; an alert with other evidence stays.
- * A correction that shows a change the typing had hidden raises it with the run's own time. A run that its baseline was
- * made of, or that is older, is not held against that baseline.
+ * A correction that shows a change the typing had hidden raises it with the run's own time, and waits for a test that
+ * comes after it. A run that its baseline was made of, or that is older, is not held against that baseline.
  *
  * @param state the case
  * @param command the run as it should read, or null to withdraw it
@@ -43,7 +43,7 @@ export function decideCorrection(
   const corrected = draft('run.corrected', { runSeq: command.runSeq, run, reason: command.reason });
   const drafts: EntryDraft[] = [corrected];
   let after = evolveDraft(state, corrected, context);
-  const judged = run === null || isOlderThanBaseline(state, kept) ? null : judgedDraft(after, command.runSeq);
+  const judged = run === null ? null : judgedAgain(after, kept);
   if (judged !== null) {
     drafts.push(judged.entry);
     after = evolveDraft(after, judged.entry, context);
@@ -51,12 +51,18 @@ export function decideCorrection(
   const withdrawn = Object.values(state.incidents).filter(
     (incident) => incident.badSeqs.includes(command.runSeq) && after.incidents[incident.nerveId]?.badSeqs.length === 0,
   );
-  for (const incident of withdrawn) {
-    drafts.push(draft('alert.withdrawn', { alertId: incident.alertId, runSeq: command.runSeq }));
+  for (const { alertId } of withdrawn) {
+    const gone = draft('alert.withdrawn', { alertId, runSeq: command.runSeq });
+    drafts.push(gone);
+    after = evolveDraft(after, gone, context);
   }
-  return withdrawn.length > 0 || judged === null ? drafts : [...drafts, ...alertDrafts(state, after, judged.body, context)];
+  if (judged === null) return drafts;
+  return [...drafts, ...alertDrafts(withdrawn.length > 0 ? after : state, after, judged.body)];
 }
 
-function isOlderThanBaseline(state: CaseState, kept: KeptRun): boolean {
-  return Object.values(state.baselines).some((baseline) => baseline.pathId.startsWith(`${kept.run.siteId}/`) && kept.at <= baseline.at);
+/** The judgement of a corrected run; none where its baseline was made of it or is newer, and it has no older one. */
+function judgedAgain(state: CaseState, kept: KeptRun): Judged | null {
+  const judged = judgedDraft(state, kept.seq);
+  const isOlder = Object.values(state.baselines).some((baseline) => baseline.pathId.startsWith(`${kept.run.siteId}/`) && kept.at <= baseline.at);
+  return isOlder && judged?.body.paths.every((path) => path.kind === 'not-compared') === true ? null : judged;
 }

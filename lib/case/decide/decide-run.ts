@@ -30,5 +30,5 @@ export function decideRun(
   const judged = judgedDraft(afterRun, state.seq + 1);
   if (judged === null) return [logged];
   const afterJudgement = evolveDraft(afterRun, judged.entry, context);
-  return [logged, judged.entry, ...alertDrafts(state, afterJudgement, judged.body, context)];
+  return [logged, judged.entry, ...alertDrafts(state, afterJudgement, judged.body)];
 }

@@ -4,8 +4,8 @@ import type { CaseState, Incident } from '@/lib/case/case-state';
 import type { AbnormalRun } from '@/lib/case/decide/abnormal-of';
 import type { AlertEvidence } from '@/lib/case/entry-bodies';
 import { isComingBack } from '@/lib/case/is-coming-back';
-import { isSince } from '@/lib/case/is-since';
 import { locateInCase } from '@/lib/case/locate-in-case';
+import { stepsBetween } from '@/lib/case/steps-between';
 
 /**
  * The evidence of a notice or alert: paths, worst value, location and onset bracket.
@@ -53,16 +53,13 @@ function locationOf(state: CaseState, nerve: Nerve, abnormal: AbnormalRun, incid
 }
 
 function bracketOf(state: CaseState, abnormal: AbnormalRun, incident: Incident | null) {
-  if (incident !== null && incident.firstBadAt <= abnormal.at) {
-    const { lastGoodAt, firstBadAt, stepsBetween } = incident;
-    return { lastGoodAt, firstBadAt, stepsBetween };
+  // A late run from before the last good one belongs to an earlier change: the bracket of this one stays.
+  if (incident !== null && (incident.firstBadAt <= abnormal.at || (incident.lastGoodAt ?? '') > abnormal.at)) {
+    const { lastGoodAt, firstBadAt, stepsBetween: between } = incident;
+    return { lastGoodAt, firstBadAt, stepsBetween: between };
   }
-  const lastGoodAt = lastGoodBefore(state, abnormal);
-  const stepsBetween = state.steps
-    .filter((step) => step.at <= abnormal.at && (lastGoodAt === null || step.at > lastGoodAt))
-    .sort((first, second) => (isSince(first, second) ? 1 : -1))
-    .map((step) => step.since);
-  return { lastGoodAt, firstBadAt: abnormal.at, stepsBetween };
+  const bracket = { lastGoodAt: lastGoodBefore(state, abnormal), firstBadAt: abnormal.at };
+  return { ...bracket, stepsBetween: stepsBetween(state.steps, bracket) };
 }
 
 function lastGoodBefore(state: CaseState, abnormal: AbnormalRun): string | null {

@@ -3,13 +3,16 @@ import type { Nerve } from '@/lib/alert/nerve-plan';
 import type { CaseState, Incident } from '@/lib/case/case-state';
 import type { AbnormalRun } from '@/lib/case/decide/abnormal-of';
 import type { AlertEvidence, Worsening } from '@/lib/case/entry-bodies';
+import { hasRecovered } from '@/lib/case/has-recovered';
 import { channelOfPath } from '@/lib/case/keys';
+import { resolutions } from '@/lib/units/resolutions';
+import { roundTo } from '@/lib/units/round-to';
 
 /**
  * In which ways an open alert got worse since it was last raised.
  *
  * Method: against what it was raised with. A finding that is a notice at most makes no alert worse. A late entry from
- * before the recovery is no return.
+ * before the recovery is no return, unless the recovery does not stand with it.
  *
  * @param state the case with the run's judgement
  * @param nerve the nerve
@@ -26,7 +29,10 @@ export function worseningOf(
   abnormal: AbnormalRun,
   evidence: AlertEvidence,
 ): readonly Worsening[] {
-  if (incident.recoveredAt !== null) return abnormal.mayBecomeAlert && abnormal.at > incident.recoveredAt ? ['returned'] : [];
+  if (incident.recoveredAt !== null) {
+    const isReturn = abnormal.at > incident.recoveredAt || !hasRecovered(state, nerve, incident, 2);
+    return abnormal.mayBecomeAlert && isReturn ? ['returned'] : [];
+  }
   const ways: Worsening[] = [];
   if (abnormal.finding === 'response-lost' && !incident.isLost) ways.push('lost');
   if (isPointsWorse(state, incident, abnormal)) ways.push('twenty-points');
@@ -40,7 +46,8 @@ function isPointsWorse(state: CaseState, incident: Incident, abnormal: AbnormalR
   const before = incident.worstPercentOfBaseline;
   const now = abnormal.worstPercentOfBaseline;
   if (before === null || now === null) return false;
-  return before - now >= state.plan.rules.worseningPercent;
+  // Rounded, since the binary difference of two tenths can lie a hair below the limit.
+  return roundTo(before - now, resolutions.percent) >= state.plan.rules.worseningPercent;
 }
 
 /** A located change that now reaches distal to where it ended: a site that was good is not good any more. */

@@ -1,5 +1,6 @@
 import type { BadSegment, CaseState, KeptRun } from '@/lib/case/case-state';
 import { isAbnormal } from '@/lib/case/is-abnormal';
+import { isEndOfSegment } from '@/lib/case/is-end-of-segment';
 import { segmentPathId } from '@/lib/case/keys';
 
 /**
@@ -15,10 +16,9 @@ import { segmentPathId } from '@/lib/case/keys';
  * @source house rule
  */
 export function badSegmentsOf(state: CaseState, nerveId: string, kept: KeptRun): readonly BadSegment[] {
-  const isEnd = (siteId: string, at: string) => siteId === kept.run.siteId && at === kept.at;
   return Object.entries(state.segments)
     .filter(([, segment]) => segment.nerveId === nerveId && isAbnormal(segment.findings))
-    .filter(([, segment]) => isEnd(segment.proximalSiteId, segment.proximalAt) || isEnd(segment.distalSiteId, segment.distalAt))
+    .filter(([, segment]) => isEndOfSegment(segment, kept))
     .flatMap(([key, segment]): BadSegment[] => {
       if (segment.findings.some((finding) => finding.kind === 'segment-slowed')) return [{ key, measure: 'time' }];
       return isAbnormal(state.paths[segmentPathId(key)]?.compared?.findings ?? []) ? [] : [{ key, measure: 'ratio' }];

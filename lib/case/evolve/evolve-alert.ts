@@ -100,6 +100,7 @@ function updated(
         level: 'alert',
         isRepeated: entry.body.isRepeated,
         raisedAt: incident.level === 'alert' ? incident.raisedAt : entry.recordedAt,
+        receivedAt: entry.body.firstBadAt < incident.firstBadAt ? entry.recordedAt : incident.receivedAt,
         repeatDueAt: null,
         // What was told of the notice was not yet told of the alert.
         toldAt: incident.level === 'alert' ? incident.toldAt : null,

@@ -1,7 +1,8 @@
-import type { SegmentJudgement } from '@/lib/alert/judgement';
 import type { Baseline, CaseState, KeptRun, PathRecord } from '@/lib/case/case-state';
 import type { CaseEntry } from '@/lib/case/entry-bodies';
 import { isAbnormal } from '@/lib/case/is-abnormal';
+import { isEndOfSegment } from '@/lib/case/is-end-of-segment';
+import { isTestOfIncident } from '@/lib/case/is-test-of-incident';
 
 /**
  * Replaces or withdraws a run: its judgements and the segments computed from it go, baselines that used it are marked.
@@ -24,11 +25,13 @@ export function evolveCorrection(state: CaseState, entry: CaseEntry & { kind: 'r
   };
   if (gone === undefined) return { ...state, runs, ...marked };
   const paths = mapValues(state.paths, (record) => without(record, gone));
-  const segments = mapValues(state.segments, (segment) => (isFrom(segment, gone) ? null : segment));
-  const incidents =
-    run === null
-      ? mapValues(state.incidents, (incident) => ({ ...incident, badSeqs: incident.badSeqs.filter((seq) => seq !== runSeq) }))
-      : state.incidents;
+  const segments = mapValues(state.segments, (segment) => (isEndOfSegment(segment, gone) ? null : segment));
+  const incidents = mapValues(state.incidents, (incident) => ({
+    ...incident,
+    badSeqs: run === null ? incident.badSeqs.filter((seq) => seq !== runSeq) : incident.badSeqs,
+    // A recovery that rested on the run has to be shown again.
+    recoveredAt: isTestOfIncident(state, incident, runSeq) ? null : incident.recoveredAt,
+  }));
   return { ...state, runs, ...marked, paths, segments, incidents };
 }
 
@@ -44,11 +47,6 @@ function mapValues<T>(record: Readonly<Record<string, T>>, change: (value: T) =>
 
 function markedBaseline(baseline: Baseline, runSeq: number): Baseline {
   return baseline.runSeqs.includes(runSeq) ? { ...baseline, isMarkedByCorrection: true } : baseline;
-}
-
-function isFrom(segment: SegmentJudgement, gone: KeptRun): boolean {
-  const { siteId } = gone.run;
-  return (segment.proximalSiteId === siteId && segment.proximalAt === gone.at) || (segment.distalSiteId === siteId && segment.distalAt === gone.at);
 }
 
 /** A path without one of its runs: the run before it stands again, or nothing was tested. */

@@ -3,7 +3,7 @@ import type { CaseState, ComparedRecord, KeptRun, PathRecord } from '@/lib/case/
 import type { CaseEntry } from '@/lib/case/entry-bodies';
 import { incidentsAfter } from '@/lib/case/evolve/incidents-after';
 import { isAbnormal } from '@/lib/case/is-abnormal';
-import { channelOfPath, segmentKey } from '@/lib/case/keys';
+import { baselineKey, channelOfPath, segmentKey } from '@/lib/case/keys';
 import type { Reading } from '@/lib/response/reading';
 
 /**
@@ -20,7 +20,7 @@ export function evolveJudgement(state: CaseState, entry: CaseEntry & { kind: 'ru
   const paths = { ...state.paths };
   for (const judgement of entry.body.paths) {
     if (judgement.kind === 'not-compared' && judgement.reason === 'not-read') continue;
-    paths[judgement.pathId] = pathRecord(paths[judgement.pathId], judgement, kept);
+    paths[judgement.pathId] = pathRecord(state, judgement, kept);
   }
   const segments = { ...state.segments };
   for (const segment of entry.body.segments) {
@@ -33,7 +33,8 @@ export function evolveJudgement(state: CaseState, entry: CaseEntry & { kind: 'ru
   return { ...judged, incidents: incidentsAfter(judged, entry.body, kept) };
 }
 
-function pathRecord(before: PathRecord | undefined, judgement: PathJudgement, kept: KeptRun): PathRecord {
+function pathRecord(state: CaseState, judgement: PathJudgement, kept: KeptRun): PathRecord {
+  const before = state.paths[judgement.pathId];
   const reading = readingOf(kept, judgement.pathId);
   const isNewest = before === undefined || kept.at >= before.lastAt;
   const newest = isNewest
@@ -53,13 +54,20 @@ function pathRecord(before: PathRecord | undefined, judgement: PathJudgement, ke
       };
   const isGood = judgement.kind === 'compared' && judgement.change.percentOfBaseline !== null && !isAbnormal(judgement.findings);
   const lastGoodAt = isGood && kept.at > (before?.lastGoodAt ?? '') ? kept.at : (before?.lastGoodAt ?? null);
-  return { pathId: judgement.pathId, ...newest, ...comparedAfter(before, judgement, kept, reading), lastGoodAt };
+  const compared = comparedAfter(before, isOfOlderBaseline(state, judgement.pathId, kept) ? null : judgement, kept, reading);
+  return { pathId: judgement.pathId, ...newest, ...compared, lastGoodAt };
 }
 
-function comparedAfter(before: PathRecord | undefined, judgement: PathJudgement, kept: KeptRun, reading: Reading) {
+/** What a late run shows against a baseline that has been moved since is no test against the one of now. */
+function isOfOlderBaseline(state: CaseState, pathId: string, { at, run }: KeptRun): boolean {
+  const working = state.baselines[baselineKey(pathId, run.electrodeId, run.family)];
+  return working !== undefined && at <= working.at;
+}
+
+function comparedAfter(before: PathRecord | undefined, judgement: PathJudgement | null, kept: KeptRun, reading: Reading) {
   const compared = before?.compared ?? null;
   const previous = before?.previous ?? null;
-  if (judgement.kind === 'not-compared') return { compared, previous };
+  if (judgement === null || judgement.kind === 'not-compared') return { compared, previous };
   const record: ComparedRecord = {
     seq: kept.seq,
     at: kept.at,

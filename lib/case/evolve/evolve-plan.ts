@@ -9,15 +9,17 @@ export function evolvePlan(state: CaseState, entry: PlanEntry): CaseState {
   switch (entry.kind) {
     case 'case.planned':
       // A wall does not receive the reference.
-      return { ...state, plan: entry.body.plan, reference: entry.body.reference ?? '', phaseAt: entry.eventAt };
+      return { ...state, plan: entry.body.plan, reference: entry.body.reference ?? '', plannedAt: entry.eventAt, phaseAt: entry.eventAt };
     case 'plan.revised':
       // Its positions were measured for it.
       return { ...state, plan: entry.body.plan, distancesVoidSince: {} };
     case 'distances.measured': {
       const { nerveId, positions } = entry.body;
       const nerves = state.plan.nerves.map((nerve) => (nerve.id === nerveId ? moved(nerve, positions) : nerve));
-      const { [nerveId]: _measured, ...distancesVoidSince } = state.distancesVoidSince;
-      return { ...state, plan: { ...state.plan, nerves }, distancesVoidSince };
+      const { [nerveId]: voidSince, ...others } = state.distancesVoidSince;
+      // What was measured before the step that voids it arrived late, and stays void.
+      const isVoid = voidSince !== undefined && voidSince > entry.eventAt;
+      return { ...state, plan: { ...state.plan, nerves }, distancesVoidSince: isVoid ? state.distancesVoidSince : others };
     }
   }
 }

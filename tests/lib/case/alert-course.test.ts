@@ -113,6 +113,13 @@ describe('decide, worsening', () => {
     expect(script.wait(5000).run('above-elbow', { adm: adm('above-elbow', 0.181) })).toEqual([]);
   });
 
+  it('decide raises again at exactly 20 points more, also where two tenths do not subtract exactly', () => {
+    // 48.3 − 28.3 is 19.999999999999996 in binary.
+    const script = monitoredUlnar().at('10:41');
+    for (let count = 0; count < 2; count += 1) script.wait(5000).run('above-elbow', { adm: adm('above-elbow', 0.483) });
+    expect(script.wait(5000).run('above-elbow', { adm: adm('above-elbow', 0.283) })).toEqual(['alert.worsened']);
+  });
+
   it('decide counts the points from the worst that was raised, so that getting better is no worsening', () => {
     const script = alerted(['adm', 'fdi']);
     script.wait(5000).run('above-elbow', { adm: adm('above-elbow', 0.1) });
