@@ -5,6 +5,9 @@ import type { Shape, Tone } from '@/lib/chart/scene';
 import { textWidth } from '@/lib/chart/text-width';
 import { toneOf } from '@/lib/chart/tone-of';
 
+/** Least distance between two captions in type sizes: clearly more than a space inside one. @source house rule */
+const captionGap = 1.2;
+
 interface Caption {
   readonly key: string;
   readonly role: string;
@@ -50,13 +53,19 @@ export function labelsBelow(view: NerveLineView, sizes: NerveLineSizes, toX: (po
       ? [{ key: `age-${site.siteId}`, role: 'age', x: toX(site.positionMm), text: `${site.ageText} ago`, tone: 'second', isBold: false }]
       : [],
   );
+  // A few ages beside the velocities cost the wall no row of its own.
+  const joint = sizes.hasAges ? null : captionRows([...segments(false), ...ages].toSorted((left, right) => left.x - right.x), sizes, 1);
+  if (joint?.isFitting === true) return below(joint, captionRows([], sizes, 1), sizes);
   const full = captionRows(segments(false), sizes, 2);
   const velocities = full.isFitting ? full : captionRows(segments(true), sizes, Infinity);
-  const under = captionRows(ages, sizes, Infinity);
+  return below(velocities, captionRows(ages, sizes, Infinity), sizes);
+}
+
+function below(velocities: CaptionRows, ages: CaptionRows, sizes: NerveLineSizes): LabelsBelow {
   const topPx = sizes.textPx * 1.3;
   const agesTopPx = topPx + velocities.rows * sizes.lineHeightPx;
-  const heightPx = (ages.length === 0 ? agesTopPx : agesTopPx + under.rows * sizes.lineHeightPx) - sizes.textPx * 0.75;
-  return { shapes: [...draw(velocities, topPx, sizes), ...draw(under, agesTopPx, sizes)], heightPx };
+  const heightPx = agesTopPx + ages.rows * sizes.lineHeightPx - sizes.textPx * 0.75;
+  return { shapes: [...draw(velocities, topPx, sizes), ...draw(ages, agesTopPx, sizes)], heightPx };
 }
 
 interface CaptionRows {
@@ -67,7 +76,7 @@ interface CaptionRows {
 
 function captionRows(captions: readonly Caption[], sizes: NerveLineSizes, mostRows: number): CaptionRows {
   const labels = captions.map((caption) => ({ centrePx: caption.x, widthPx: textWidth(caption.text, sizes.textPx, true) }));
-  const placed = packLabels(labels, sizes.widthPx, sizes.labelGapPx, mostRows);
+  const placed = packLabels(labels, sizes.widthPx, sizes.textPx * captionGap, mostRows);
   return {
     captions: captions.map((caption, index) => ({ ...caption, place: placed?.[index] ?? { row: index, centrePx: caption.x } })),
     rows: Math.max(0, ...(placed ?? []).map((place) => place.row + 1)),

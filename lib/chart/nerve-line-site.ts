@@ -5,7 +5,7 @@ import { findingPriority } from '@/lib/chart/finding-priority';
 import { findingsOf } from '@/lib/chart/findings-of';
 import type { NerveLineSite } from '@/lib/chart/nerve-line';
 import { testedSince } from '@/lib/chart/tested-since';
-import { durationWords, millivolts, percent } from '@/lib/text/format';
+import { durationWords, millivolts, nonBreakingSpace, percent } from '@/lib/text/format';
 
 /**
  * One site of the nerve line: the response from there as % of baseline, with its age.
@@ -19,7 +19,7 @@ import { durationWords, millivolts, percent } from '@/lib/text/format';
  * @param site the site
  * @param channelId the channel the line is drawn from
  * @param nowMs time of the picture, Unix ms
- * @returns name, position in mm, text ("38 %", "none", "8.8 mV", "not tested"), age and priority
+ * @returns name, position in mm, text ("38 %", "none", "8.8 mV", "not tested"), age ("20 s", "63 min", "2 h") and priority
  * @source product rule
  * @accuracy tests/lib/chart/nerve-line-view.test.ts
  * @example
@@ -36,11 +36,18 @@ export function nerveLineSite(state: CaseState, nerve: Nerve, site: Site, channe
     name: site.name,
     positionMm: site.positionMm,
     text: record === undefined ? 'not tested' : responseText(record),
-    ageText: ageMs === null ? null : durationWords(ageMs),
+    ageText: ageMs === null ? null : ageWords(ageMs),
     priority: findingPriority(findings, state.incidents[nerve.id]),
     textPriority: findingPriority(findingsOf(findings, 'amplitude'), state.incidents[nerve.id]),
     isDim: isOld || record?.compared == null || record.lastNotCompared !== null || shownAt === null || shownAt < lastRiskStep(state, nerve.id),
   };
+}
+
+/** In minutes for two hours: hours and minutes at each site would not stand beside one another. */
+function ageWords(ageMs: number): string {
+  const minutes = Math.floor(ageMs / 60_000);
+  if (minutes >= 120) return `${Math.floor(minutes / 60)}${nonBreakingSpace}h`;
+  return minutes >= 60 ? `${minutes}${nonBreakingSpace}min` : durationWords(ageMs);
 }
 
 function lastRiskStep(state: CaseState, nerveId: string): string {

@@ -18,8 +18,8 @@ export function notMonitoredView(view: NerveLineView): NerveLineView {
   };
 }
 
-/** Only a measured value was; a reason without a number still holds. */
+/** Only a measured value that was current was; a reason still holds. */
 function pastText(segment: NerveLineSegment) {
-  const isMeasured = !segment.isUntested && /\d/.test(segment.text);
-  return standingText({ text: segment.text, shortText: segment.shortText }, isMeasured ? 'older' : 'current');
+  const isCurrent = /^\d.*(?<!not compared)$/.test(segment.text);
+  return standingText({ text: segment.text, shortText: segment.shortText }, isCurrent ? 'older' : 'current');
 }

@@ -14,10 +14,10 @@ export interface PlacedLabel {
 const mostShift = 0.35;
 
 /**
- * Places labels over their points so that none touches another: pushed aside a little, else in alternating rows.
+ * Places labels over their points so that none touches another: pushed aside a little, else in more rows.
  *
- * Method: with one row, then two, and so on, the labels take the rows in turn; inside a row each is pushed right of its
- * neighbour, then back from the right edge. The first number of rows in which nobody is pushed by more than about a third
+ * Method: with one row, then two, and so on, each label takes the first row where it has room as it stands, else the row
+ * that leaves it the most; inside a row each is pushed right of its neighbour, then back from the right edge. The first number of rows in which nobody is pushed by more than about a third
  * of its width is taken; with one row for each label there is always room. Labels wider than the picture stand in
  * its middle and stick out: the caller shortens them first.
  *
@@ -41,12 +41,25 @@ export function packLabels(labels: readonly Label[], roomPx: number, gapPx: numb
 }
 
 function placeInRows(labels: readonly Label[], rows: number, roomPx: number, gapPx: number): readonly PlacedLabel[] | null {
-  const packed = Array.from({ length: rows }, (_, row) => packRow(labels.filter((__, index) => index % rows === row), roomPx, gapPx));
+  const rowOf = rowsTaken(labels, rows, roomPx, gapPx);
+  const packed = Array.from({ length: rows }, (_, row) => packRow(labels.filter((__, index) => rowOf[index] === row), roomPx, gapPx));
   if (packed.some((centres) => centres === null)) return null;
-  return labels.map((label, index) => ({
-    row: index % rows,
-    centrePx: packed[index % rows]?.[Math.floor(index / rows)] ?? label.centrePx,
-  }));
+  return labels.map((label, index) => {
+    const row = rowOf[index] ?? 0;
+    const before = rowOf.slice(0, index).filter((other) => other === row).length;
+    return { row, centrePx: packed[row]?.[before] ?? label.centrePx };
+  });
+}
+
+function rowsTaken(labels: readonly Label[], rows: number, roomPx: number, gapPx: number): readonly number[] {
+  const endsPx = Array.from({ length: rows }, () => -Infinity);
+  return labels.map((label) => {
+    const leftPx = clampCentre(label, roomPx) - label.widthPx / 2;
+    const free = endsPx.findIndex((endPx) => endPx + gapPx <= leftPx);
+    const row = free === -1 ? endsPx.indexOf(Math.min(...endsPx)) : free;
+    endsPx[row] = Math.max(leftPx, (endsPx[row] ?? -Infinity) + gapPx) + label.widthPx;
+    return row;
+  });
 }
 
 /** One row: each label pushed right of its neighbour, then all pushed back from the right edge. */

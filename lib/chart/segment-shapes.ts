@@ -60,9 +60,10 @@ function outline(segment: NerveLineSegment, fromX: number, toX: number, sizes: N
     key: `segment-${segment.key}`,
     role: 'outline',
     tone: toneOf(segment.priority, 'second'),
-    x: fromX,
+    // Its ends lie under the nodes: only its length is seen.
+    x: fromX - sizes.radiusPx,
     y: -sizes.thicknessPx / 2 + stroke / 2,
-    widthPx: toX - fromX,
+    widthPx: toX - fromX + 2 * sizes.radiusPx,
     heightPx: sizes.thicknessPx - stroke,
     strokePx: stroke,
     dashPx: [stroke * 2, stroke * 2.2],

@@ -17,7 +17,7 @@ export function LeadBand({ line }: { readonly line: TheatreLine }) {
     case 'low':
       return (
         <section className="border-y border-rule px-(--edge-room) py-[0.55em] text-(length:--needed)">
-          <div className="flex w-fit max-w-full items-center gap-[0.35em] border-[0.06em] border-low px-[0.35em] py-[0.12em] text-[calc(var(--headline)*0.85)] text-low">
+          <div className="flex w-fit max-w-full items-center gap-[0.35em] border-[0.06em] border-low px-[0.35em] py-[0.12em] text-[max(var(--state),calc(var(--headline)*0.85))] text-low">
             <PriorityMark kind={stateMark(line)} className="size-[0.8em] shrink-0" />
             <Headline text={line.headline} />
           </div>

@@ -47,9 +47,9 @@ export function PairingPicture({ pairing, ended, problem, settings }: PairingPic
             </div>
           </dl>
         )}
-        <p>At the desk: pair a wall, type the code, and read the two words aloud. Both sides must show the same words.</p>
+        <p className="text-balance">At the desk: pair a wall, type the code, and read the two words aloud. Both sides must show the same words.</p>
       </div>
-      <footer className="border-t border-rule px-(--edge-room) py-[0.55em] text-(length:--needed) leading-[1.25] text-second">
+      <footer className="border-t border-rule px-(--edge-room) py-[0.55em] text-(length:--needed) leading-[1.25] text-balance text-second">
         An aid for qualified staff, not a certified medical device. It states findings and gives no advice: local protocols
         and licensed judgement come first.
       </footer>

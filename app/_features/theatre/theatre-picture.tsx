@@ -38,11 +38,11 @@ export function TheatrePicture({ place, procedure, clock, isLive, deskWords, vie
   return (
     <main ref={root} className="wall">
       <WallHeader place={place} procedure={procedure} clock={clock} isLive={isLive} />
-      <div aria-live="assertive">
+      <div aria-live="assertive" className={nerves.length === 0 ? 'flex flex-1 flex-col justify-center' : undefined}>
         <LeadBand line={view.lead} />
       </div>
       <OtherLines lines={view.others} />
-      <NerveLines views={nerves} widthPx={type.roomPx} textPx={type.neededPx} hasAges={type.hasAges} emphasis={type.emphasis} />
+      {nerves.length === 0 ? null : <NerveLines views={nerves} widthPx={type.roomPx} textPx={type.neededPx} hasAges={type.hasAges} emphasis={type.emphasis} />}
       {deskWords === null ? null : (
         <p ref={link} className="flex border-t border-rule px-(--edge-room) py-[0.45em] text-(length:--needed) leading-[1.2]">
           <strong className="inline-flex items-center gap-[0.4em] border-[0.08em] border-low px-[0.4em] text-low">

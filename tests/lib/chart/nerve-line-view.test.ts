@@ -24,6 +24,11 @@ describe('nerveLineView of a stable nerve', () => {
     // 150 mm in 10.77 − 8.33 = 2.44 ms; 100 mm in 8.33 − 6.46 = 1.87 ms; 210 mm in 6.46 − 2.90 = 3.56 ms.
     expect(line.segments.map((segment) => segment.text)).toEqual(['61\u00a0m/s', '53\u00a0m/s', '59\u00a0m/s', '2.90\u00a0ms']);
   });
+  it('gives an age in minutes for two hours, then in hours', () => {
+    const agesAt = (time: string) => lineAt(ulnarStable().state, time).sites.map((site) => site.ageText);
+    expect(agesAt('11:40:00')).toEqual(['62\u00a0min', '62\u00a0min', '61\u00a0min', '60\u00a0min']);
+    expect(agesAt('12:38:30')).toEqual(['2\u00a0h', '2\u00a0h', '119\u00a0min', '119\u00a0min']);
+  });
   it('ends at the muscle it was recorded from', () => expect(line.end).toEqual({ caption: 'Muscle', name: 'ADM', positionMm: 530 }));
   it('says all of it in sentences', () => {
     expect(line.description).toContain('Ulnar nerve, recorded at ADM.');

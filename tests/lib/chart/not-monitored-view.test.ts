@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { nerveLineView } from '@/lib/chart/nerve-line-view';
 import { notMonitoredView } from '@/lib/chart/not-monitored-view';
 import { momentAt } from '@/tests/support/theatre-gallery/case-script';
-import { ulnarStable } from '@/tests/support/theatre-gallery/ulnar-case';
+import { ulnarMonitored, ulnarStable } from '@/tests/support/theatre-gallery/ulnar-case';
 
 describe('notMonitoredView', () => {
   const live = nerveLineView(ulnarStable().state, 'ulnar', Date.parse(momentAt('10:39:30')));
@@ -18,6 +18,13 @@ describe('notMonitoredView', () => {
     const past = ['was 61\u00a0m/s', 'was 53\u00a0m/s', 'was 59\u00a0m/s', 'was 2.90\u00a0ms'];
     expect(view.segments.map((segment) => segment.text)).toEqual(past);
     expect(notMonitoredView(view).segments.map((segment) => segment.text)).toEqual(past);
+  });
+  it('says the velocities of the baseline in the past tense too', () => {
+    const planned = nerveLineView(ulnarMonitored().state, 'ulnar', Date.parse(momentAt('10:24:00')));
+    expect(notMonitoredView(planned).segments[0]?.text).toBe('was 61\u00a0m/s');
+  });
+  it.each(['61\u00a0m/s, not compared', 'no response up to 18\u00a0mA'])('leaves "%s" as it is', (text) => {
+    expect(notMonitoredView({ ...live, segments: [{ ...live.segments[0]!, text }] }).segments[0]?.text).toBe(text);
   });
   it('leaves a reason as it is', () => {
     const reason = { ...live.segments[0]!, text: 'distance not measured', shortText: 'no mm' };

@@ -18,6 +18,10 @@ describe('packLabels', () => {
   it('takes a second row where one has no room', () => {
     expect(packLabels([label(100, 60), label(110, 60)], 300, 5, Infinity)?.map((place) => place.row)).toEqual([0, 1]);
   });
+  it('leaves the first row only where there is no room in it', () => {
+    const crowded = [label(60, 100), label(110, 100), label(250, 40), label(330, 40)];
+    expect(packLabels(crowded, 400, 5, Infinity)?.map((place) => place.row)).toEqual([0, 1, 0, 0]);
+  });
   it('says so when the rows do not do', () => expect(packLabels([label(100, 60), label(110, 60)], 300, 5, 1)).toBeNull());
   it('has nothing to do without labels', () => expect(packLabels([], 300, 5, 1)).toEqual([]));
 

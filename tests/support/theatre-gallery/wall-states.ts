@@ -32,7 +32,7 @@ function shown(state: CaseState, time: string): WallState {
   };
 }
 
-function twoNerves(): CaseScript {
+function twoNerves(fibular: Readonly<Record<string, number>>, times = 1): CaseScript {
   const plan: CasePlan = { ...sciaticAtHip, theatre: 'Theatre 1', side: 'right' };
   const script = CaseScript.opened(plan);
   const onsets: Record<string, number> = { 'fibular-above-field': 14.9, 'fibular-below-field': 12.6, 'fibular-head': 6.2, 'tibial-above-field': 14.1, 'tibial-below-field': 11.8, 'popliteal-fossa': 6.0 };
@@ -46,7 +46,7 @@ function twoNerves(): CaseScript {
   script.give('10:21:00', { name: 'change-phase', phase: 'monitoring', reason: null });
   const risk = plan.steps.find((step) => step.isRisk);
   script.give('10:59:00', { name: 'log-step', stepId: risk?.id ?? '', label: null });
-  runAll('11', { 'fibular-above-field': 0.66, 'fibular-below-field': 0.66, 'fibular-head': 0.66 }, 'check');
+  for (const hour of ['11', '12', '13'].slice(0, times)) runAll(hour, fibular, 'check');
   return script;
 }
 
@@ -62,7 +62,8 @@ export const wallStates: Readonly<Record<string, () => WallState>> = {
   },
   watch: () => {
     const script = ulnarStable();
-    ulnarSites.forEach((site, index) => ulnarRun(script, `10:39:3${index}`, site, 0.62));
+    // From the wrist upwards, so that no ratio of two sites falls on the way.
+    [...ulnarSites].reverse().forEach((site, index) => ulnarRun(script, `10:39:3${index}`, site, 0.62));
     return shown(script.state, '10:40:20');
   },
   notice: () => {
@@ -97,5 +98,23 @@ export const wallStates: Readonly<Record<string, () => WallState>> = {
   paused: () => shown(ulnarMonitored().give('10:20:00', { name: 'change-phase', phase: 'paused', reason: 'Cautery' }).state, '10:24:00'),
   'take-down': () => shown(ulnarStable().give('11:40:00', { name: 'change-phase', phase: 'take-down', reason: null }).state, '11:41:00'),
   closed: () => shown(ulnarStable().give('11:40:00', { name: 'change-phase', phase: 'take-down', reason: null }).give('11:58:00', { name: 'close-case', text: null }).state, '11:58:20'),
-  'two-nerves': () => shown(twoNerves().state, '11:05:50'),
+  'take-down-alert': () => shown(ulnarAlert().give('10:50:00', { name: 'change-phase', phase: 'take-down', reason: null }).state, '10:51:00'),
+  'amplitude-alone': () => {
+    const script = ulnarStable();
+    for (const time of ['10:39:40', '10:39:55']) ulnarRun(script, time, 'above-elbow', 0.4);
+    ulnarRun(script, '10:40:00', 'axilla', 0.39);
+    ulnarRun(script, '10:40:05', 'below-elbow', 0.98);
+    ulnarRun(script, '10:40:15', 'wrist', 0.99);
+    return shown(script.state, '10:40:20');
+  },
+  'not-tested-long': () => shown(ulnarStable().state, '11:52:00'),
+  'cannot-be-judged': () => {
+    const script = ulnarStable();
+    ulnarSites.forEach((site, index) => ulnarRun(script, `10:41:0${index}`, site, 0).run(`10:41:2${index}`, site, 30, { adm: 'absent' }));
+    script.run('10:41:40', 'median-wrist', 15, { apb: 'absent' });
+    for (const alert of Object.values(script.state.incidents)) script.give('10:41:50', { name: 'end-alert', alertId: alert.alertId, outcome: 'none', cause: 'technical', text: null });
+    return shown(script.state, '10:42:05');
+  },
+  'two-nerves': () => shown(twoNerves({ 'fibular-above-field': 0.66, 'fibular-below-field': 0.66, 'fibular-head': 0.66 }).state, '11:05:50'),
+  'two-nerves-alert': () => shown(twoNerves({ 'fibular-above-field': 0.33 }, 2).state, '12:05:50'),
 };
