@@ -13,6 +13,9 @@ type Run = PersonCommand & { name: 'log-run' };
 /** Seconds before now at which something happened; an entry may come late. */
 export type Ago = Readonly<{ agoS?: number }>;
 
+/** Cases are planned so long ago: nothing can have happened in a case before. */
+const plannedAgoMs = 2 * 3_600_000;
+
 /** A desk without a screen: gives commands over HTTP, as the product's own pages do. */
 export class HttpDesk {
   private constructor(
@@ -25,7 +28,7 @@ export class HttpDesk {
   /** Signs in and plans a case. */
   static async plan(product: { readonly url: string }, plan: CasePlan, email = 'desk@demo.example', team: PlanCaseRequest['team'] = []): Promise<HttpDesk> {
     const cookie = await demoSession(product, email);
-    const body = { commandId: newId(), eventAt: new Date().toISOString(), plan, ...(team.length === 0 ? {} : { team }), identity: { patientLabel: 'Invented patient', recordNumber: 'DEMO-1' } };
+    const body = { commandId: newId(), eventAt: new Date(Date.now() - plannedAgoMs).toISOString(), plan, ...(team.length === 0 ? {} : { team }), identity: { patientLabel: 'Invented patient', recordNumber: 'DEMO-1' } };
     const { status, body: reply } = await send(product, 'POST', '/api/cases', { cookie, body });
     if (status !== 200) throw new Error(`Planning answered ${status}: ${JSON.stringify(reply)}`);
     return new HttpDesk(product, cookie, (reply as CommandReply & { kind: 'committed' }).caseId, plan);
