@@ -1,7 +1,8 @@
 import type { NotComparedReason, PathJudgement, SegmentJudgement } from '@/lib/alert/judgement';
 import { judgePath } from '@/lib/alert/judge-path';
 import { comparability, type RunConditions } from '@/lib/change/comparability';
-import type { Baseline, CaseState } from '@/lib/case/case-state';
+import { isEqualCurrent } from '@/lib/change/stimulus-current';
+import type { Baseline, CaseState, Incident } from '@/lib/case/case-state';
 import { judgeSegments } from '@/lib/case/judge-segments';
 import { baselineOfTime } from '@/lib/case/baseline-of-time';
 import { isAbnormal } from '@/lib/case/is-abnormal';
@@ -14,7 +15,7 @@ import type { ChannelReading } from '@/lib/response/reading';
  * One run of a case, judged: every path it touches and every segment it completes.
  *
  * Method: like with like first, then the limits. A raised current is compared only where it shows a loss, or where
- * it answers an open notice: back at a higher current is a threshold rise. The newest run of a neighbouring site
+ * it answers an open notice: back at a higher current is a threshold rise, also where both are ticked supramaximal. The newest run of a neighbouring site
  * completes a segment.
  *
  * @param state the case before or just after the run was logged
@@ -46,13 +47,25 @@ function judgeReading(state: CaseState, judged: RunToJudge, row: ChannelReading)
   const likeness = comparability(conditionsOf(state, run, row.channelId), baselineConditions(state, baseline, row.channelId));
   if (likeness.kind === 'not-compared') return notCompared(likeness.reason);
   const seen = judgePath(row.reading, pathBaseline(baseline), state.plan.rules);
-  if (likeness.kind === 'comparable') return { kind: 'compared', pathId, current: likeness.current, ...seen };
+  const isRaised = likeness.kind === 'raised' || (likeness.current === 'supramaximal' && isRaisedRepeat(state, judged, pathId));
+  if (!isRaised) return { kind: 'compared', pathId, current: likeness.current, ...seen };
   if (isAbnormal(seen.findings)) return { kind: 'compared', pathId, current: 'raised', ...seen };
-  if (answersOpenNotice(state, pathId, judged.at)) {
-    const finding = { kind: 'threshold-rise', priority: 'notice', mayBecomeAlert: false } as const;
-    return { kind: 'compared', pathId, current: 'raised', change: seen.change, findings: [finding] };
-  }
-  return notCompared('current-raised');
+  if (incidentOf(state, pathId, judged.at) === undefined) return notCompared('current-raised');
+  const finding = { kind: 'threshold-rise', priority: 'notice', mayBecomeAlert: false } as const;
+  return { kind: 'compared', pathId, current: 'raised', change: seen.change, findings: [finding] };
+}
+
+/** A response that failed at a current ticked supramaximal and is back above it needs more current, whatever is ticked now. */
+function isRaisedRepeat(state: CaseState, { at, run }: RunToJudge, pathId: string): boolean {
+  const incident = incidentOf(state, pathId, at);
+  return state.runs.some(
+    (bad) =>
+      incident?.badSeqs.includes(bad.seq) === true && bad.run.siteId === run.siteId && run.intensityMa > bad.run.intensityMa && !isEqualCurrent(run, bad.run),
+  );
+}
+
+function incidentOf(state: CaseState, pathId: string, at: string): Incident | undefined {
+  return Object.values(state.incidents).find((incident) => incident.pathIds.includes(pathId) && at >= incident.firstBadAt);
 }
 
 function missingBaselineReason(state: CaseState, pathId: string, run: RunBody): NotComparedReason {
@@ -60,10 +73,6 @@ function missingBaselineReason(state: CaseState, pathId: string, run: RunBody): 
   if (ofPath.length === 0) return 'no-baseline';
   if (ofPath.some((baseline) => baseline.family === run.family && baseline.electrodeId === run.electrodeId)) return 'no-baseline';
   return ofPath.some((baseline) => baseline.family === run.family) ? 'electrode-differs' : 'family-differs';
-}
-
-function answersOpenNotice(state: CaseState, pathId: string, at: string): boolean {
-  return Object.values(state.incidents).some((incident) => incident.pathIds.includes(pathId) && at >= incident.firstBadAt);
 }
 
 function conventionOf(state: CaseState, channelId: string): string {

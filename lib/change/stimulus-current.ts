@@ -51,14 +51,27 @@ export const supramaximalFactor: Sourced<number> = {
 export function stimulusCurrent(run: StimulusCurrent, baseline: StimulusCurrent): CurrentRelation {
   assertWithin(run.intensityMa, bounds.intensityMa, 'current');
   assertWithin(baseline.intensityMa, bounds.intensityMa, 'baseline current');
-  const differenceMa = roundTo(run.intensityMa - baseline.intensityMa, resolutions.intensityMa);
-  const allowedMa = (baseline.intensityMa * equalWithinPercent.value) / 100;
-  // The nudge keeps 0.63 against 0.60 mA equal, although their binary difference lies a hair above.
-  if (Math.abs(differenceMa) <= allowedMa + 1e-9) return 'equal';
+  if (isEqualCurrent(run, baseline)) return 'equal';
   const isBaselineSupramaximal = isSupramaximal(baseline);
   if (isBaselineSupramaximal && isSupramaximal(run)) return 'supramaximal';
-  if (differenceMa > 0) return 'raised';
+  if (run.intensityMa > baseline.intensityMa) return 'raised';
   return isBaselineSupramaximal ? 'not-supramaximal' : 'lower';
+}
+
+/**
+ * Whether a current is equal to another within the share that counts as equal.
+ * @param run current in mA
+ * @param other current in mA; the share is taken of this one
+ * @returns true also at exactly 5 %
+ * @source house rule
+ * @accuracy exact at the limit; tests/lib/change/stimulus-current.test.ts
+ * @example
+ * isEqualCurrent({ intensityMa: 0.63 }, { intensityMa: 0.6 }) // => true
+ */
+export function isEqualCurrent(run: Pick<StimulusCurrent, 'intensityMa'>, other: Pick<StimulusCurrent, 'intensityMa'>): boolean {
+  const differenceMa = roundTo(run.intensityMa - other.intensityMa, resolutions.intensityMa);
+  // The nudge keeps 0.63 against 0.60 mA equal, although their binary difference lies a hair above.
+  return Math.abs(differenceMa) <= (other.intensityMa * equalWithinPercent.value) / 100 + 1e-9;
 }
 
 function isSupramaximal(current: StimulusCurrent): boolean {

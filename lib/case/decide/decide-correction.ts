@@ -7,6 +7,7 @@ import { evolveDraft } from '@/lib/case/decide/evolve-draft';
 import { judgedDraft, type Judged } from '@/lib/case/decide/judged-draft';
 import { roundRun } from '@/lib/case/decide/round-run';
 import { runProblem } from '@/lib/case/decide/run-problem';
+import { uncoveredDrafts } from '@/lib/case/decide/uncovered-drafts';
 import type { EntryDraft } from '@/lib/case/entry-bodies';
 
 /**
@@ -56,8 +57,8 @@ export function decideCorrection(
     drafts.push(gone);
     after = evolveDraft(after, gone, context);
   }
-  if (judged === null) return drafts;
-  return [...drafts, ...alertDrafts(withdrawn.length > 0 ? after : state, after, judged.body)];
+  const shown = judged === null ? [] : alertDrafts(withdrawn.length > 0 ? after : state, after, judged.body);
+  return [...drafts, ...(shown.length > 0 ? shown : uncoveredDrafts(state, after, kept))];
 }
 
 /** The judgement of a corrected run; none where its baseline was made of it or is newer, and it has no older one. */

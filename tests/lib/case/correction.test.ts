@@ -80,6 +80,19 @@ describe('decide, corrections', () => {
     expect(script.wait(5000).run('above-elbow', { adm: adm('above-elbow') })).toEqual(['alert.recovered']);
   });
 
+  it.each([
+    ['is withdrawn', null],
+    ['cannot be compared as corrected', { adm: { kind: 'unusable', reason: 'cautery' } }],
+  ] as const)('decide raises a loss again whose good repeat %s', (_case, readings) => {
+    const script = monitoredUlnar().at('10:41');
+    script.run('above-elbow', { adm: absent(18) });
+    expect(script.wait(5000).run('above-elbow', { adm: adm('above-elbow') })).toEqual(['notice.settled']);
+    expect(correct(script.at('10:46'), lastRunSeq(script), 'above-elbow', readings)).toEqual(['notice.raised']);
+    expect(incidentOf(script)).toMatchObject({ alertId: 'ulnar-2', firstBadAt: clock('10:41'), isLost: true });
+    expect(script.view().lead.detail).toContain('From 10:41, received 10:46');
+    expect(script.timers()).toEqual(['alert.raised']);
+  });
+
   it('decide raises what a correction shows elsewhere although it withdraws the notice', () => {
     // Below elbow typed lost; corrected, its onset leaves the stretch above it 1.2 ms slower: 1.85 to 3.05 ms is +65 %.
     const script = monitoredUlnar().at('10:41');

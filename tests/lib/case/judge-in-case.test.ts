@@ -82,6 +82,33 @@ describe('decide, raised current', () => {
     expect(script.view().lead).toMatchObject({ kind: 'notice', headline: 'Ulnar needs more current' });
   });
 
+  it('decide takes it for a threshold rise whatever is ticked, and settles it at the current it was lost at', () => {
+    // Lost at 18 mA ticked supramaximal: 18.9 mA is 5 % more and equal, 19 mA is raised.
+    for (const intensityMa of [30, 19]) {
+      const script = lostOnce();
+      expect(script.wait(5000).run('above-elbow', { adm: adm('above-elbow') }, { intensityMa })).toEqual([]);
+      expect(script.state.paths['above-elbow/adm']?.compared).toMatchObject({ findings: [{ kind: 'threshold-rise' }] });
+      // Once more at the higher current is no answer either.
+      expect(script.wait(5000).run('above-elbow', { adm: adm('above-elbow') }, { intensityMa })).toEqual([]);
+      expect(script.view().lead).toMatchObject({ kind: 'notice', headline: 'Ulnar needs more current' });
+      expect(script.wait(5000).run('above-elbow', { adm: adm('above-elbow') })).toEqual(['notice.settled']);
+    }
+    expect(lostOnce().wait(5000).run('above-elbow', { adm: adm('above-elbow') }, { intensityMa: 18.9 })).toEqual(['notice.settled']);
+  });
+
+  it('decide settles a fall at a higher supramaximal current when it fell at that current', () => {
+    const script = monitoredUlnar().at('10:41');
+    script.run('above-elbow', { adm: adm('above-elbow', 0.38) }, { intensityMa: 30 });
+    expect(script.wait(5000).run('above-elbow', { adm: adm('above-elbow') }, { intensityMa: 30 })).toEqual(['notice.settled']);
+  });
+
+  it('decide counts no recovery of an alert at a higher current', () => {
+    const script = lostOnce();
+    script.wait(5000).run('above-elbow', { adm: absent(18) });
+    for (let count = 0; count < 3; count += 1) expect(script.wait(5000).run('above-elbow', { adm: adm('above-elbow') }, { intensityMa: 30 })).not.toContain('alert.recovered');
+    expect(script.view().lead).toMatchObject({ kind: 'alert', headline: 'Ulnar needs more current' });
+  });
+
   it('decide takes a response that is still absent at a higher current for the confirmation', () => {
     const script = lostOnce();
     expect(script.wait(5000).run('above-elbow', { adm: absent(30) }, raised)).toEqual(['alert.raised']);
