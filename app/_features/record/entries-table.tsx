@@ -1,10 +1,11 @@
+import { LateWords } from '@/app/_features/record/late-words';
 import type { RecordRow } from '@/app/_features/record/record-rows';
 import { Badge } from '@/app/_ui/badge';
 import { joinClasses } from '@/app/_ui/join-classes';
 import { Cell, HeadCell, Table } from '@/app/_ui/table';
-import { clockTime, durationWords } from '@/lib/text/format';
+import { lateMsOf } from '@/lib/case/course/late-after-ms';
+import { clockTime } from '@/lib/text/format';
 
-const lateAfterMs = 60_000;
 const shownHashCharacters = 10;
 
 /** The entries, oldest first: number, time, what, by whom, and the head of the hash. */
@@ -30,7 +31,7 @@ export function EntriesTable({ rows, timeZone }: { readonly rows: readonly Recor
               {row.mark === null ? null : <span className="mr-2 inline-block align-baseline"><Badge priority={row.mark === 'alert' ? 'high' : 'medium'}>{row.mark === 'alert' ? 'Alert' : 'Notice'}</Badge></span>}
               <span className={joinClasses(row.correctedBy !== null && 'text-second line-through')}>{row.sentence}</span>
               {row.correctedBy === null ? null : <a href={`#entry-${row.correctedBy}`} className="ml-2 font-semibold text-stain underline underline-offset-4">{`corrected by entry ${row.correctedBy}`}</a>}
-              {lateWords(row)}
+              <LateWords lateMs={lateMsOf(row)} />
             </Cell>
             <Cell className="whitespace-nowrap text-second">{row.author}</Cell>
             <Cell className="font-mono whitespace-nowrap text-second" title={row.hash}>{row.hash.slice(0, shownHashCharacters)}</Cell>
@@ -39,10 +40,4 @@ export function EntriesTable({ rows, timeZone }: { readonly rows: readonly Recor
       </tbody>
     </Table>
   );
-}
-
-/** An entry that came long after its time says so. */
-function lateWords(row: RecordRow) {
-  const lateMs = Date.parse(row.recordedAt) - Date.parse(row.eventAt);
-  return lateMs < lateAfterMs ? null : <span className="ml-2 text-sm text-second">{`received ${durationWords(lateMs)} later`}</span>;
 }

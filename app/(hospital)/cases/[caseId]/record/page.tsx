@@ -1,7 +1,7 @@
 import type { Metadata } from 'next';
 
-import { requireCase } from '@/app/(desk)/require-person';
-import { deskLinks } from '@/app/(desk)/desk-links';
+import { pageLinks } from '@/app/(desk)/page-links';
+import { requireCase, requirePerson } from '@/app/(desk)/require-person';
 import { RecordPage } from '@/app/_features/record/record-page';
 import { AccountAside } from '@/app/_features/sign-in/account-aside';
 import { QueryProvider } from '@/app/_ui/query-provider';
@@ -12,11 +12,12 @@ export const metadata: Metadata = { title: 'Record' };
 /** The record of one case, on paper's colours whatever the viewer's theme. */
 export default async function CaseRecord({ params }: { readonly params: Promise<{ caseId: string }> }) {
   const { caseId } = await params;
+  const person = await requirePerson();
   await requireCase(caseId);
   return (
     <QueryProvider>
       <div data-theme="paper">
-        <Shell links={deskLinks} aside={<AccountAside hasTheme={false} />}>
+        <Shell links={pageLinks(person)} aside={<AccountAside hasTheme={false} />}>
           <RecordPage caseId={caseId} />
         </Shell>
       </div>

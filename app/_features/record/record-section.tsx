@@ -1,0 +1,26 @@
+import type { ReactNode } from 'react';
+
+interface RecordSectionProps {
+  readonly id: string;
+  readonly heading: string;
+  readonly children: ReactNode;
+  /** Says that everything in it follows from the entries and from nothing else. */
+  readonly isComputed?: boolean;
+  readonly aside?: ReactNode;
+}
+
+/** One section of the record with its heading; the contents list leads here. */
+export function RecordSection({ id, heading, children, isComputed = false, aside }: RecordSectionProps) {
+  return (
+    <section id={id} aria-labelledby={`${id}-heading`} tabIndex={-1} className="record-section mt-10 scroll-mt-4 outline-none">
+      <div className="mb-3 flex flex-wrap items-end justify-between gap-x-6 gap-y-2 border-t border-ink pt-3">
+        <h2 id={`${id}-heading`} className="text-xl font-bold">
+          {heading}
+          {isComputed ? <span className="ml-3 text-sm font-normal text-second">Computed from the entries</span> : null}
+        </h2>
+        {aside}
+      </div>
+      {children}
+    </section>
+  );
+}
