@@ -90,9 +90,9 @@ export class CaseFollower {
 
   /** A pulse that was not stale, with the head of this case. */
   pulse(pulse: PulseOfCase, checkedAt: string): void {
-    const { deskConnected, deskSince, wallsConnected } = pulse;
+    const { deskConnected, deskSince, wallsConnected, peopleConnected } = pulse;
     this.lastPulse = { pulse, checkedAt };
-    this.parts.publish({ deskConnected, deskSince, wallsConnected, headSeq: Math.max(pulse.headSeq, this.state.seq) });
+    this.parts.publish({ deskConnected, deskSince, wallsConnected, peopleConnected, headSeq: Math.max(pulse.headSeq, this.state.seq) });
     if (pulse.headSeq > this.state.seq) void this.follow();
     else if (isOther(this.hashes.get(pulse.headSeq), pulse.headHash)) this.fail('fork');
     this.confirmCheck();

@@ -5,6 +5,7 @@
  * 2: the list of cases says how many there are.
  * 3: team at planning, examination, advice and its confirmation, the physician's acceptance of a baseline, people.
  * 4: a plan may name its hospital.
+ * 5: a pulse says who has the case open.
  * @source house rule: a whole number from 1
  */
-export const contractVersion = 4;
+export const contractVersion = 5;

@@ -3,13 +3,14 @@ import { withinHospitals } from '@/db/within-hospitals';
 import { followRequestSchema, type FollowReply } from '@/lib/contracts/channel/messages';
 import { contractVersion } from '@/lib/contracts/contract-version';
 import { decideAccess } from '@/lib/policy/decide-access';
+import { roleOfRule } from '@/lib/policy/rules';
 import { isFailure, notReadable } from '@/server/failure';
 import { roomOf, type LiveSocket } from '@/server/live/live-socket';
 import type { Departures } from '@/server/live/departures';
 import type { Presence } from '@/server/cases/presence';
 import type { Pump } from '@/server/live/pump';
 import { largestPage, readPage } from '@/server/queries/case-entries';
-import { openCase } from '@/server/queries/open-case';
+import { openCase, type Visitor } from '@/server/queries/open-case';
 import type { ServerContext } from '@/server/server-context';
 
 /** What following needs. */
@@ -36,8 +37,8 @@ export async function follow(parts: FollowParts, socket: LiveSocket, message: un
     return { kind: 'refused', code: 'bad-request', message: `Too many: ${mostCasesPerViewer} cases at most can be followed at a time.` };
   }
   try {
-    const { visitor, isDesk } = socket.data;
-    const { resource } = await openCase(parts.context, visitor, { caseId, action: 'see-case', what: 'follow' });
+    const { visitor, isDesk, displayName } = socket.data;
+    const { resource, rule } = await openCase(parts.context, visitor, { caseId, action: 'see-case', what: 'follow' });
     await socket.join(roomOf(caseId, visitor.kind));
     const page = await readPage(parts.context, visitor, { caseId, after, limit: largestPage });
     if (!socket.connected) throw new Error('The viewer left while the log was read.');
@@ -45,7 +46,7 @@ export async function follow(parts: FollowParts, socket: LiveSocket, message: un
     socket.data.caseIds.add(caseId);
     // Whoever cannot write is no desk, whatever the page says of itself: a wall would call the case attended.
     const desk = isDesk && decideAccess(visitor, 'write-case', resource).isAllowed;
-    if (isNew) parts.presence.arrive(caseId, socket.id, { desk, screenId: visitor.kind === 'screen' ? visitor.screenId : null });
+    if (isNew) parts.presence.arrive(caseId, socket.id, { ...whoIs(visitor), role: roleOfRule(rule) ?? visitor.kind, displayName, isDesk: desk, hospitalId: resource.hospitalId });
     if (visitor.kind === 'screen') noteSeen(parts.context, visitor);
     return { kind: 'entries', ...page };
   } catch (cause) {
@@ -55,6 +56,10 @@ export async function follow(parts: FollowParts, socket: LiveSocket, message: un
     parts.context.log.warn({ err: cause, caseId }, 'A viewer could not follow.');
     return { kind: 'refused', code: 'not-saved', message: notReadable().message };
   }
+}
+
+function whoIs(visitor: Visitor): { personId: string | null; screenId: string | null } {
+  return visitor.kind === 'screen' ? { personId: null, screenId: visitor.screenId } : { personId: visitor.personId, screenId: null };
 }
 
 function noteSeen({ database, log }: ServerContext, { screenId, hospitalId }: { screenId: string; hospitalId: string }): void {

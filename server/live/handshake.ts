@@ -17,7 +17,7 @@ export async function admit(context: Facts, cookie: string | null, viewer: 'desk
   if (viewer === 'wall') return admitWall(context, cookie);
   const signedIn = await readSession(context, cookie);
   if (signedIn === null) return null;
-  return { visitor: signedIn.actor, sessionId: signedIn.session.sessionId, isDesk: viewer === 'desk', caseIds: new Set() };
+  return { visitor: signedIn.actor, sessionId: signedIn.session.sessionId, displayName: signedIn.session.displayName, isDesk: viewer === 'desk', caseIds: new Set() };
 }
 
 async function admitWall(context: Facts, cookie: string | null): Promise<SocketFacts | null> {
@@ -25,5 +25,5 @@ async function admitWall(context: Facts, cookie: string | null): Promise<SocketF
   const screen = token === null ? null : await findScreenByToken(context.database.app, screenTokenHash(token));
   if (screen === null || screen.hospitalId === null || screen.caseId === null || screen.revokedAt !== null || screen.endedAt !== null) return null;
   const visitor = { kind: 'screen', screenId: screen.id, hospitalId: screen.hospitalId, caseId: screen.caseId } as const;
-  return { visitor, sessionId: null, isDesk: false, caseIds: new Set() };
+  return { visitor, sessionId: null, displayName: '', isDesk: false, caseIds: new Set() };
 }

@@ -23,6 +23,8 @@ export interface SocketFacts {
   visitor: Visitor;
   /** Session of a person, null for a wall. */
   sessionId: string | null;
+  /** Name of the person, empty for a wall. */
+  displayName: string;
   isDesk: boolean;
   /** Cases it follows. */
   caseIds: Set<string>;

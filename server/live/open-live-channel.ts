@@ -12,6 +12,7 @@ import { admit, viewerOf } from '@/server/live/handshake';
 import { reply, type LiveServer, type LiveSocket, type SocketFacts } from '@/server/live/live-socket';
 import { notePainted } from '@/server/live/note-painted';
 import type { Presence } from '@/server/cases/presence';
+import { makePresenceKeeper } from '@/server/live/presence-keeper';
 import { makePump, type Pump } from '@/server/live/pump';
 import { pulseOnce } from '@/server/live/pulse-once';
 import { sweepOnce } from '@/server/live/sweep-once';
@@ -51,9 +52,13 @@ export function openLiveChannel(httpServer: HttpServer, parts: { context: Server
   const pump = makePump(context, io, (caseId) => late.departures?.endWalls(caseId));
   const departures = makeDepartures(io, presence, pump);
   late.departures = departures;
+  const keeper = makePresenceKeeper(context, presence);
+  // A fault is told by the beat, which tries again.
+  presence.whenChanged(() => void keeper.hold().catch(() => undefined));
   admitViewers(io, context);
   listenToViewers(io, { context, presence, pump, departures });
   const beats = [
+    everySecond(() => keeper.hold(), (cause) => context.log.warn({ err: cause }, 'Other processes were not told who is connected here; the next second tries again.')),
     everySecond(() => pulseOnce({ context, io, pump, presence }), (cause) => context.log.warn({ err: cause }, 'No pulse: the database did not answer.')),
     everySecond(() => sweepOnce(context, io, departures), (cause) => context.log.warn({ err: cause }, 'Open sockets could not be held against the database.')),
   ];
@@ -70,6 +75,7 @@ export function openLiveChannel(httpServer: HttpServer, parts: { context: Server
       for (const beat of beats) beat.stop();
       io.disconnectSockets(true);
       await io.close();
+      await keeper.hold().catch((cause: unknown) => context.log.warn({ err: cause }, 'Other processes were not told that everybody left; they see it by age.'));
     },
   };
 }

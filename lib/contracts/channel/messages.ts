@@ -52,6 +52,8 @@ export const pulseMessageSchema = z.strictObject({
       deskConnected: z.boolean(),
       deskSince: z.string().nullable(),
       wallsConnected: z.int(),
+      /** People who have the case open now, in any process; always empty for a wall. */
+      peopleConnected: z.array(z.strictObject({ personId: z.string(), role: z.string(), displayName: z.string(), since: z.string() })),
     }),
   ),
 });

@@ -89,7 +89,7 @@ export class FakeServer {
 
   pulse(change: { checkedAt?: string; headSeq?: number; headHash?: string } = {}): void {
     const { checkedAt = new Date(this.nowMs()).toISOString(), ...head } = change;
-    this.tell('pulse', { checkedAt, cases: [{ caseId: this.caseId, ...this.head, deskConnected: true, deskSince: null, wallsConnected: 1, ...head }] });
+    this.tell('pulse', { checkedAt, cases: [{ caseId: this.caseId, ...this.head, deskConnected: true, deskSince: null, wallsConnected: 1, peopleConnected: [], ...head }] });
   }
 
   async answer(socket: FakeSocket, event: string, body: unknown): Promise<unknown> {

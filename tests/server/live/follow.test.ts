@@ -57,7 +57,7 @@ describe('follow', () => {
     const other = await openTestHouse({ database: house.database });
     try {
       const seen = globalThis.fascicle;
-      const reply = await seen.execute('give-command', { caseId, request: envelope({ name: 'send-message', text: 'From the other process' }) }, { cookie: await house.cookieOf(desk), address: '127.0.0.1' });
+      const reply = await seen.execute('give-command', { caseId, request: envelope({ name: 'send-message', text: 'From the other process' }) }, { cookie: await house.cookieOf(desk), authorization: null, address: '127.0.0.1' });
       expect(reply.status).toBe(200);
       await expect.poll(() => JSON.stringify(viewer.got), { timeout: 3_000 }).toContain('From the other process');
       expect(isDense(viewer)).toBe(true);

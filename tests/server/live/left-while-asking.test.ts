@@ -37,7 +37,7 @@ test('a viewer that leaves while it asks again stays in no room, and nobody read
   const socket = {
     id: 'gone',
     connected: false,
-    data: { visitor: signedIn.actor, sessionId: signedIn.session.sessionId, isDesk: true, caseIds: new Set([caseId]) },
+    data: { visitor: signedIn.actor, sessionId: signedIn.session.sessionId, displayName: 'Neurophysiologist', isDesk: true, caseIds: new Set([caseId]) },
     join: (room: string) => rooms.set(room, new Set(['gone'])),
     leave: (room: string) => rooms.delete(room),
   } as unknown as LiveSocket;
