@@ -1,7 +1,9 @@
-/** The sign of the product: a bundle of fibres as it looks under the microscope. Silent; the name stands beside it. */
+const plainRemPx = 16;
+
+/** The sign of the product: a bundle of fibres as it looks under the microscope. Silent; the name stands beside it. Grows with the page's letters. */
 export function Mark({ sizePx = 24 }: { readonly sizePx?: number }) {
   return (
-    <svg width={sizePx} height={sizePx} viewBox="0 0 32 32" aria-hidden="true" className="shrink-0">
+    <svg width={`${sizePx / plainRemPx}rem`} height={`${sizePx / plainRemPx}rem`} viewBox="0 0 32 32" aria-hidden="true" className="shrink-0">
       <circle cx="16" cy="16" r="14" fill="none" className="stroke-ink" strokeWidth="2.4" />
       <g className="fill-stain">
         <circle cx="16" cy="15.6" r="3.6" />
