@@ -4,6 +4,8 @@ import { bounds, type BoundedQuantity } from '@/lib/units/bounds';
 
 /**
  * A number inside its limits; both messages, for no number and for a number outside, say what is allowed.
+ * @param min least number allowed, in the field's own unit
+ * @param max greatest number allowed, in the same unit
  * @param allowed the limits in words: "1 to 99 % is allowed"
  * @param reason why they are there; empty where the words say enough
  * @returns a schema of a finite number
