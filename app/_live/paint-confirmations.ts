@@ -38,11 +38,16 @@ export class PaintConfirmations {
   private async say(confirmation: Confirmation): Promise<void> {
     while (this.open.includes(confirmation) && this.parts.isConnected()) {
       const isAnswered = await this.parts.request(confirmation, answerWithinMs).then(
-        () => true,
+        (reply) => !isToBeSaidAgain(reply),
         () => false,
       );
       if (isAnswered) this.open = this.open.filter((one) => one !== confirmation);
       else await this.parts.wait(retryMs);
     }
   }
+}
+
+/** The server or its database met a fault, or was asked too often: nothing was noted. */
+function isToBeSaidAgain(reply: unknown): boolean {
+  return typeof reply === 'object' && reply !== null && 'code' in reply && reply.code === 'not-saved';
 }

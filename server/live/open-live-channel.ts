@@ -115,9 +115,7 @@ function listenToViewers(io: LiveServer, parts: Parts): void {
       if (!tooMany(answer)) void giveCommandMessage(context, socket, message).then((given) => reply(answer, given));
     });
     socket.on('painted', (message, answer) => {
-      if (tooMany(answer)) return;
-      const isNoted = notePainted(context, socket, message);
-      reply(answer, isNoted ? { kind: 'noted' } : { kind: 'refused', code: 'bad-request', message: 'Not noted: a wall confirms what it painted of its own case only.' });
+      if (!tooMany(answer)) void notePainted(context, socket, message).then((noted) => reply(answer, noted));
     });
     socket.on('error', (cause) => context.log.warn({ err: cause }, 'A socket met a fault.'));
     socket.on('disconnect', () => {

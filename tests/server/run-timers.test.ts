@@ -1,8 +1,8 @@
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 
-import type { PersonCommand } from '@/lib/contracts/http/commands';
 import { runTimers } from '@/server/commands/run-timers';
 
+import { caseWithNotice } from './house/case-with-notice';
 import { openSecondServer, type SecondServer } from './house/second-server';
 import { commit, planCaseAs, runCommand } from './house/client';
 import { appendNewerEntry } from './house/newer-entry';
@@ -23,27 +23,11 @@ afterAll(async () => {
   await house.close();
 });
 
-/** A case with a notice that waits for its repeat: a baseline, then a run at a fifth of its amplitude. */
-async function caseWithNotice(): Promise<string> {
-  const caseId = await planCaseAs(house, desk);
-  const commands: PersonCommand[] = [
-    { name: 'open-case', clockOffsetMs: null },
-    { name: 'confirm-timeout', side: 'left', text: null },
-    { name: 'change-phase', phase: 'baseline', reason: null },
-    ...Array.from({ length: 3 }, () => runCommand('wrist', 8_000, 'baseline')),
-    { name: 'accept-baseline', family: 'exposed', electrodeId: 'surface', reason: 'No train-of-four at hand' },
-    { name: 'change-phase', phase: 'monitoring', reason: null },
-    runCommand('wrist', 1_600),
-  ];
-  for (const command of commands) await commit(house, desk, caseId, command);
-  return caseId;
-}
-
 const kindsOf = async (caseId: string) => (await house.admin('entries').where({ case_id: caseId }).orderBy('seq').select('kind')).map(({ kind }: { kind: string }) => kind);
 
 describe('runTimers', () => {
   test('raises the alert of a notice that was not repeated: once, by any number of servers, and not before its time', async () => {
-    const caseId = await caseWithNotice();
+    const caseId = await caseWithNotice(house, desk);
     expect(await kindsOf(caseId)).toContain('notice.raised');
     await Promise.all(servers.map(({ context }) => runTimers(context)));
     expect(await kindsOf(caseId)).not.toContain('alert.raised');
@@ -62,7 +46,7 @@ describe('runTimers', () => {
     const unread = await planCaseAs(house, desk);
     await commit(house, desk, unread, { name: 'open-case', clockOffsetMs: null });
     await appendNewerEntry(house, server, unread);
-    const caseId = await caseWithNotice();
+    const caseId = await caseWithNotice(house, desk);
     expect(unread < caseId).toBe(true);
     later.ms = 120_000;
     await runTimers(server.context);

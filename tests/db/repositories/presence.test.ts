@@ -4,7 +4,7 @@ import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest'
 import { pulseFacts } from '@/db/read-models/pulse-facts';
 import { elsewhere } from '@/db/repositories/presence/elsewhere';
 import { holdPresence, type HeldViewer } from '@/db/repositories/presence/hold-presence';
-import { addCase, openRecordDatabase, type RecordDatabase } from '../record-database';
+import { addCase, openRecordDatabase, type RecordDatabase } from '@/tests/db/record-database';
 
 let db: RecordDatabase;
 let caseId: string;

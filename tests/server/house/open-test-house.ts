@@ -49,7 +49,7 @@ export async function openTestHouse(options: { database?: TestDatabase; logLines
     const credentials = await findCredentialsByEmail(admin, email);
     if (credentials === null) throw new Error(`There is no demo person ${email}.`);
     const { code } = await nextCode(credentials.secondFactorSecret, credentials.secondFactorStep, Date.now());
-    const signedIn = await house.fascicle.execute('sign-in', { email, password: DEMO_PASSWORD, code }, { cookie: null, address: '127.0.0.1' });
+    const signedIn = await house.fascicle.execute('sign-in', { email, password: DEMO_PASSWORD, code }, { cookie: null, authorization: null, address: '127.0.0.1' });
     if (!signedIn.isOk) throw new Error(signedIn.body.message);
     return signedIn.body.sessionId;
   }

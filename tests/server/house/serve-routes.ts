@@ -8,6 +8,8 @@ import * as screensRoute from '@/app/api/cases/[caseId]/screens/route';
 import * as casesRoute from '@/app/api/cases/route';
 import * as demoPeopleRoute from '@/app/api/demo-people/route';
 import * as healthRoute from '@/app/api/health/route';
+import * as openapiRoute from '@/app/api/openapi.json/route';
+import * as peopleRoute from '@/app/api/people/route';
 import * as reauthenticateRoute from '@/app/api/reauthenticate/route';
 import * as screenRoute from '@/app/api/screen/route';
 import * as sessionRoute from '@/app/api/session/route';
@@ -24,6 +26,8 @@ const routes: readonly (readonly [RegExp, object])[] = [
   [/^\/api\/cases\/(?<caseId>[^/]+)\/screens$/, screensRoute],
   [/^\/api\/cases\/(?<caseId>[^/]+)\/screens\/(?<screenId>[^/]+)$/, screenOfCaseRoute],
   [/^\/api\/session$/, sessionRoute],
+  [/^\/api\/people$/, peopleRoute],
+  [/^\/api\/openapi\.json$/, openapiRoute],
   [/^\/api\/screen$/, screenRoute],
   [/^\/api\/reauthenticate$/, reauthenticateRoute],
   [/^\/api\/demo-people$/, demoPeopleRoute],

@@ -1,9 +1,8 @@
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 
-import type { ScreenReply } from '@/lib/contracts/http/replies';
-
 import { commit, planCaseAs, runCommand, send } from '@/tests/server/house/client';
 import { openTestHouse, type TestHouse } from '@/tests/server/house/open-test-house';
+import { pairedWall as pairWall } from '@/tests/server/house/paired-wall';
 import { connectViewer } from '@/tests/server/house/viewer';
 
 const desk = 'desk@demo.example';
@@ -17,15 +16,7 @@ beforeAll(async () => {
 });
 afterAll(() => house.close());
 
-/** A wall bound to the case. */
-async function pairedWall() {
-  const asked = await send(house, 'POST', '/api/screen');
-  const { code, screenId } = asked.body as ScreenReply & { kind: 'waiting' };
-  const cookie = (asked.headers.get('set-cookie') ?? '').split(';')[0] ?? '';
-  const paired = await send(house, 'POST', `/api/cases/${caseId}/screens`, { cookie: await house.cookieOf(desk), body: { code, isConfirmed: true } });
-  if (paired.status !== 200) throw new Error(`Pairing answered ${paired.status}`);
-  return { cookie, screenId };
-}
+const pairedWall = () => pairWall(house, desk, caseId);
 
 /** How long after `act` the condition held. */
 async function msUntil(act: () => Promise<unknown>, condition: () => boolean): Promise<number> {
