@@ -38,7 +38,8 @@ export function distalSegment(state: CaseState, nerve: Nerve, site: Site, channe
   const share = siteShare(record);
   const isBroken = !isUntested && share === 0;
   const onset = onsetText(record);
-  const isOlder = isUntested && record?.compared != null;
+  const { isDim } = nerveLineSite(state, nerve, site, channelId, nowMs);
+  const isOlder = (isUntested || isDim) && record?.compared != null;
   const findings = record?.compared?.findings ?? [];
   const priority = findingPriority(findings, state.incidents[nerve.id]);
   return {
@@ -52,7 +53,7 @@ export function distalSegment(state: CaseState, nerve: Nerve, site: Site, channe
     textPriority: isBroken ? priority : findingPriority(findingsOf(findings, 'time'), state.incidents[nerve.id]),
     isUntested,
     isNotCompared,
-    isDim: nerveLineSite(state, nerve, site, channelId, nowMs).isDim,
+    isDim,
     isBroken,
     isShort: false,
   };

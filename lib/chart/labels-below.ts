@@ -27,7 +27,7 @@ export interface LabelsBelow {
  * Velocities under their segments, and under them the age of each response at its site.
  *
  * Method: full words in one row or two; else short words in as many rows as it takes. No text is cut or left out; ages
- * are left out only when the caller asks for none, and never that of a response that is older.
+ * are left out only when the caller asks for none.
  *
  * @param view the nerve line; not modified
  * @param sizes its lengths
@@ -49,13 +49,10 @@ export function labelsBelow(view: NerveLineView, sizes: NerveLineSizes, toX: (po
       isBold: segment.textPriority !== null,
     }));
   const ages = view.sites.flatMap<Caption>((site) =>
-    (sizes.hasAges || site.isDim) && site.ageText !== null
+    sizes.hasAges && site.ageText !== null
       ? [{ key: `age-${site.siteId}`, role: 'age', x: toX(site.positionMm), text: `${site.ageText} ago`, tone: 'second', isBold: false }]
       : [],
   );
-  // A few ages beside the velocities cost the wall no row of its own.
-  const joint = sizes.hasAges ? null : captionRows([...segments(false), ...ages].toSorted((left, right) => left.x - right.x), sizes, 1);
-  if (joint?.isFitting === true) return below(joint, captionRows([], sizes, 1), sizes);
   const full = captionRows(segments(false), sizes, 2);
   const velocities = full.isFitting ? full : captionRows(segments(true), sizes, Infinity);
   return below(velocities, captionRows(ages, sizes, Infinity), sizes);

@@ -43,6 +43,8 @@ export function nerveLineSegment(state: CaseState, nerve: Nerve, proximal: Site,
   const isUntested = isNotCompared || !ends.every((end) => isTested(end, testedSince(state, nerve.id)));
   const amplitudeShare = ratio(siteShare(ends[0]), siteShare(ends[1]));
   const priority = segmentPriority(state, nerve.id, key, proximal, distal);
+  const isDimAt = [proximal, distal].map((site) => nerveLineSite(state, nerve, site, channelId, nowMs).isDim);
+  const isOlder = isDimAt.every(Boolean) || (segment !== undefined && [segment.proximalAt, segment.distalAt].every((at) => at < testedSince(state, nerve.id)));
   const isBroken = !isUntested && ends[0]?.compared?.reading.kind === 'absent' && amplitudeShare === 0;
   return {
     key,
@@ -50,12 +52,12 @@ export function nerveLineSegment(state: CaseState, nerve: Nerve, proximal: Site,
     toMm: distal.positionMm,
     amplitudeShare,
     velocityShare: velocityShare(segment),
-    ...(isBroken ? brokenText(ends[0]) : velocityText(segment, standingOf(segment, ends, testedSince(state, nerve.id)))),
+    ...(isBroken ? brokenText(ends[0]) : velocityText(segment, standingOf(segment, ends, isOlder))),
     priority,
     textPriority: isBroken ? priority : findingPriority(findingsOf(segment?.findings ?? [], 'time'), state.incidents[nerve.id]),
     isUntested,
     isNotCompared,
-    isDim: [proximal, distal].some((site) => nerveLineSite(state, nerve, site, channelId, nowMs).isDim),
+    isDim: isDimAt.some(Boolean),
     isBroken,
     isShort: distal.positionMm - proximal.positionMm < shortSegmentMm.value,
   };
@@ -66,13 +68,12 @@ function isTested(record: PathRecord | undefined, since: string): boolean {
 }
 
 /** Before the first baseline there is nothing to compare with, and nothing is older. */
-function standingOf(segment: SegmentJudgement | undefined, ends: readonly (PathRecord | undefined)[], since: string): Standing {
+function standingOf(segment: SegmentJudgement | undefined, ends: readonly (PathRecord | undefined)[], isOlder: boolean): Standing {
   if (segment === undefined || ends.some((end) => end?.lastNotCompared === 'no-baseline')) return 'current';
   const runAts = [segment.proximalAt, segment.distalAt];
-  if (runAts.every((at) => at < since)) return 'older';
   const notCompared = [0, 1].filter((index) => isLastNotCompared(ends[index]));
-  if (notCompared.length === 0) return 'current';
-  return notCompared.some((index) => ends[index]?.lastAt === runAts[index]) ? 'not-compared' : 'older';
+  if (notCompared.some((index) => ends[index]?.lastAt === runAts[index])) return 'not-compared';
+  return isOlder || notCompared.length > 0 ? 'older' : 'current';
 }
 
 function ratio(proximal: number | null, distal: number | null): number | null {

@@ -39,7 +39,7 @@ export function LeadBand({ line }: { readonly line: TheatreLine }) {
 function HighBand({ line }: { readonly line: TheatreLine }) {
   return (
     <section data-band="high" className="flex items-stretch text-(length:--needed)">
-      <div className="relative flex w-[calc(var(--headline)*2.1)] shrink-0 items-center justify-center">
+      <div className="relative flex shrink-0 items-center px-(--edge-room)">
         <PriorityMark kind="high" className="size-[calc(var(--headline)*1.2)]" />
         {line.isFlashing ? (
           <div className="flashes absolute inset-0 flex items-center justify-center bg-ink text-ground">
@@ -47,7 +47,7 @@ function HighBand({ line }: { readonly line: TheatreLine }) {
           </div>
         ) : null}
       </div>
-      <div className="min-w-0 flex-1 py-[0.8em] pr-(--edge-room) pl-[0.5em]">
+      <div className="min-w-0 flex-1 py-[0.8em] pr-(--edge-room)">
         <Words line={line} detailClassName="font-medium" />
       </div>
     </section>

@@ -82,6 +82,14 @@ describe('nerveLineView of what is not known', () => {
     expect(isDim(wristAt + 300_000)).toBe(false);
     expect(isDim(wristAt + 300_001)).toBe(true);
   });
+  it('says a velocity as what it was once both its runs are past the freshness limit', () => {
+    const { state } = ulnarStable();
+    const textsAt = (time: string) => lineAt(state, time).segments.map((segment) => segment.text);
+    // The runs are of 10:37:10, 10:38:00, 10:38:40 and 10:39:10: the first pair is past 5 min at 10:43:00.001.
+    expect(textsAt('10:43:00')).toEqual(['61\u00a0m/s', '53\u00a0m/s', '59\u00a0m/s', '2.90\u00a0ms']);
+    expect(textsAt('10:43:01')).toEqual(['was 61\u00a0m/s', '53\u00a0m/s', '59\u00a0m/s', '2.90\u00a0ms']);
+    expect(textsAt('10:44:11')).toEqual(['was 61\u00a0m/s', 'was 53\u00a0m/s', 'was 59\u00a0m/s', 'was 2.90\u00a0ms']);
+  });
   it('shows the amplitude itself before there is anything to compare with', () => {
     const line = lineAt(ulnarMonitored().state, '09:53:00');
     expect(line.sites.map((site) => site.text)).toEqual(['8.7\u00a0mV', '9.0\u00a0mV', '9.2\u00a0mV', '9.4\u00a0mV']);
