@@ -4,7 +4,7 @@ import { runTimers } from '@/server/commands/run-timers';
 
 import { caseWithNotice } from './house/case-with-notice';
 import { openSecondServer, type SecondServer } from './house/second-server';
-import { commit, planCaseAs, runCommand } from './house/client';
+import { commit, planCaseAs } from './house/client';
 import { appendNewerEntry } from './house/newer-entry';
 import { openTestHouse, type TestHouse } from './house/open-test-house';
 
