@@ -7,6 +7,7 @@ import {
   commandReplySchema,
   entriesReplySchema,
   pairScreenReplySchema,
+  peopleReplySchema,
   screenReplySchema,
   sessionReplySchema,
   type CaseHeadReply,
@@ -15,6 +16,7 @@ import {
   type EntriesReply,
   type PairScreenReply,
   type PairScreenRequest,
+  type PeopleReply,
   type ScreenReply,
   type SessionReply,
 } from '@/lib/contracts/http/replies';
@@ -31,6 +33,9 @@ export const readSession = (question?: Pick<Question, 'timeoutMs'>): Promise<Ses
 
 /** The cases of this person. */
 export const readCases = (): Promise<CaseListReply> => askServer('/api/cases', caseListReplySchema);
+
+/** People whom this person can choose for the team of a case. */
+export const readPeople = (): Promise<PeopleReply> => askServer('/api/people', peopleReplySchema);
 
 /** Plans a new case; send the same command id again after "no answer". */
 export const planCase = (request: PlanCaseRequest): Promise<CommandReply> =>

@@ -4,6 +4,7 @@ import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import { ulnarAtElbow } from '@/lib/reference/templates/ulnar-at-elbow';
 import { launchChromium } from '@/tests/support/chromium';
 import { DeskPerson } from '@/tests/support/desk-person';
+import { alertCase, stableCase } from '@/tests/support/followed-cases';
 import { HttpDesk } from '@/tests/support/http-desk';
 import { startProduct, type Product } from '@/tests/support/start-product';
 import { chooseTheme } from '@/tests/support/theme-cookie';
@@ -89,6 +90,25 @@ describe.each(themes)('in the theme "%s"', (theme) => {
     expect(found.filter(([, violations]) => violations.length > 0)).toEqual([]);
     await desk.close();
   });
+});
+
+test.each(themes)('the physician’s pages, several cases, quiet and with an alert, in the theme "%s": 0', async (theme) => {
+  const [alert, stable] = [await alertCase(product), await stableCase(product)];
+  const physician = await DeskPerson.openSignedIn(browser, product.url, 'physician@demo.example');
+  await chooseTheme(physician.watched.context, product.url, theme);
+  const found: (readonly [string, readonly string[]])[] = [];
+  const look = async (name: string) => void found.push([name, await axeViolations(physician.page)]);
+  await physician.goTo('/today');
+  await physician.page.getByText('Not told yet').first().waitFor();
+  await look('today');
+  for (const http of [alert, stable]) {
+    await physician.goTo(`/cases/${http.caseId}/follow`);
+    await physician.page.getByText('Live', { exact: true }).waitFor();
+    await look('follow');
+  }
+  expect(found.filter(([, violations]) => violations.length > 0)).toEqual([]);
+  expect(physician.watched.errors()).toEqual([]);
+  await physician.close();
 });
 
 test('every state of the wall in both themes: 0', async () => {

@@ -14,7 +14,7 @@ export function usePlanCase() {
   const [problem, setProblem] = useState<string | null>(null);
   const [isSending, setIsSending] = useState(false);
 
-  const send = async (planned: Pick<PlanCaseRequest, 'plan' | 'identity' | 'hospitalId'>) => {
+  const send = async (planned: Pick<PlanCaseRequest, 'plan' | 'identity' | 'hospitalId' | 'team'>) => {
     const bytes = JSON.stringify(planned);
     if (attempt.current === null || bytes !== sentBytes.current) {
       attempt.current = { commandId: uuidv7(), eventAt: new Date(serverNowMs()).toISOString() };
