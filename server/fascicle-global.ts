@@ -7,6 +7,7 @@ import type {
   FailureReply,
   PairScreenReply,
   PairScreenRequest,
+  PeopleReply,
   ScreenReply,
   SessionReply,
 } from '@/lib/contracts/http/replies';
@@ -16,6 +17,8 @@ import type { SignInReply, SignInRequest } from '@/server/auth/sign-in-reply';
 /** Where a request came from. `address` is the socket's, set by the server itself. */
 export interface RequestSource {
   readonly cookie: string | null;
+  /** The Authorization header of a program; null for a browser. */
+  readonly authorization: string | null;
   readonly address: string;
 }
 
@@ -34,6 +37,7 @@ export interface CommandDoors {
 /** Questions that routes and pages may ask. */
 export interface QueryDoors {
   session: { input: Record<string, never>; answer: SessionReply };
+  people: { input: Record<string, never>; answer: PeopleReply };
   cases: { input: Record<string, never>; answer: CaseListReply };
   'case-access': { input: { caseId: string }; answer: { readonly caseId: string } };
   'case-head': { input: { caseId: string }; answer: CaseHeadReply };

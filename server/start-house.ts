@@ -61,9 +61,10 @@ export function startHouse(parts: { settings: Settings; log: Logger; httpServer:
   const timers = everySecond(async () => void (await runTimers(context)), (cause) => log.warn({ err: cause }, 'Timers of open cases did not run; the next second tries again.'));
   const removing = atOnceAndEveryHour(() => removeOldRows(context), (cause) => log.warn({ err: cause }, 'Old rows were not removed; the next hour tries again.'));
   const loop = watchEventLoop();
+  const tokenLimit = makeRateLimit({ perSecond: 200, burst: 400, nowMs: context.nowMs });
   const pairingLimit = makeRateLimit({ perSecond: 0.2, burst: 20, nowMs: context.nowMs });
   return {
-    fascicle: makeFascicle({ context, presence, loop, pairingLimit }),
+    fascicle: makeFascicle({ context, presence, loop, pairingLimit, tokenLimit }),
     async stop() {
       timers.stop();
       removing.stop();

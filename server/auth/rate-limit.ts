@@ -1,5 +1,6 @@
 /** A bucket of tokens for each key: so many at once, and so many more each second. */
 export interface RateLimit {
+  readonly perSecond: number;
   /** Takes one token; false when the bucket is empty. */
   take(key: string): boolean;
   forget(key: string): void;
@@ -14,6 +15,7 @@ interface Bucket {
 export function makeRateLimit(options: { perSecond: number; burst: number; nowMs: () => number; mostKeys?: number }): RateLimit {
   const buckets = new Map<string, Bucket>();
   return {
+    perSecond: options.perSecond,
     take(key) {
       const nowMs = options.nowMs();
       const before = buckets.get(key) ?? { tokens: options.burst, atMs: nowMs };

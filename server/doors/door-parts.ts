@@ -11,6 +11,8 @@ export interface DoorParts {
   readonly loop: EventLoopWatch;
   /** How often a machine may ask for a pairing code, and a person may try one. */
   readonly pairingLimit: RateLimit;
+  /** How often one token of a program may ask. */
+  readonly tokenLimit: RateLimit;
 }
 
 /** One door: from an input and its source to an answer, with cookies to set where there are any. */

@@ -1,4 +1,4 @@
-import { requireSession } from '@/server/auth/read-session';
+import { whoAsks } from '@/server/auth/who-asks';
 import type { Door } from '@/server/doors/door-parts';
 import { failure } from '@/server/failure';
 import type { QueryDoors } from '@/server/fascicle-global';
@@ -8,18 +8,20 @@ import { caseHead } from '@/server/queries/case-head';
 import { casesForActor } from '@/server/queries/cases-for-actor';
 import { demoPeople } from '@/server/queries/demo-people';
 import { health } from '@/server/queries/health';
+import { peopleForPlanning } from '@/server/queries/people-for-planning';
 import { screenStatus } from '@/server/queries/screen-status';
 import { screensOfCase } from '@/server/queries/screens-of-case';
 import { sessionForActor } from '@/server/queries/session-for-actor';
 
 /** Every question that a route or a page may ask. */
 export const queryDoors: { readonly [Name in keyof QueryDoors]: Door<QueryDoors[Name]['input'], QueryDoors[Name]['answer']> } = {
-  session: async ({ context }, _input, { cookie }) => sessionForActor(context, await requireSession(context, cookie)),
-  cases: async ({ context }, _input, { cookie }) => casesForActor(context, await requireSession(context, cookie)),
-  'case-access': async ({ context }, { caseId }, { cookie }) => caseAccess(context, await requireSession(context, cookie), caseId),
-  'case-head': async ({ context }, { caseId }, { cookie }) => caseHead(context, await requireSession(context, cookie), caseId),
-  'case-entries': async ({ context }, asked, { cookie }) => caseEntries(context, (await requireSession(context, cookie)).actor, asked),
-  screens: async ({ context, presence }, { caseId }, { cookie }) => screensOfCase(context, presence, await requireSession(context, cookie), caseId),
+  session: async (parts, _input, source) => sessionForActor(parts.context, await whoAsks(parts, source)),
+  people: async (parts, _input, source) => peopleForPlanning(parts.context, await whoAsks(parts, source)),
+  cases: async (parts, _input, source) => casesForActor(parts.context, await whoAsks(parts, source)),
+  'case-access': async (parts, { caseId }, source) => caseAccess(parts.context, await whoAsks(parts, source), caseId),
+  'case-head': async (parts, { caseId }, source) => caseHead(parts.context, await whoAsks(parts, source), caseId),
+  'case-entries': async (parts, asked, source) => caseEntries(parts.context, (await whoAsks(parts, source)).actor, asked),
+  screens: async (parts, { caseId }, source) => screensOfCase(parts.context, parts.presence, await whoAsks(parts, source), caseId),
   screen: async ({ context }, _input, { cookie }) => {
     const status = await screenStatus(context, cookie);
     if (status === null) throw failure('not-found', 'no-screen', 'Not asked: this screen has no pairing code, or it is older than 10 min. Ask for a new one.');

@@ -4,7 +4,7 @@ import { addressHeader } from '@/server/http/address-header';
 
 /** Where a request came from, as this server itself noted it. */
 export function sourceOf(headers: Pick<Headers, 'get'>): RequestSource {
-  return { cookie: headers.get('cookie'), address: headers.get(addressHeader) ?? 'unknown' };
+  return { cookie: headers.get('cookie'), authorization: headers.get('authorization'), address: headers.get(addressHeader) ?? 'unknown' };
 }
 
 /** Runs a route and writes its answer. A body that the contract refuses is an answer too. */

@@ -1,6 +1,7 @@
 import type { IncomingHttpHeaders } from 'node:http';
 
 import type { FailureReply } from '@/lib/contracts/http/replies';
+import { isBearer } from '@/server/auth/access-token';
 import type { AllowedOrigins } from '@/server/http/allowed-origins';
 
 /** Largest body of a request, in bytes: a whole plan is under a third of it (house rule). */
@@ -30,7 +31,12 @@ export function guardRequest(request: GuardedRequest, allowed: AllowedOrigins): 
   if (!isApi || !['POST', 'DELETE'].includes(request.method)) {
     return refusal(405, 'wrong-method', `Wrong method: ${shown(request.method)} is not allowed here.`);
   }
-  return originRefusal(request.headers, allowed) ?? bodyRefusal(request);
+  return (isFromProgram(request) ? null : originRefusal(request.headers, allowed)) ?? bodyRefusal(request);
+}
+
+/** A program with a token has no page; no other site can make a browser send that header without asking first, which is refused. */
+function isFromProgram({ path, headers }: GuardedRequest): boolean {
+  return isBearer(headers.authorization) && headers.origin === undefined && !path.startsWith('/api/auth/');
 }
 
 /** A write must say where it comes from, and it must be one of our own pages. */

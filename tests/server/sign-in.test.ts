@@ -19,7 +19,7 @@ beforeEach(async () => {
   await house.admin('people').update({ second_factor_step: -1 });
 });
 
-const source = { cookie: null, address: '192.0.2.7' };
+const source = { cookie: null, authorization: null, address: '192.0.2.7' };
 const signIn = (email: string, password: string, code: string, address = source.address) =>
   globalThis.fascicle.execute('sign-in', { email, password, code }, { ...source, address });
 

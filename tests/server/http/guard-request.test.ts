@@ -46,6 +46,21 @@ describe('what the guard lets through', () => {
     expect((await raw('POST', '/api/screen', { ...write, origin: house.url }, '{}')).status).toBe(200);
   });
 
+  test('a write of a program without an origin, but none at the sign-in, none with another scheme, and none from a foreign page', async () => {
+    const authorization = `Bearer fascicle_${'A'.repeat(43)}`;
+    const passed = await raw('POST', '/api/cases', { ...write, authorization }, '{}');
+    expect([passed.status, JSON.parse(passed.body)]).toEqual([400, expect.objectContaining({ code: 'bad-request' })]);
+    const refused = [
+      ['/api/auth/callback/credentials', { authorization, 'content-type': 'application/x-www-form-urlencoded' }, 'no-origin'],
+      ['/api/cases', { authorization: 'Basic eDp5' }, 'no-origin'],
+      ['/api/cases', { authorization, origin: 'https://evil.example' }, 'foreign-origin'],
+    ] as const;
+    for (const [path, headers, code] of refused) {
+      const { status, body } = await raw('POST', path, { ...write, ...headers }, '{}');
+      expect([path, status, JSON.parse(body)]).toEqual([path, 400, expect.objectContaining({ code })]);
+    }
+  });
+
   test('no host but its own', async () => {
     for (const host of ['evil.example', '127.0.0.1', '127.0.0.1:1']) expect([host, (await raw('GET', '/api/health', { host })).status]).toEqual([host, 400]);
     expect((await raw('GET', '/api/health', { host: `localhost:${new URL(house.url).port}` })).status).toBe(200);

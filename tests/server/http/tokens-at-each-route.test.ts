@@ -6,11 +6,12 @@ import { openTestHouse, type TestHouse } from '@/tests/server/house/open-test-ho
 import { tokenOf } from '@/tests/server/machine/token-of';
 
 const desk = 'desk@demo.example';
+const logLines: string[] = [];
 let house: TestHouse;
 let caseId: string;
 
 beforeAll(async () => {
-  house = await openTestHouse();
+  house = await openTestHouse({ logLines });
   caseId = await planCaseAs(house, desk);
 });
 afterAll(() => house.close());
@@ -55,6 +56,26 @@ describe('every route for programs', () => {
       expect([operation.operationId, status]).toEqual([operation.operationId, operation.isOpen ? 200 : 401]);
     }
   });
+});
+
+test('a token beside a good cookie does not give password and code again', async () => {
+  const { token } = await tokenOf(house, desk);
+  const headers = { authorization: `Bearer ${token}`, cookie: await house.cookieOf(desk), 'content-type': 'application/json' };
+  const answer = await fetch(`${house.url}/api/reauthenticate`, { method: 'POST', headers, body: JSON.stringify({ password: 'x', code: '1' }) });
+  expect([answer.status, await answer.json()]).toEqual([401, expect.objectContaining({ code: 'not-with-a-token', message: expect.stringMatching(/^Not with a token: /) })]);
+});
+
+test('a log line says what was asked with which token, and never the token', async () => {
+  const { id, token } = await tokenOf(house, desk);
+  await fetch(`${house.url}/api/people`, { headers: { authorization: `Bearer ${token}` } });
+  const lines = logLines.filter((line) => line.includes(id)).map((line) => JSON.parse(line) as object);
+  expect(lines).toEqual([expect.objectContaining({ door: 'people', tokenId: id })]);
+  expect(logLines.join('')).not.toContain(token);
+});
+
+test('an Authorization of another scheme, as a proxy asks it of browsers, leaves the session what it is', async () => {
+  const answer = await fetch(`${house.url}/api/session`, { headers: { authorization: 'Basic eDp5', cookie: await house.cookieOf(desk) } });
+  expect(answer.status).toBe(200);
 });
 
 test('what was done with a token is audited as done by its person', async () => {

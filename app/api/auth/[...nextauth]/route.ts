@@ -34,7 +34,7 @@ const options: NextAuthOptions = {
   events: {
     async signOut({ token }) {
       const sessionId: unknown = token['sessionId'];
-      if (typeof sessionId === 'string') await globalThis.fascicle.execute('sign-out', { sessionId }, { cookie: null, address: 'own' });
+      if (typeof sessionId === 'string') await globalThis.fascicle.execute('sign-out', { sessionId }, { cookie: null, authorization: null, address: 'own' });
     },
   },
   logger: { error: () => undefined, warn: () => undefined, debug: () => undefined },
