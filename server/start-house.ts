@@ -3,6 +3,7 @@ import type { Logger } from 'pino';
 
 import { makeDatabase } from '@/db/connection';
 import { makeListener } from '@/db/listener';
+import { apiLimits } from '@/lib/contracts/http/api-limits';
 import { makeRateLimit } from '@/server/auth/rate-limit';
 import { removeOldRows } from '@/server/commands/remove-old-rows';
 import { runTimers } from '@/server/commands/run-timers';
@@ -61,7 +62,7 @@ export function startHouse(parts: { settings: Settings; log: Logger; httpServer:
   const timers = everySecond(async () => void (await runTimers(context)), (cause) => log.warn({ err: cause }, 'Timers of open cases did not run; the next second tries again.'));
   const removing = atOnceAndEveryHour(() => removeOldRows(context), (cause) => log.warn({ err: cause }, 'Old rows were not removed; the next hour tries again.'));
   const loop = watchEventLoop();
-  const tokenLimit = makeRateLimit({ perSecond: 200, burst: 400, nowMs: context.nowMs });
+  const tokenLimit = makeRateLimit({ perSecond: apiLimits.requestsPerSecond, burst: apiLimits.requestsAtOnce, nowMs: context.nowMs });
   const pairingLimit = makeRateLimit({ perSecond: 0.2, burst: 20, nowMs: context.nowMs });
   return {
     fascicle: makeFascicle({ context, presence, loop, pairingLimit, tokenLimit }),

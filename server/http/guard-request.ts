@@ -1,11 +1,12 @@
 import type { IncomingHttpHeaders } from 'node:http';
 
+import { apiLimits } from '@/lib/contracts/http/api-limits';
 import type { FailureReply } from '@/lib/contracts/http/replies';
 import { isBearer } from '@/server/auth/access-token';
 import type { AllowedOrigins } from '@/server/http/allowed-origins';
 
-/** Largest body of a request, in bytes: a whole plan is under a third of it (house rule). */
-export const largestBodyBytes = 65_536;
+/** Largest body of a request, in bytes. */
+export const largestBodyBytes = apiLimits.bodyBytes;
 
 /** Why a request is not passed on. */
 export interface GuardRefusal {

@@ -1,5 +1,6 @@
 import { entriesAfter } from '@/db/repositories/entries/entries-after';
 import { headOf } from '@/db/repositories/entries/head-of';
+import { apiLimits } from '@/lib/contracts/http/api-limits';
 import type { EntriesReply, WireEntry } from '@/lib/contracts/http/replies';
 import { wallEntry } from '@/lib/contracts/channel/wall-entry';
 import { EMPTY_HEAD } from '@/lib/record/entry';
@@ -8,7 +9,7 @@ import { openCase, type Visitor } from '@/server/queries/open-case';
 import type { ServerContext } from '@/server/server-context';
 
 /** Largest page of a log, in entries. */
-export const largestPage = 500;
+export const largestPage = apiLimits.pageEntries;
 
 /** Which page of which log. */
 export interface PageAsked {

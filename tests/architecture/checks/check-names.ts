@@ -57,6 +57,7 @@ export const startedPrograms: Readonly<Record<string, string>> = {
   'server/setup/database/run-migrations.ts': 'started by migrate-database.ts',
   'server/setup/psql.ts': 'npm run psql',
   'server/auth/print-code.ts': 'npm run code',
+  'server/auth/print-token.ts': 'npm run token',
 };
 
 /**

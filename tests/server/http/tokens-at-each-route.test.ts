@@ -1,6 +1,7 @@
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 
 import { apiTable, type ApiOperation } from '@/lib/contracts/http/api-table';
+import { openapiDocument } from '@/lib/contracts/http/openapi-document';
 import { envelope, planCaseAs, planRequest, runCommand } from '@/tests/server/house/client';
 import { openTestHouse, type TestHouse } from '@/tests/server/house/open-test-house';
 import { tokenOf } from '@/tests/server/machine/token-of';
@@ -9,6 +10,7 @@ const desk = 'desk@demo.example';
 const logLines: string[] = [];
 let house: TestHouse;
 let caseId: string;
+const described = openapiDocument().paths as Record<string, Record<string, { responses: Record<string, unknown> }>>;
 
 beforeAll(async () => {
   house = await openTestHouse({ logLines });
@@ -22,10 +24,13 @@ const bodies: Readonly<Record<string, () => object>> = {
   PairScreenRequest: () => ({ code: 'AAAAAA', isConfirmed: false }),
 };
 
-function ask({ method, path, request }: ApiOperation, headers: Record<string, string>): Promise<Response> {
+/** Asks, and holds the status of the answer against the description. */
+async function ask({ method, path, request }: ApiOperation, headers: Record<string, string>): Promise<Response> {
   const address = house.url + path.replace('{caseId}', caseId).replace('{screenId}', '0192f0c1-0000-7000-8000-000000000000');
   const body = request === null ? null : JSON.stringify(bodies[request]?.());
-  return fetch(address, { method: method.toUpperCase(), body, headers: { ...(body === null ? {} : { 'content-type': 'application/json' }), ...headers } });
+  const answer = await fetch(address, { method: method.toUpperCase(), body, headers: { ...(body === null ? {} : { 'content-type': 'application/json' }), ...headers } });
+  expect(Object.keys(described[path]?.[method]?.responses ?? {})).toContain(String(answer.status));
+  return answer;
 }
 
 const operations = apiTable.filter(({ isOpen }) => !isOpen).map((operation) => [operation.operationId, operation] as const);
