@@ -3,7 +3,7 @@ import { createHash } from 'node:crypto';
 import { acceptSecondFactorStep } from '@/db/repositories/people/accept-second-factor-step';
 import type { Credentials } from '@/db/repositories/people/credentials';
 import { beginAttempt, noteSuccess } from '@/db/repositories/sign-in/begin-attempt';
-import { isPasswordRight } from '@/server/auth/password';
+import { isPasswordRight } from '@/server/auth/is-password-right';
 import { stepOfCode } from '@/server/auth/second-factor';
 import { failure } from '@/server/failure';
 import type { ServerContext } from '@/server/server-context';

@@ -1,7 +1,7 @@
 import type { LiveSession } from '@/db/repositories/sessions/find-live-session';
 import { findLiveSession } from '@/db/repositories/sessions/find-live-session';
 import type { Actor, Role } from '@/lib/policy/actor';
-import { sessionIdOf } from '@/server/auth/session-cookie';
+import { sessionIdOf } from '@/server/auth/session-id-of';
 import { notSignedIn } from '@/server/failure';
 import type { ServerContext } from '@/server/server-context';
 

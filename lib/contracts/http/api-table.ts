@@ -1,5 +1,6 @@
 import { z } from 'zod';
 
+import { apiLimits } from '@/lib/contracts/http/api-limits';
 import { healthReplySchema, screensReplySchema } from '@/lib/contracts/http/account';
 import { commandRequestSchema, planCaseRequestSchema } from '@/lib/contracts/http/commands';
 import {
@@ -21,7 +22,7 @@ export const apiShapes = {
   CommandRequest: commandRequestSchema,
   PairScreenRequest: pairScreenRequestSchema,
   Entry: wireEntrySchema,
-  CommandReply: commandReplySchema,
+  CommittedReply: commandReplySchema.options[0],
   EntriesReply: entriesReplySchema,
   CaseListReply: caseListReplySchema,
   CaseHeadReply: caseHeadReplySchema,
@@ -48,7 +49,7 @@ export interface ApiOperation {
   readonly query: Readonly<Record<string, { readonly words: string; readonly schema: z.ZodType }>>;
   /** Answers nobody in particular: no token is needed. */
   readonly isOpen: boolean;
-  /** A command may be refused by the state of its case: 409 with the refusal. */
+  /** May be refused by how things stand, as a command by the state of its case: 409 with the reason. */
   readonly mayConflict: boolean;
 }
 
@@ -63,7 +64,7 @@ export const apiTable: readonly ApiOperation[] = [
   { ...read, operationId: 'readSession', path: '/api/session', summary: 'Whose token this is, in which hospitals, with which theatres', reply: 'SessionReply' },
   { ...read, operationId: 'listPeople', path: '/api/people', summary: 'People of the hospitals where this person plans, to choose a team from', reply: 'PeopleReply' },
   { ...read, operationId: 'listCases', path: '/api/cases', summary: 'The cases this person may see, open ones first', reply: 'CaseListReply' },
-  { ...write, operationId: 'planCase', path: '/api/cases', summary: 'Plans a case; the same command id gives the same case again', request: 'PlanCaseRequest', reply: 'CommandReply', mayConflict: true },
+  { ...write, operationId: 'planCase', path: '/api/cases', summary: 'Plans a case; the same command id gives the same case again', request: 'PlanCaseRequest', reply: 'CommittedReply', mayConflict: true },
   { ...read, operationId: 'readCase', path: '/api/cases/{caseId}', summary: 'What is not in the log: hospital, time zone, own role, patient label where the role may read it', reply: 'CaseHeadReply' },
   {
     ...read,
@@ -73,7 +74,7 @@ export const apiTable: readonly ApiOperation[] = [
     reply: 'EntriesReply',
     query: {
       after: { words: 'Number of the last entry held; 0 for the beginning', schema: z.int().min(0) },
-      limit: { words: 'Most entries of this page', schema: z.int().min(1).max(500) },
+      limit: { words: 'Most entries of this page', schema: z.int().min(1).max(apiLimits.pageEntries) },
     },
   },
   {
@@ -82,11 +83,11 @@ export const apiTable: readonly ApiOperation[] = [
     path: '/api/cases/{caseId}/commands',
     summary: 'Logs a run, a condition, a step, the handling of an alert: answered after its commit. Event times may lie in the past, back to the planning of the case. Sending the same command id again is harmless',
     request: 'CommandRequest',
-    reply: 'CommandReply',
+    reply: 'CommittedReply',
     mayConflict: true,
   },
   { ...read, operationId: 'listScreens', path: '/api/cases/{caseId}/screens', summary: 'Theatre screens that are or were bound to the case', reply: 'ScreensReply' },
-  { ...write, operationId: 'pairScreen', path: '/api/cases/{caseId}/screens', summary: 'Binds a theatre screen by its code: first asked, then confirmed after its two words were compared aloud', request: 'PairScreenRequest', reply: 'PairScreenReply' },
+  { ...write, operationId: 'pairScreen', path: '/api/cases/{caseId}/screens', summary: 'Binds a theatre screen by its code: first asked, then confirmed after its two words were compared aloud', request: 'PairScreenRequest', reply: 'PairScreenReply', mayConflict: true },
   { ...write, method: 'delete', operationId: 'revokeScreen', path: '/api/cases/{caseId}/screens/{screenId}', summary: 'Takes a theatre screen off the case', request: null, reply: 'ScreensReply' },
   { ...read, operationId: 'readHealth', path: '/api/health', summary: 'Whether the product can do its work now', reply: 'HealthReply', isOpen: true },
 ];

@@ -1,17 +1,21 @@
 import { z } from 'zod';
 
 import { contractVersion } from '@/lib/contracts/contract-version';
+import { apiLimits } from '@/lib/contracts/http/api-limits';
 import { apiShapes, apiTable, type ApiOperation, type ApiShape } from '@/lib/contracts/http/api-table';
 
 const caution =
   'Fascicle is an aid for qualified staff, not a certified medical device. It states findings and never says what to do. Local protocols and licensed judgement come first. ' +
   'A program that logs runs is answerable for what it logs like the person whose token it carries; nothing that was logged can be removed, only corrected.';
 
+const limits = `Limits: ${apiLimits.requestsPerSecond} requests a second and ${apiLimits.requestsAtOnce} at once for one token, ${apiLimits.bodyBytes} bytes in a body, ${apiLimits.pageEntries} entries in a page of a log, ${apiLimits.listedCases} cases in a list. Times are RFC 3339 in UTC with milliseconds; an event may lie in the past, back to the planning of its case, and 2 s ahead at most.`;
+
 const failures: Readonly<Record<number, string>> = {
   400: 'Something in the request is wrong: which field, which value, what is allowed. Nothing was changed',
   401: 'No token, or one that is wrong, expired or revoked',
   404: 'There is no such thing for this person',
-  413: 'The body is larger than 64 KiB',
+  411: 'The length of the body was not told before it was sent',
+  413: `The body is larger than ${apiLimits.bodyBytes} bytes`,
   429: 'Too many requests; the sentence says how many are allowed',
   503: 'Not saved: the database did not answer. It is safe to send the same again',
 };
@@ -28,7 +32,7 @@ const failures: Readonly<Record<number, string>> = {
 export function openapiDocument() {
   return {
     openapi: '3.1.0',
-    info: { title: 'Fascicle', version: String(contractVersion), description: caution },
+    info: { title: 'Fascicle', version: String(contractVersion), description: `${caution} ${limits}` },
     servers: [{ url: '/' }],
     security: [{ token: [] }],
     paths: paths(),
@@ -57,7 +61,7 @@ function described({ operationId, path, summary, request, reply, query, isOpen, 
   const parts = [...path.matchAll(/\{(\w+)\}/g)].map(([, name]) => ({ name, in: 'path', required: true, schema: { type: 'string', format: 'uuid' } }));
   const words = Object.entries(query).map(([name, part]) => ({ name, in: 'query', description: part.words, schema: plain(z.toJSONSchema(part.schema)) }));
   const failing = Object.entries(failures).filter(([status]) => !isOpen || status === '503');
-  const conflict = { 409: { description: 'The state of the case does not allow it, with the reason. Nothing was changed', content: json(reply) } };
+  const conflict = { 409: { description: 'It cannot be done as things stand, with the reason. Nothing was changed', content: json('FailureReply') } };
   return {
     operationId,
     summary,
