@@ -13,6 +13,7 @@ import { launchChromium } from '@/tests/support/chromium';
 import { DeskPerson } from '@/tests/support/desk-person';
 import { takeSession } from '@/tests/support/demo-session';
 import { HttpDesk } from '@/tests/support/http-desk';
+import { shootRecord } from '@/tests/support/shoot-record';
 import { buildForTests, root } from '@/tests/support/product-build';
 import { startProduct, type Product } from '@/tests/support/start-product';
 import { chooseTheme } from '@/tests/support/theme-cookie';
@@ -197,6 +198,7 @@ const browser = await launchChromium();
 try {
   if (wants('desk')) await shootDesk(browser, product);
   if (wants('wall')) await shootWall(browser, product);
+  if (wants('record')) await shootRecord(browser, product, folder);
   if (wants('today')) await shootToday(browser, product, folder, shoot);
 } finally {
   await browser.close();

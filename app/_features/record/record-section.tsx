@@ -14,10 +14,10 @@ export function RecordSection({ id, heading, children, isComputed = false, aside
   return (
     <section id={id} aria-labelledby={`${id}-heading`} tabIndex={-1} className="record-section mt-10 scroll-mt-4 outline-none">
       <div className="mb-3 flex flex-wrap items-end justify-between gap-x-6 gap-y-2 border-t border-ink pt-3">
-        <h2 id={`${id}-heading`} className="text-xl font-bold">
-          {heading}
-          {isComputed ? <span className="ml-3 text-sm font-normal text-second">Computed from the entries</span> : null}
-        </h2>
+        <div className="flex flex-wrap items-baseline gap-x-3">
+          <h2 id={`${id}-heading`} className="text-xl font-bold">{heading}</h2>
+          {isComputed ? <p className="text-sm text-second">Computed from the entries</p> : null}
+        </div>
         {aside}
       </div>
       {children}
