@@ -59,11 +59,18 @@ export function deskWords({ deskConnected, deskSince, timeZone, isLive }: Pick<T
   return deskSince === null ? words : `${words} since ${clockTime(deskSince, timeZone)}`;
 }
 
-/** Who else has the case open. @returns "Surgeon, supervising physician connected" without a full stop @source product rule: presence is shown */
-export function connectedWords({ peopleConnected, viewer, isLive }: Pick<TodayContext, 'peopleConnected' | 'viewer' | 'isLive'>): string {
+/**
+ * Who has the case open besides the one who looks and the one at the desk, of whom `deskWords` speaks.
+ * @returns "Surgeon, supervising physician connected" without a full stop
+ * @source product rule: presence is shown
+ * @accuracy exact; tests/lib/text/today-line.test.ts
+ */
+export function connectedWords({ peopleConnected, deskConnected, viewer, isLive }: Pick<TodayContext, 'peopleConnected' | 'deskConnected' | 'viewer' | 'isLive'>): string {
   if (!isLive) return 'Who is connected not known';
-  const others = new Map(peopleConnected.filter(({ personId }) => personId !== viewer.personId).map(({ personId, displayName }) => [personId, displayName]));
-  return others.size === 0 ? 'Nobody else connected' : `${[...others.values()].join(', ')} connected`;
+  const others = new Map(peopleConnected.filter(({ personId }) => personId !== viewer.personId).map((person) => [person.personId, person]));
+  const atDesk = deskConnected ? [...others.values()].find(({ role }) => role === 'neurophysiologist') : undefined;
+  const names = [...others.values()].filter((person) => person !== atDesk).map(({ displayName }) => displayName);
+  return names.length === 0 ? 'Nobody else connected' : `${names.join(', ')} connected`;
 }
 
 function forWords(at: string, { nowMs, timeZone, isLive }: Context): string {

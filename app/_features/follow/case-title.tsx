@@ -20,7 +20,7 @@ export function CaseTitle() {
       <StatusDot isOn={isLive}>{isLive ? 'Live' : `Not live since ${clockTime(feed.checkedAt ?? state.phaseAt, timeZone, { seconds: true })}`}</StatusDot>
       <StatusDot isOn={isLive && feed.deskConnected}>{deskWords({ ...feed, timeZone, isLive })}</StatusDot>
       <span className="text-second">{isLive ? wallWords(feed.wallsConnected) : 'Wall not known'}</span>
-      <span className="text-second">{connectedWords({ peopleConnected: feed.peopleConnected, viewer, isLive })}</span>
+      <span className="text-second">{connectedWords({ ...feed, viewer, isLive })}</span>
       {state.status === 'closed' ? <Link href={`/cases/${caseId}/record`} className="font-semibold text-stain underline underline-offset-4">Record</Link> : null}
     </header>
   );

@@ -28,7 +28,7 @@ function Course({ incident }: { readonly incident: Incident }) {
     <article className="py-1.5">
       <h3 className="font-semibold">{`${name}: ${incidentHeadline(state, incident)}, for ${durationWords(nowMs - msOfMoment(incident.raisedAt))}`}</h3>
       {incident.action === null ? null : <p className="text-second">{`Surgeon’s action: ${incident.action}`}</p>}
-      <dl className="mt-1 grid grid-cols-[repeat(auto-fill,minmax(8.5em,1fr))] gap-x-4 gap-y-1">
+      <dl className="mt-1 grid grid-cols-[repeat(auto-fill,minmax(7.2em,1fr))] gap-x-4 gap-y-1">
         {alertTimes(state, incident, timeZone).map((moment) => (
           <div key={moment.name}>
             <dt className="text-[0.9em] text-second">{moment.name}</dt>

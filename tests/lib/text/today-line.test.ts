@@ -111,6 +111,15 @@ describe('todayLine', () => {
     expect(line.people).toBe('Surgeon connected');
   });
 
+  it('speaks of the one at the desk once, and of a relief beside them', () => {
+    const since = clock('10:00');
+    const desk = { personId: 'person-1', role: 'neurophysiologist', displayName: 'Neurophysiologist', since };
+    const relief = { ...desk, personId: 'person-2', displayName: 'Relief' };
+    expect(lineOf(stable(), { peopleConnected: [desk] }).people).toBe('Nobody else connected');
+    expect(lineOf(stable(), { peopleConnected: [desk, relief] }).people).toBe('Relief connected');
+    expect(lineOf(stable(), { peopleConnected: [desk], deskConnected: false }).people).toBe('Neurophysiologist connected');
+  });
+
   it('says that nothing is monitored before the baseline, with no test yet', () => {
     expect(lineOf(openedCase())).toMatchObject({ need: 'not-monitored', isCalm: false, headline: 'Set-up', tested: 'Not tested yet' });
   });
