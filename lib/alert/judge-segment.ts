@@ -1,39 +1,13 @@
 import type { Finding, NoVelocityReason, SegmentJudgement } from '@/lib/alert/judgement';
 import type { RuleSet } from '@/lib/alert/rule-set';
-import { amplitudeChange } from '@/lib/change/amplitude-change';
-import { amplitudeRatio } from '@/lib/change/amplitude-ratio';
+import type { SegmentPairInput } from '@/lib/alert/segment-pair';
+import { hasFallen, ratioChangeOf } from '@/lib/alert/ratio-fall';
 import { isBeyondNoise } from '@/lib/change/is-beyond-noise';
 import { segmentTimeChange } from '@/lib/change/segment-time-change';
 import { shortSegmentMm } from '@/lib/conduction/short-segment-mm';
 import { twoSiteVelocity } from '@/lib/conduction/two-site-velocity';
 import { resolutions } from '@/lib/units/resolutions';
 import { roundTo } from '@/lib/units/round-to';
-
-/** One end of a segment: the newest run there, and its baseline if the run is comparable. */
-export interface SegmentEnd {
-  readonly siteId: string;
-  readonly at: string;
-  readonly onsetMs: number | null;
-  /** 0 for an absent response, null when not read. */
-  readonly amplitudeUv: number | null;
-  readonly isComparable: boolean;
-  readonly baselineOnsetMs: number | null;
-  readonly baselineAmplitudeUv: number | null;
-  readonly baselineScatter: number;
-  readonly baselineRunCount: number;
-}
-
-/** A pair of neighbouring sites as one channel sees it. */
-export interface SegmentPairInput {
-  readonly nerveId: string;
-  readonly channelId: string;
-  readonly proximal: SegmentEnd;
-  readonly distal: SegmentEnd;
-  /** null where the distances are void or not measured. */
-  readonly distanceMm: number | null;
-  readonly spansRiskStep: boolean;
-  readonly rules: RuleSet;
-}
 
 /**
  * Velocity of a segment, and its conduction time and amplitude ratio against their own baseline.
@@ -132,35 +106,4 @@ function isSlowed(
     time.changeMs >= rules.segmentTimeRiseMs &&
     isBeyondNoise({ change: time.changeMs, standardError: time.standardErrorMs })
   );
-}
-
-/** A ratio also falls when only the distal response grew: that is a gain, and nothing was lost proximally. */
-function hasFallen(end: SegmentEnd): boolean {
-  if (end.amplitudeUv === null || end.baselineAmplitudeUv === null) return false;
-  const change = amplitudeChange({
-    baselineUv: end.baselineAmplitudeUv,
-    currentUv: end.amplitudeUv,
-    coefficientOfVariation: end.baselineScatter,
-    baselineRunCount: end.baselineRunCount,
-  });
-  if (change.kind === 'not-computable' || change.changePercent >= 0) return false;
-  return isBeyondNoise({ change: change.changePercent, standardError: change.standardErrorPercent });
-}
-
-/** Above this many times its baseline a ratio says nothing but that one end is next to nothing. House rule. */
-const largestRatioShare = 1000;
-
-function ratioChangeOf({ proximal, distal }: SegmentPairInput) {
-  if (proximal.amplitudeUv === null || distal.amplitudeUv === null) return null;
-  if (proximal.baselineAmplitudeUv === null || distal.baselineAmplitudeUv === null) return null;
-  const nowTimesBaseline = proximal.amplitudeUv * distal.baselineAmplitudeUv;
-  if (nowTimesBaseline > largestRatioShare * distal.amplitudeUv * proximal.baselineAmplitudeUv) return null;
-  const ratio = amplitudeRatio({
-    baseline: { proximalUv: proximal.baselineAmplitudeUv, distalUv: distal.baselineAmplitudeUv },
-    current: { proximalUv: proximal.amplitudeUv, distalUv: distal.amplitudeUv },
-    coefficientOfVariation: Math.max(proximal.baselineScatter, distal.baselineScatter),
-    baselineRunCount: Math.min(proximal.baselineRunCount, distal.baselineRunCount),
-  });
-  if (ratio.kind === 'not-computable') return null;
-  return { changePercent: ratio.changePercent, change: ratio.changePercent, standardError: ratio.standardErrorPercent };
 }

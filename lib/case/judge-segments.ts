@@ -1,5 +1,6 @@
 import type { PathJudgement, SegmentJudgement } from '@/lib/alert/judgement';
-import { judgeSegment, type SegmentEnd } from '@/lib/alert/judge-segment';
+import { judgeSegment } from '@/lib/alert/judge-segment';
+import type { SegmentEnd } from '@/lib/alert/segment-pair';
 import type { Nerve, Site } from '@/lib/alert/nerve-plan';
 import type { CaseState } from '@/lib/case/case-state';
 import { baselineKey, pathIdOf } from '@/lib/case/keys';

@@ -1,6 +1,7 @@
 import type { Nerve } from '@/lib/alert/nerve-plan';
 import type { CaseState, Incident } from '@/lib/case/case-state';
 import { abnormalOf, type AbnormalRun } from '@/lib/case/decide/abnormal-of';
+import { companionOf } from '@/lib/case/decide/companion-of';
 import { draft } from '@/lib/case/decide/draft';
 import { evidenceOf } from '@/lib/case/decide/evidence-of';
 import { repeatDueAt } from '@/lib/case/decide/repeat-due-at';
@@ -18,7 +19,7 @@ import { locateInCase } from '@/lib/case/locate-in-case';
  * on the same path or another of the nerve: stretches of one nerve are nested, every one ends at the muscle. What so far
  * was a notice at most confirms nothing graver: that asks for a repeat of its own. A repeat that is back inside the limit
  * with its margin settles a notice; an alert only ends by a person. What a late entry shows is raised like any other and
- * waits for a test that comes after it, also where newer runs are good: a second late one may confirm it.
+ * waits for a test that comes after it, also where newer runs are good; what would have confirmed it in time confirms it.
  *
  * @param before the case before the run: what was open then
  * @param after the case with the run and its judgement
@@ -33,13 +34,24 @@ export function alertDrafts(before: CaseState, after: CaseState, judged: EntryBo
   const abnormal = abnormalOf(judged, kept);
   const open = before.incidents[nerve.id];
   const incident = after.incidents[nerve.id];
-  if (open === undefined || incident === undefined) {
-    const alertId = `${nerve.id}-${(after.alertCounts[nerve.id] ?? 0) + 1}`;
-    return abnormal === null ? [] : [notice(after, nerve, abnormal, { alertId, incident: null })];
-  }
+  if (open === undefined || incident === undefined) return abnormal === null ? [] : firstRaised(after, nerve, abnormal);
   // A correction can have taken a recovery back: what it shows now is a return.
   if (abnormal?.isOwnEvidence === true) return abnormalAgain(after, nerve, { ...incident, recoveredAt: open.recoveredAt }, abnormal);
   return insideLimits(after, nerve, incident, judged.runSeq);
+}
+
+/** A notice; of a late entry that has its confirmation among the kept runs, the alert it would have been. */
+function firstRaised(after: CaseState, nerve: Nerve, abnormal: AbnormalRun): readonly EntryDraft[] {
+  const open = { alertId: `${nerve.id}-${(after.alertCounts[nerve.id] ?? 0) + 1}`, incident: null };
+  const companion = companionOf(after, nerve, abnormal);
+  if (companion === null) return [notice(after, nerve, abnormal, open)];
+  const [first, second] = companion.at < abnormal.at ? [companion, abnormal] : [abnormal, companion];
+  const { runSeq, finding } = second;
+  const percents = [first, second].map((run) => run.worstPercentOfBaseline).filter((percent) => percent !== null);
+  const worstPercentOfBaseline = percents.length === 0 ? null : Math.min(...percents);
+  const pathIds = [...new Set([...first.pathIds, ...second.pathIds])];
+  const evidence = { ...evidenceOf(after, nerve, first, open), runSeq, finding, worstPercentOfBaseline, pathIds };
+  return [notice(after, nerve, first, open), draft('alert.raised', { ...evidence, isRepeated: true })];
 }
 
 function notice(after: CaseState, nerve: Nerve, abnormal: AbnormalRun, open: { alertId: string; incident: Incident | null }): EntryDraft {

@@ -1,6 +1,6 @@
 import type { CaseState, Incident } from '@/lib/case/case-state';
-import { badSegmentsOf } from '@/lib/case/evolve/bad-segments-of';
 import type { AlertEvidence, CaseEntry } from '@/lib/case/entry-bodies';
+import { returned, segmentsOfRun, withRun } from '@/lib/case/evolve/evidence-runs';
 
 type AlertEntry = CaseEntry & {
   kind:
@@ -97,6 +97,7 @@ function updated(
         ...incident,
         ...evidenceFields(entry.body),
         ...unpainted(entry),
+        ...withRun(state, incident, entry.body),
         level: 'alert',
         isRepeated: entry.body.isRepeated,
         raisedAt: incident.level === 'alert' ? incident.raisedAt : entry.recordedAt,
@@ -132,17 +133,6 @@ function updated(
     case 'alert.acted':
       return { ...incident, actedAt: entry.eventAt, action: entry.body.action };
   }
-}
-
-/** What is past a limit again says where the change lies now; what is not, came back. */
-function returned(state: CaseState, { body, eventAt }: CaseEntry & { kind: 'alert.worsened' }) {
-  const locateFromAt = state.runs.find((run) => run.seq === body.runSeq)?.at ?? eventAt;
-  return { locateFromSeq: body.runSeq, locateFromAt, badPathIds: body.pathIds, badSegments: segmentsOfRun(state, body) };
-}
-
-function segmentsOfRun(state: CaseState, body: AlertEvidence) {
-  const kept = state.runs.find((run) => run.seq === body.runSeq);
-  return kept === undefined ? [] : badSegmentsOf(state, body.nerveId, kept);
 }
 
 function withIncident(state: CaseState, incident: Incident): CaseState {

@@ -1,7 +1,8 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 
-import { judgeSegment, type SegmentEnd, type SegmentPairInput } from '@/lib/alert/judge-segment';
+import { judgeSegment } from '@/lib/alert/judge-segment';
+import type { SegmentEnd, SegmentPairInput } from '@/lib/alert/segment-pair';
 import { defaultRuleSet } from '@/lib/alert/rule-set';
 
 const end = (siteId: string, onsetMs: number | null, amplitudeUv: number | null, over: Partial<SegmentEnd> = {}): SegmentEnd => ({

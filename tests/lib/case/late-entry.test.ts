@@ -63,6 +63,27 @@ describe('decide, late entries', () => {
     expect(script.state.incidents['ulnar']?.level).toBe('alert');
   });
 
+  it.each([
+    ['on the same path', 'above-elbow', 0],
+    ['on another path of the nerve', 'axilla', 0],
+    ['unless a good run of the path lies between', 'above-elbow', 1],
+  ] as const)('decide confirms a late loss by a known one whose notice was settled since, %s', (_case, site, goodBetween) => {
+    const script = monitoredUlnar().at('10:41');
+    script.run('above-elbow', { adm: adm('above-elbow', 0.38) });
+    for (let count = 0; count < goodBetween; count += 1) script.wait(5000).run('above-elbow', { adm: adm('above-elbow') });
+    script.at('10:41:40').run('above-elbow', { adm: adm('above-elbow') });
+    script.run('axilla', { adm: adm('axilla') });
+    expect(script.state.incidents).toEqual({});
+    const kinds = script.at('10:46').run(site, { adm: adm(site, 0.3) }, {}, { eventAt: clock('10:41:20') });
+    expect(kinds).toEqual(goodBetween === 1 ? ['notice.raised'] : ['notice.raised', 'alert.raised']);
+    if (goodBetween === 1) return;
+    expect(script.state.incidents['ulnar']).toMatchObject({
+      level: 'alert', isRepeated: true, firstBadAt: clock('10:41'), worstPercentOfBaseline: 30, lastGoodAt: null,
+    });
+    expect(script.view().lead).toMatchObject({ priority: 'high', headline: 'Ulnar was at 30\u00a0% of baseline' });
+    expect(script.view().lead.detail).toContain('From 10:41, received 10:46');
+  });
+
   it('decide raises a late loss from before a risk step that the newer runs came after', () => {
     const script = monitoredUlnar().at('10:35');
     script.step('nerve-lifted');
