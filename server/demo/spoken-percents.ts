@@ -23,7 +23,8 @@ export class SpokenPercents {
     const newest = this.newest.get(path);
     if (amplitudes === undefined || newest === undefined) throw new Error(`There is no baseline of ${path} to speak of.`);
     const meanUv = amplitudes.reduce((sum, amplitudeUv) => sum + amplitudeUv, 0) / amplitudes.length;
-    return `${Math.round((100 * newest.amplitudeUv) / meanUv)} %`;
+    // As the screens do: to 0.1 %, then to whole percent.
+    return `${Math.round(Math.round((1000 * newest.amplitudeUv) / meanUv) / 10)} %`;
   }
 
   /** The first baseline run after anything else begins a new baseline. */

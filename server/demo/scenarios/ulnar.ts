@@ -52,17 +52,29 @@ function prepare(script: ScenarioScript): void {
   script.step('incision', 20);
 }
 
-/** The arm cools by 3 °C: every time is longer on both nerves, no amplitude falls. Then it is warmed. */
+/**
+ * The arm cools by 3 °C: every time is longer on both nerves, no amplitude falls. Then it is warmed. The desk tests all the
+ * while, so that no two runs of a pair are far apart in temperature.
+ */
 function coolingEpisode(script: ScenarioScript): void {
+  const [coldC, warmC] = [referenceC - 3, referenceC - 0.2];
   script.part('The arm cools');
-  script.acting = { ...script.acting, temperatureC: referenceC - 3 };
-  script.runs([...ulnarSites, armControl], { after: 12 });
-  script.condition({ kind: 'limb-temperature', temperatureC: referenceC - 3 });
-  script.message('desk', `Every response is later, the control too. Limb ${referenceC - 3} °C, it was ${referenceC} °C. ADM from the axilla at ${script.percent('axilla', 'adm')} of baseline.`);
-  script.advice('Uniform, control included, amplitudes kept: this reads as cooling. Warm the arm and test again before anything is compared.', 'Warm irrigation and blanket on');
-  script.acting = { ...script.acting, temperatureC: referenceC - 0.2 };
-  script.condition({ kind: 'limb-temperature', temperatureC: referenceC - 0.2 }, null, 100);
-  script.runs([...ulnarSites, armControl]);
+  limbDrifts(script, coldC);
+  script.message('desk', `Every response is later, the control too. Limb ${coldC} °C, it was ${referenceC} °C. ADM from the axilla at ${script.percent('axilla', 'adm')} of baseline.`);
+  script.advice('Uniform, control included, amplitudes kept: this reads as cooling. Warm the arm and go on testing until it is warm.', 'Warm irrigation and blanket on');
+  limbDrifts(script, warmC);
+}
+
+/** Three rounds while the limb drifts, a quarter of a degree from run to run at most, and one when it has arrived. */
+function limbDrifts(script: ScenarioScript, toC: number): void {
+  const fromC = script.acting.temperatureC;
+  const rounds = 3 * ulnarSites.length;
+  for (let count = 1; count <= rounds; count += 1) {
+    script.acting = { ...script.acting, temperatureC: fromC + ((toC - fromC) * count) / rounds };
+    script.run(ulnarSites[(count - 1) % ulnarSites.length] ?? 'wrist', { after: 7 });
+  }
+  script.condition({ kind: 'limb-temperature', temperatureC: toC });
+  script.runs([...ulnarSites, armControl], { after: 7 });
 }
 
 function exposure(script: ScenarioScript): void {
