@@ -1,6 +1,6 @@
 import type { CaseState } from '@/lib/case/case-state';
 import { clockTime, durationWords } from '@/lib/text/format';
-import { lastTestAt } from '@/lib/text/last-test';
+import { lastTestAt } from '@/lib/text/last-test-at';
 import type { TodayContext } from '@/lib/text/today-context';
 import { msOfMoment } from '@/lib/units/ms-of-moment';
 

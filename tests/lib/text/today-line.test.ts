@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 
 import { nonBreakingSpace } from '@/lib/text/format';
-import { lastTestAt } from '@/lib/text/last-test';
+import { lastTestAt } from '@/lib/text/last-test-at';
 import type { TodayContext } from '@/lib/text/today-context';
 import { todayLine } from '@/lib/text/today-line';
 import { todayNeed } from '@/lib/text/today-need';
