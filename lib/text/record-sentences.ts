@@ -13,7 +13,8 @@ import { spanWords } from '@/lib/text/span-words';
 export interface RecordPart {
   readonly id: 'done' | 'baseline' | 'alerts' | 'outcome' | 'blind' | 'not-done';
   readonly heading: string;
-  readonly sentences: readonly string[];
+  /** Sentences that belong together, for example those of one alert. */
+  readonly paragraphs: readonly (readonly string[])[];
 }
 
 /**
@@ -24,7 +25,7 @@ export interface RecordPart {
  *
  * @param course the course of the case
  * @param timeZone IANA zone of the hospital
- * @returns parts in order; each has at least one sentence
+ * @returns parts in order; each has at least one paragraph of at least one sentence
  * @source product rule: summary in sentences computed from entries and marked so
  * @accuracy tests/lib/text/record-sentences.test.ts, sentences written by hand
  * @example
@@ -34,12 +35,12 @@ export function recordSentences(course: CaseCourse, timeZone: string): readonly 
   const { plan } = course.final;
   const time = (at: string) => clockTime(at, timeZone);
   return [
-    { id: 'done', heading: 'What was done', sentences: doneSentences(course, time) },
-    { id: 'baseline', heading: 'Baseline', sentences: baselineSentences(course, time) },
-    { id: 'alerts', heading: 'Alerts', sentences: [countSentence(course.alerts), ...course.alerts.flatMap((alert) => alertInSentences(alert, plan, timeZone))] },
-    { id: 'outcome', heading: 'Outcome', sentences: orElse(recordOutcome(course), 'No path was run.') },
-    { id: 'blind', heading: 'Blind time', sentences: blindSentences(course) },
-    { id: 'not-done', heading: 'What was not done', sentences: orElse(recordNotDone(course), 'Nothing that this record looks for is missing.') },
+    { id: 'done', heading: 'What was done', paragraphs: [doneSentences(course, time)] },
+    { id: 'baseline', heading: 'Baseline', paragraphs: baselineParagraphs(course, time) },
+    { id: 'alerts', heading: 'Alerts', paragraphs: [[countSentence(course.alerts)], ...course.alerts.map((alert) => alertInSentences(alert, plan, timeZone))] },
+    { id: 'outcome', heading: 'Outcome', paragraphs: orElse(recordOutcome(course), 'No path was run.').map((one) => [one]) },
+    { id: 'blind', heading: 'Blind time', paragraphs: [blindSentences(course)] },
+    { id: 'not-done', heading: 'What was not done', paragraphs: [orElse(recordNotDone(course), 'Nothing that this record looks for is missing.')] },
   ];
 }
 
@@ -67,10 +68,10 @@ function doneSentences({ final, times, runs, steps, blind }: CaseCourse, time: (
   ];
 }
 
-function baselineSentences({ baselines, final }: CaseCourse, time: (at: string) => string): readonly string[] {
-  if (baselines.length === 0) return ['No baseline was accepted.'];
+function baselineParagraphs({ baselines, final }: CaseCourse, time: (at: string) => string): RecordPart['paragraphs'] {
+  if (baselines.length === 0) return [['No baseline was accepted.']];
   const limit = final.plan.rules.amplitudeNoticeFallPercent;
-  return baselines.flatMap((one) => {
+  return baselines.map((one) => {
     const loss = one.paths.map((path) => path.smallestLossPercent);
     const tooNoisy = one.paths.filter((path) => path.smallestLossPercent >= limit).length;
     return [

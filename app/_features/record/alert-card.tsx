@@ -23,19 +23,21 @@ export function AlertCard({ alert, plan, timeZone }: AlertCardProps) {
   const time = (at: string) => clockTime(at, timeZone, { seconds: true });
   const isAlert = alert.level === 'alert';
   return (
-    <article aria-label={`${isAlert ? 'Alert' : 'Notice'} ${alert.alertId}`} className="record-whole border-b border-rule py-5 first-of-type:pt-1">
-      <h3 className="flex flex-wrap items-center gap-x-3 gap-y-1 text-lg font-bold">
-        <Badge priority={isAlert ? 'high' : 'medium'}>{isAlert ? 'Alert' : 'Notice'}</Badge>
-        {`${nerveTitle(plan, alert.nerveId)}, ${placeWords(alert.location, plan)}`}
-        <span className="text-base font-normal text-second">{alert.alertId}</span>
-        <LateWords lateMs={alert.lateMs} />
-      </h3>
-      <dl className="mt-3 grid gap-x-8 gap-y-3 sm:grid-cols-2 lg:grid-cols-3">
-        <Fact name="Onset">{onsetWords(alert, time)}</Fact>
-        <Fact name="Repeat">{alert.repeatedAt === null ? 'Not repeated' : `Repeated ${time(alert.repeatedAt)}`}</Fact>
-        <Fact name="End">{endWords(alert, time)}</Fact>
-      </dl>
-      <AlertTimeline moments={alertMoments(alert)} timeZone={timeZone} />
+    <article aria-label={`${isAlert ? 'Alert' : 'Notice'} ${alert.alertId}`} className="border-b border-rule py-5 first-of-type:pt-1 last-of-type:border-b-0">
+      <div className="record-whole">
+        <h3 className="flex flex-wrap items-center gap-x-3 gap-y-1 text-lg font-bold">
+          <Badge priority={isAlert ? 'high' : 'medium'}>{isAlert ? 'Alert' : 'Notice'}</Badge>
+          {`${nerveTitle(plan, alert.nerveId)}, ${placeWords(alert.location, plan)}`}
+          <span className="text-base font-normal text-second">{alert.alertId}</span>
+          <LateWords lateMs={alert.lateMs} />
+        </h3>
+        <dl className="mt-3 grid gap-x-8 gap-y-3 sm:grid-cols-2 lg:grid-cols-3">
+          <Fact name="Onset">{onsetWords(alert, time)}</Fact>
+          <Fact name="Repeat">{alert.repeatedAt === null ? 'Not repeated' : `Repeated ${time(alert.repeatedAt)}`}</Fact>
+          <Fact name="End">{endWords(alert, time)}</Fact>
+        </dl>
+        <AlertTimeline moments={alertMoments(alert)} timeZone={timeZone} />
+      </div>
       <RoundTable alert={alert} rules={plan.rules} timeZone={timeZone} />
       <FactsTable
         caption={`Paths of ${alert.alertId}`}

@@ -1,7 +1,7 @@
 'use client';
 
 import { timelineLayout, type TimelinePlace } from '@/app/_features/record/timeline-layout';
-import { useElementWidth } from '@/app/_ui/use-element-width';
+import { useDrawnWidth } from '@/app/_features/record/use-drawn-width';
 import type { AlertMoment } from '@/lib/text/alert-moments';
 import { clockTime } from '@/lib/text/format';
 import { secondsWords } from '@/lib/text/span-words';
@@ -22,7 +22,7 @@ interface Mark {
 
 /** The course of an alert on a true time axis: first bad, raised, painted, told, read back, action, tested again, end. */
 export function AlertTimeline({ moments, timeZone }: AlertTimelineProps) {
-  const { ref, widthPx, remPx } = useElementWidth();
+  const { ref, widthPx, remPx } = useDrawnWidth();
   const atMs = moments.map((moment) => Date.parse(moment.at));
   const first = atMs[0] ?? 0;
   const time = (at: string) => clockTime(at, timeZone, { seconds: true });
@@ -30,7 +30,7 @@ export function AlertTimeline({ moments, timeZone }: AlertTimelineProps) {
   const layout = widthPx === null ? null : timelineLayout(atMs, widthPx, remPx);
   const marks = moments.map((moment, index): Mark => ({
     place: layout?.places[index] ?? { tickPx: 0, labelPx: 0 },
-    lines: moment.names,
+    lines: layout?.isUpright === true ? moment.names : moment.names.flatMap(inTwoLines),
     time: time(moment.at),
     since: index === 0 ? '' : `+${secondsWords((atMs[index] ?? first) - first)}`,
     isRaise: moment.isRaise,
@@ -44,6 +44,12 @@ export function AlertTimeline({ moments, timeZone }: AlertTimelineProps) {
       )}
     </div>
   );
+}
+
+/** A long name in two lines, where columns are narrow. */
+function inTwoLines(name: string): readonly string[] {
+  const cut = name.indexOf(' ');
+  return name.length > 12 && cut > 0 ? [name.slice(0, cut), name.slice(cut + 1)] : [name];
 }
 
 interface DrawingProps {
@@ -67,7 +73,7 @@ function Lying({ marks, widthPx, remPx, label }: DrawingProps) {
           <MomentMark x={place.tickPx} y={axis} isRaise={isRaise} />
           <text x={place.labelPx} y={remPx * 3.5} textAnchor="middle" fontSize={remPx * 0.8125} className="font-mono" fill="var(--ink)">{time}</text>
           {names.map((name, index) => (
-            <text key={name} x={place.labelPx} y={remPx * 3.5 + line * (index + 1)} textAnchor="middle" fontSize={remPx * 0.8125} fontWeight={isRaise ? 700 : 400} fill="var(--ink)">{name}</text>
+            <text key={`${index}-${name}`} x={place.labelPx} y={remPx * 3.5 + line * (index + 1)} textAnchor="middle" fontSize={remPx * 0.8125} fontWeight={isRaise ? 700 : 400} fill="var(--ink)">{name}</text>
           ))}
           <text x={place.labelPx} y={remPx * 3.5 + line * (names.length + 1)} textAnchor="middle" fontSize={remPx * 0.8125} className="font-mono" fill="var(--second)">{since}</text>
         </g>

@@ -20,6 +20,7 @@ export function BlindSection({ course, timeZone }: { readonly course: CaseCourse
             {`Some nerve at risk could not be seen for ${spanWords(blind.whole.blindMs)} of ${spanWords(blind.monitoringMs)} of monitoring. Where several causes held at once, the first in the order of the theatre screen is counted. Dotted uprights are risk steps.`}
           </p>
           <BlindPicture blind={blind} steps={steps} timeZone={timeZone} />
+          <div className="h-4" />
           <FactsTable
             caption="Blind time by nerve"
             columns={[{ heading: 'Nerve' }, { heading: 'Blind', isNumeric: true }, { heading: 'Of monitoring', isNumeric: true }, { heading: 'Causes' }]}

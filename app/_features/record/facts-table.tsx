@@ -24,7 +24,7 @@ export function FactsTable({ caption, columns, rows }: FactsTableProps) {
       <tbody>
         {rows.map(({ key, cells }) => (
           <tr key={key}>
-            {cells.map((cell, index) => <Cell key={columns[index]?.heading ?? index} isNumeric={columns[index]?.isNumeric === true}>{cell}</Cell>)}
+            {cells.map((cell, index) => <Cell key={columns[index]?.heading ?? index} isNumeric={columns[index]?.isNumeric === true} className={columns[index]?.isNumeric === true ? undefined : 'min-w-32'}>{cell}</Cell>)}
           </tr>
         ))}
       </tbody>

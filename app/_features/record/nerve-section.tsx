@@ -8,6 +8,7 @@ import type { CaseCourse } from '@/lib/case/course/case-course';
 import type { NerveEnds } from '@/lib/case/course/nerve-ends';
 import type { SegmentEnds } from '@/lib/case/course/segment-ends';
 import { nerveLineView } from '@/lib/chart/nerve-line-view';
+import { openingLineView } from '@/lib/chart/opening-line-view';
 import type { CasePlan } from '@/lib/case/plan';
 import { clockTime, metresPerSecond, nonBreakingSpace, signed } from '@/lib/text/format';
 import { noVelocityWords } from '@/lib/text/reason-words';
@@ -35,11 +36,11 @@ function NerveArticle({ ends, course, timeZone }: NerveSectionProps & { readonly
   const { plan } = course.final;
   const segments = course.segments.filter((one) => one.nerveId === nerve.id);
   const lastMs = Date.parse(lastLookAt(course));
-  const openedMs = Date.parse(course.times.baselineAt ?? lastLookAt(course));
+  const opening = openingLineView(course, nerve.id);
   return (
     <article aria-label={nerve.name} className="mb-8">
       <h3 className="text-lg font-bold">{nerve.name}</h3>
-      {course.opened === null ? null : <Line heading={`Opening baseline, ${clockTime(course.times.baselineAt ?? '', timeZone)}`} view={nerveLineView(course.opened, nerve.id, openedMs)} />}
+      {opening === null ? null : <Line heading={`Opening baseline, ${clockTime(course.times.baselineAt ?? '', timeZone)}`} view={opening} />}
       <Line heading={`As last seen, ${clockTime(lastLookAt(course), timeZone)}`} view={nerveLineView(course.final, nerve.id, lastMs)} />
       <FactsTable caption={`${nerve.name}, opening against last run`} columns={closingColumns} rows={paths.map((path) => ({ key: path.pathId, cells: closingCells(path, plan, timeZone) }))} />
       {segments.length === 0 ? null : (
@@ -55,7 +56,7 @@ function NerveArticle({ ends, course, timeZone }: NerveSectionProps & { readonly
 
 function Line({ heading, view }: { readonly heading: string; readonly view: ReturnType<typeof nerveLineView> }) {
   return (
-    <figure className="record-whole mt-2">
+    <figure className="record-whole my-3">
       <figcaption className="text-sm text-second">{heading}</figcaption>
       <NervePictures views={[view]} />
     </figure>

@@ -29,7 +29,7 @@ export function RecordHead({ head, entries, course }: RecordHeadProps) {
       )}
       <h1 className="text-3xl font-bold">{final.plan.title}</h1>
       <p className="mt-1 text-second">{`${head.hospitalName}, ${final.plan.theatre}, ${dayOf(times.openedAt ?? times.plannedAt, head.timeZone)}. ${final.status === 'closed' ? 'Closed' : 'Not closed'}. Reference ${head.reference}.${patient === '' ? '' : ` ${patient}.`}`}</p>
-      <p className="mt-1 text-second">{`${entries.length} entries, ${final.runCount} runs${late.length === 0 ? '' : `, ${late.length} entries received late`}. Times of ${head.timeZone}.`}</p>
+      <p className="mt-1 text-second">{`${entries.length} entries, ${final.runCount} runs${late.length === 0 ? '' : `, ${late.length} ${late.length === 1 ? 'entry' : 'entries'} received late`}. Times of ${head.timeZone}.`}</p>
       <p className="mt-1 text-sm text-second">An aid for qualified staff, not a certified medical device. Local protocols and licensed judgement come first.</p>
     </header>
   );

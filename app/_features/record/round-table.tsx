@@ -33,15 +33,18 @@ export function RoundTable({ alert, rules, timeZone }: RoundTableProps) {
           };
         })}
       />
-      <p className="mt-1.5 text-sm text-second">
-        {`Counted from the raise. Limits for an alert, custom: told ${seconds(rules.tellWithinSeconds)}, read back ${seconds(handlingLimits.readBackSeconds)}, tested again ${seconds(handlingLimits.retestSeconds)}.`}
-      </p>
+      {alert.level === 'notice' ? null : (
+        <p className="mt-1.5 text-sm text-second">
+          {`Counted from the raise. Limits for an alert, custom: told ${seconds(rules.tellWithinSeconds)}, read back ${seconds(handlingLimits.readBackSeconds)}, tested again ${seconds(handlingLimits.retestSeconds)}.`}
+        </p>
+      )}
     </div>
   );
 }
 
 function raiseWords(round: AlertRound): string {
-  const share = round.percentOfBaseline === null ? '' : `, ${percent(round.percentOfBaseline)}`;
+  const isOfTime = round.finding === 'onset-late' || round.finding === 'segment-slowed';
+  const share = round.percentOfBaseline === null || isOfTime ? '' : `, ${percent(round.percentOfBaseline)}`;
   const how = round.worsening.length > 0 ? round.worsening.map((word) => worseningNames[word]).join(', ') : findingNames[round.finding];
   const repeat = round.isRepeated === null ? '' : round.isRepeated ? ', confirmed' : ', not repeated';
   return `${kindNames[round.kind]}: ${how}${share}${repeat}`;

@@ -40,14 +40,17 @@ function versionLines(run: CourseRun, version: RunVersion, plan: CasePlan): read
     return [{ ...base, key: `${version.seq}`, isFirst: true, versionName: 'withdrawal', current: '', channel: '', reading: 'withdrawn', remark: version.reason ?? '' }];
   }
   const { intensityMa, pulseWidthUs, isSupramaximal, readings, note, purpose } = version.run;
-  const current = `${milliamperes(intensityMa)} × ${pulseWidthUs}${nonBreakingSpace}µs${isSupramaximal ? ', supramaximal' : ''}`;
+  const current = `${milliamperes(intensityMa)} × ${pulseWidthUs}${nonBreakingSpace}µs`;
   return readings.map(({ channelId, reading }, index) => {
     const kind = plan.channels.find((channel) => channel.id === channelId)?.kind ?? 'muscle';
     const judged = version.paths.find((path) => path.pathId === pathIdOf(run.siteId, channelId));
     const compared = judged?.kind === 'compared' ? judged : null;
+    // What a baseline is made of cannot have one yet: that needs no remark.
+    const isOwnBaseline = purpose === 'baseline' && judged?.kind === 'not-compared' && judged.reason === 'no-baseline';
     const remarks = [
-      index === 0 && purpose !== 'check' ? purpose : '',
-      judged?.kind === 'not-compared' && judged.reason !== 'not-read' ? `not compared, ${notComparedWords[judged.reason]}` : '',
+      index === 0 && purpose !== 'check' ? `${purpose} run` : '',
+      index === 0 && !isSupramaximal && !(judged?.kind === 'not-compared' && judged.reason === 'current-not-supramaximal') ? 'not known to be supramaximal' : '',
+      judged?.kind === 'not-compared' && !isOwnBaseline && judged.reason !== 'not-read' ? `not compared, ${notComparedWords[judged.reason]}` : '',
       ...(compared?.findings.map((finding) => findingNames[finding.kind]) ?? []),
       index === 0 && version.reason !== null ? `reason: ${version.reason}` : '',
       index === 0 && note !== null ? `note: ${note}` : '',
@@ -64,7 +67,7 @@ function versionLines(run: CourseRun, version: RunVersion, plan: CasePlan): read
       onset: compared === null || compared.change.onsetChangeMs === null ? '' : `${signed(compared.change.onsetChangeMs, 2)}${nonBreakingSpace}ms`,
       remark: remarks.join('; '),
       isPastLimit: compared !== null && isAbnormal(compared.findings),
-      isNotCompared: judged?.kind === 'not-compared' && judged.reason !== 'not-read',
+      isNotCompared: judged?.kind === 'not-compared' && judged.reason !== 'not-read' && !isOwnBaseline,
     };
   });
 }

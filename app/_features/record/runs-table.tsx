@@ -40,12 +40,12 @@ function Line({ line, timeZone }: { readonly line: RunLine; readonly timeZone: s
         {isFirst && line.versionName !== 'run' ? <span className="ml-2 text-sm font-semibold">{versionNames[line.versionName]}</span> : null}
         {isFirst && line.versionName !== 'correction' ? <LateWords lateMs={run.lateMs} /> : null}
       </Cell>
-      <Cell className="text-second">{isFirst ? line.current : ''}</Cell>
+      <Cell className="whitespace-nowrap text-second">{isFirst ? line.current : ''}</Cell>
       <Cell>{line.channel}</Cell>
-      <Cell className={joinClasses(line.versionName === 'original' && 'line-through')}>{line.reading}</Cell>
+      <Cell className={joinClasses('whitespace-nowrap', line.versionName === 'original' && 'line-through')}>{line.reading}</Cell>
       <Cell isNumeric className={joinClasses(line.isPastLimit && 'font-bold')}>{line.percent}</Cell>
       <Cell isNumeric>{line.onset}</Cell>
-      <Cell className="text-second">{line.remark}</Cell>
+      <Cell className="min-w-40 text-second">{line.remark}</Cell>
     </tr>
   );
 }

@@ -15,10 +15,10 @@ export function SummarySection({ course, entries, timeZone }: SummarySectionProp
   return (
     <RecordSection id="summary" heading="Summary" isComputed>
       <dl className="max-w-4xl">
-        {recordSentences(course, timeZone).map(({ id, heading, sentences }) => (
+        {recordSentences(course, timeZone).map(({ id, heading, paragraphs }) => (
           <div key={id} className="border-b border-rule py-2.5 sm:grid sm:grid-cols-[9rem_1fr] sm:gap-6">
             <dt className="font-semibold">{heading}</dt>
-            <dd>{sentences.join(' ')}</dd>
+            <dd className="flex flex-col gap-1.5">{paragraphs.map((sentences) => <p key={sentences[0]}>{sentences.join(' ')}</p>)}</dd>
           </div>
         ))}
       </dl>

@@ -12,7 +12,7 @@ import { monitoredUlnar, openedCase } from '@/tests/support/ulnar-case';
 
 const parts = (script: CaseBuilder, timeZone = 'UTC') => recordSentences(caseCourse(script.entries), timeZone);
 const plain = (text: string) => text.replaceAll('\u00a0', ' ');
-const of = (script: CaseBuilder, id: RecordPart['id'], timeZone?: string) => parts(script, timeZone).find((part) => part.id === id)!.sentences.map(plain);
+const of = (script: CaseBuilder, id: RecordPart['id'], timeZone?: string) => parts(script, timeZone).find((part) => part.id === id)!.paragraphs.flat().map(plain);
 
 describe('recordSentences', () => {
   it('recordSentences tells what was done, in the time of the hospital', () => {
@@ -76,7 +76,7 @@ describe('recordSentences', () => {
 
   it('recordSentences of a case in which nothing happened says so in every part', () => {
     const said = parts(openedCase());
-    expect(said.map((part) => part.sentences[0])).toEqual([
+    expect(said.map((part) => part.paragraphs[0]?.[0])).toEqual([
       'Ulnar nerve at the elbow, transposition, left side, Theatre.', 'No baseline was accepted.', 'No notice and no alert.', 'No path was run.', 'Nothing was monitored.', 'No examination before the operation is recorded.',
     ]);
   });
@@ -84,7 +84,7 @@ describe('recordSentences', () => {
   it('every sentence ends with a full stop, holds no empty value, and advises nothing, in cases of chance', () => {
     fc.assert(
       fc.property(randomCase, (script) => {
-        for (const sentence of parts(script).flatMap((part) => part.sentences)) {
+        for (const sentence of parts(script).flatMap((part) => part.paragraphs.flat())) {
           expect(sentence).toMatch(/^[A-Z0-9].*\.$/);
           expect(sentence).not.toMatch(/undefined|null|NaN|Infinity|\.\.|\(\)/);
           expect(sentence).not.toMatch(/\b(should|must|recommend|advise|likely|expect(ed)?|prognosis|will)\b/i);
