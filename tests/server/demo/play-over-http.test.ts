@@ -8,13 +8,14 @@ import { relaxant } from '@/server/demo/scenarios/relaxant';
 import { ulnar } from '@/server/demo/scenarios/ulnar';
 import { send } from '@/tests/server/house/client';
 import { openTestHouse, type TestHouse } from '@/tests/server/house/open-test-house';
+import { tokenOf } from '@/tests/server/machine/token-of';
 
 let house: TestHouse;
 let people: Demo['people'];
 
 beforeAll(async () => {
   house = await openTestHouse();
-  const as = async (email: string) => ({ cookie: await house.cookieOf(email), origin: house.url });
+  const as = async (email: string) => ({ authorization: `Bearer ${(await tokenOf(house, email)).token}` });
   people = { desk: await as('desk@demo.example'), physician: await as('physician@demo.example') };
 });
 afterAll(() => house.close());
@@ -67,7 +68,7 @@ describe('a demo over the public interface', () => {
       if (count % 4 === 2) throw new TypeError('terminated');
       return count % 4 === 3 ? new Response('{}', { status: 503 }) : response;
     };
-    const short: Scenario = { ...neuroma, moments: neuroma.moments.slice(0, 8) };
+    const short: Scenario = { ...neuroma, moments: neuroma.moments.slice(0, 5) };
     const { caseId, lines } = await play(short, { reach });
     const entries = await entriesOf(caseId);
     expect(sent.length).toBeGreaterThan(short.moments.length);
