@@ -1,5 +1,5 @@
 import type { PathRecord } from '@/lib/case/case-state';
-import type { SegmentText } from '@/lib/chart/velocity-text';
+import type { SegmentText } from '@/lib/chart/segment-text';
 
 /**
  * What stands under a break: no response, with the highest current tried.

@@ -31,16 +31,25 @@ export function segmentShapes(segment: NerveLineSegment, fromX: number, toX: num
   const line = (role: string, tone: Tone, widthPx: number, velocityShare: number | null = 1) =>
     dashed(bar(`${role}-${segment.key}`, role, tone, fromX, toX, widthPx), velocityShare, sizes);
   const ghost = line('ghost', 'ghost', sizes.thicknessPx);
-  if (segment.isBroken) return [ghost, ...broken(segment, fromX, toX, sizes)];
-  if (segment.isUntested || segment.amplitudeShare === null) return [outline(segment, fromX, toX, sizes)];
+  if (segment.isBroken) return [ghost, ...edged(broken(segment, fromX, toX, sizes))];
+  if (segment.isUntested || segment.amplitudeShare === null) return edged([outline(segment, fromX, toX, sizes)]);
   const share = Math.min(segment.amplitudeShare, mostShare);
   const thickness = Math.max(sizes.leastThicknessPx, sizes.thicknessPx * share);
   const tone = toneOf(segment.priority, segment.isDim ? 'second' : 'ink');
-  const own = line('segment', tone, thickness, segment.velocityShare);
-  return tone === 'medium' ? [ghost, line('edge', 'medium-edge', thickness + 2, segment.velocityShare), own] : [ghost, own];
+  return [ghost, ...edged([line('segment', tone, thickness, segment.velocityShare)])];
 }
 
 type Line = Extract<Shape, { kind: 'line' }>;
+type Rect = Extract<Shape, { kind: 'rect' }>;
+
+/** Yellow cannot be seen on white: an edge of 1 px lies under it. */
+function edged(shapes: readonly (Line | Rect)[]): readonly Shape[] {
+  const edges = shapes.filter((shape) => shape.tone === 'medium').map((shape): Shape => {
+    const edge = { key: `edge-${shape.key}`, role: 'edge', tone: 'medium-edge' } as const;
+    return shape.kind === 'line' ? { ...shape, ...edge, widthPx: shape.widthPx + 2 } : { ...shape, ...edge, strokePx: (shape.strokePx ?? 0) + 2 };
+  });
+  return [...edges, ...shapes];
+}
 
 function bar(key: string, role: string, tone: Tone, x1: number, x2: number, widthPx: number): Line {
   return { kind: 'line', key, role, tone, x1, y1: 0, x2, y2: 0, widthPx, dashPx: null };
@@ -53,7 +62,7 @@ function dashed(line: Line, velocityShare: number | null, sizes: NerveLineSizes)
   return { ...line, dashPx: [dashPx, gapPx], dashOffsetPx: offsetPx };
 }
 
-function outline(segment: NerveLineSegment, fromX: number, toX: number, sizes: NerveLineSizes): Shape {
+function outline(segment: NerveLineSegment, fromX: number, toX: number, sizes: NerveLineSizes): Rect {
   const stroke = Math.max(1, sizes.strokePx * 0.5);
   return {
     kind: 'rect',
@@ -70,12 +79,12 @@ function outline(segment: NerveLineSegment, fromX: number, toX: number, sizes: N
   };
 }
 
-function broken(segment: NerveLineSegment, fromX: number, toX: number, sizes: NerveLineSizes): readonly Shape[] {
+function broken(segment: NerveLineSegment, fromX: number, toX: number, sizes: NerveLineSizes): readonly Line[] {
   const tone = toneOf(segment.priority, 'ink');
   const middle = (fromX + toX) / 2;
   const halfGap = Math.min(sizes.thicknessPx * 0.9, (toX - fromX) / 4);
   const width = Math.max(1.5, sizes.strokePx);
-  const end = (side: string, x: number): Shape => ({ kind: 'line', key: `bar-${side}-${segment.key}`, role: 'break', tone, x1: x, y1: -sizes.thicknessPx * 0.75, x2: x, y2: sizes.thicknessPx * 0.75, widthPx: width, dashPx: null });
+  const end = (side: string, x: number): Line => ({ kind: 'line', key: `bar-${side}-${segment.key}`, role: 'break', tone, x1: x, y1: -sizes.thicknessPx * 0.75, x2: x, y2: sizes.thicknessPx * 0.75, widthPx: width, dashPx: null });
   return [
     bar(`stub-a-${segment.key}`, 'break', tone, fromX, middle - halfGap, width),
     bar(`stub-b-${segment.key}`, 'break', tone, middle + halfGap, toX, width),

@@ -1,4 +1,4 @@
-import type { SegmentText } from '@/lib/chart/velocity-text';
+import type { SegmentText } from '@/lib/chart/segment-text';
 
 /** Whether a measured value says how the nerve is now, was measured before that, or by a run that cannot be compared. */
 export type Standing = 'current' | 'older' | 'not-compared';

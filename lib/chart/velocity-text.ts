@@ -1,12 +1,7 @@
 import type { NoVelocityReason, SegmentJudgement } from '@/lib/alert/judgement';
+import type { SegmentText } from '@/lib/chart/segment-text';
 import { standingText, type Standing } from '@/lib/chart/standing-text';
 import { metresPerSecond } from '@/lib/text/format';
-
-/** The words of a segment, and the same where there is little room. */
-export interface SegmentText {
-  readonly text: string;
-  readonly shortText: string;
-}
 
 const reasons: Record<NoVelocityReason, SegmentText> = {
   'partner-not-tested': { text: 'not tested', shortText: 'not tested' },

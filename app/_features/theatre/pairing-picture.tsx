@@ -23,7 +23,7 @@ export function PairingPicture({ pairing, ended, problem, settings }: PairingPic
   return (
     <main ref={root} className="wall">
       <header className="flex items-center gap-[0.5em] border-b border-rule px-(--edge-room) py-[0.55em] text-(length:--needed) font-bold">
-        <Mark sizePx={44} />
+        <span className="[&>svg]:size-[1.25em]"><Mark sizePx={44} /></span>
         Fascicle
       </header>
       <div className="flex flex-1 flex-col justify-evenly gap-[0.8em] px-(--edge-room) py-[0.6em] text-(length:--needed) leading-[1.25]">

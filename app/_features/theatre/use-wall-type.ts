@@ -21,7 +21,7 @@ export interface WallType {
 /**
  * Steps of a full screen, roomiest first: headline against state size, words against needed size. 0.73 is 16 minutes
  * of arc, the least that the ergonomics standard allows (from memory). Below that stand only walls too small for their
- * distance, as two nerves on 55 inches at 5 m: smaller words before cut words.
+ * distance, as two nerves on 55 inches at 5 m: smaller words before cut words. The state keeps its size longest.
  */
 const steps = [
   { headline: 1.8, needed: 1, hasAges: true, emphasis: 1.8, factCount: 6 },
@@ -30,11 +30,11 @@ const steps = [
   { headline: 1, needed: 1, hasAges: true, emphasis: 1, factCount: 6 },
   { headline: 1, needed: 1, hasAges: false, emphasis: 1, factCount: 6 },
   { headline: 1, needed: 1, hasAges: false, emphasis: 1, factCount: 2 },
-  { headline: 0.95, needed: 0.93, hasAges: false, emphasis: 1, factCount: 2 },
-  { headline: 0.9, needed: 0.86, hasAges: false, emphasis: 1, factCount: 2 },
-  { headline: 0.85, needed: 0.79, hasAges: false, emphasis: 1, factCount: 2 },
-  { headline: 0.8, needed: 0.73, hasAges: false, emphasis: 1, factCount: 2 },
-  { headline: 0.8, needed: 0.73, hasAges: false, emphasis: 1, factCount: 0 },
+  { headline: 1, needed: 0.93, hasAges: false, emphasis: 1, factCount: 2 },
+  { headline: 1, needed: 0.86, hasAges: false, emphasis: 1, factCount: 2 },
+  { headline: 1, needed: 0.79, hasAges: false, emphasis: 1, factCount: 2 },
+  { headline: 1, needed: 0.73, hasAges: false, emphasis: 1, factCount: 2 },
+  { headline: 0.9, needed: 0.73, hasAges: false, emphasis: 1, factCount: 0 },
   { headline: 0.7, needed: 0.64, hasAges: false, emphasis: 1, factCount: 0 },
   { headline: 0.6, needed: 0.56, hasAges: false, emphasis: 1, factCount: 0 },
 ] as const;

@@ -66,6 +66,15 @@ describe('nerveLineScene', () => {
     expect(lineOf(scene, 'break').every((line) => line.tone === 'high')).toBe(true);
     expect(lineOf(scene, 'segment')).toEqual([]);
   });
+  it.each([{}, { isUntested: true }, { isBroken: true, amplitudeShare: 0 }])('lays an edge under all that is yellow, which white would swallow: %o', (segment) => {
+    const shapes = nerveLineScene(twoSites({ ...segment, priority: 'notice' }), options).shapes;
+    const yellow = shapes.filter((shape) => shape.tone === 'medium' && shape.kind !== 'text');
+    expect(yellow.length).toBeGreaterThan(0);
+    yellow.forEach((shape) => {
+      const under = shapes.slice(0, shapes.indexOf(shape)).find((other) => other.key === `edge-${shape.key}`);
+      expect(under?.tone).toBe('medium-edge');
+    });
+  });
   it('draws to scale', () => {
     const view = twoSites({});
     const third = { ...view.sites[1]!, siteId: 'c', name: 'Wrist', positionMm: 310 };
