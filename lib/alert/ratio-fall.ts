@@ -11,6 +11,7 @@ export interface RatioChange extends ChangeWithError {
 /**
  * Whether the response of an end itself fell beyond noise. A ratio also falls when only the distal response grew: that is a
  * gain, and nothing was lost proximally.
+ * @param end one end of a pair, with its baseline; not modified
  * @returns false where it is not computable
  * @source house rule
  */

@@ -22,7 +22,7 @@ const wholes: readonly RegExp[] = [
  * @source house rule: a number is read with its word
  * @accuracy exact; tests/lib/text/theatre-wrap.test.ts
  * @example
- * theatreWrap('Last good 11:22') // => 'Last good 11:22', in one piece
+ * theatreWrap('Last good 11:22') // => 'Last good 11:22'
  */
 export function theatreWrap(text: string): string {
   return wholes.reduce((kept, spaces) => kept.replaceAll(spaces, nonBreakingSpace), text);

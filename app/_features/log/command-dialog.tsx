@@ -30,12 +30,13 @@ export function CommandDialog({ title, description, action, isHeavy = false, isW
   const [isSending, setIsSending] = useState(false);
   const isLocked = useRef(false);
   const openedAtMs = useRef(Infinity);
+  const isByPointer = useRef(false);
   useEffect(() => {
     openedAtMs.current = performance.now();
   }, []);
   const handleSubmit = async (event: FormEvent) => {
     event.preventDefault();
-    if (isLocked.current || (isHeavy && performance.now() - openedAtMs.current < sameHandMs)) return;
+    if (isLocked.current || (isHeavy && !isByPointer.current && performance.now() - openedAtMs.current < sameHandMs)) return;
     const made = command();
     if (typeof made === 'string') return setProblem(made);
     isLocked.current = true;
@@ -48,7 +49,7 @@ export function CommandDialog({ title, description, action, isHeavy = false, isW
   };
   return (
     <ConsoleDialog isOpen onOpenChange={(isOpen) => (isOpen ? undefined : onClose())} title={title} isWide={isWide} {...(description === undefined ? {} : { description })}>
-      <form method="post" noValidate onSubmit={(event) => void handleSubmit(event)} className="flex flex-col gap-4">
+      <form method="post" noValidate onSubmit={(event) => void handleSubmit(event)} onPointerDownCapture={() => void (isByPointer.current = true)} onKeyDownCapture={() => void (isByPointer.current = false)} className="flex flex-col gap-4">
         {children}
         {problem === null ? null : <p role="alert" className="border-l-4 border-ink pl-3 font-semibold">{problem}</p>}
         <div className="flex flex-wrap gap-3">

@@ -59,7 +59,7 @@ describe('TheatrePicture', () => {
     expect(sizes.size).toBeGreaterThan(3);
     expect(factCounts.size).toBeGreaterThan(1);
     wallPx = 768;
-  });
+  }, 60_000);
 
   it('says that the desk is missing, since when, and nothing while it is there', () => {
     render(<TheatrePicture {...shown} isLive deskWords={deskWords} settings={usualWallSettings} />);
