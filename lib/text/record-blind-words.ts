@@ -11,7 +11,7 @@ export const blindCauseNames: { readonly [C in BlindCause]: string } = {
   'not-compared': 'Not compared',
   'not-monitorable': 'Not monitorable by amplitude',
   'not-tested-since-step': 'Not tested since a risk step',
-  'not-tested-in-time': 'Not tested within the freshness limit',
+  'not-tested-in-time': 'Not tested in time',
 };
 
 /** One cause with its sum in ms and its share of the monitoring time in percent. */

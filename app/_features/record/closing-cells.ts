@@ -14,7 +14,7 @@ export const closingColumns: readonly FactColumn[] = [
   { heading: 'Last run' },
   { heading: 'At', isNumeric: true },
   { heading: '% of opening', isNumeric: true },
-  { heading: 'Onset', isNumeric: true },
+  { heading: 'Onset, change', isNumeric: true },
   { heading: 'Remark' },
 ];
 

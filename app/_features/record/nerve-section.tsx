@@ -43,10 +43,11 @@ function NerveArticle({ ends, course, timeZone }: NerveSectionProps & { readonly
       {opening === null ? null : <Line heading={`Opening baseline, ${clockTime(course.times.baselineAt ?? '', timeZone)}`} view={opening} />}
       <Line heading={`As last seen, ${clockTime(lastLookAt(course), timeZone)}`} view={nerveLineView(course.final, nerve.id, lastMs)} />
       <FactsTable caption={`${nerve.name}, opening against last run`} columns={closingColumns} rows={paths.map((path) => ({ key: path.pathId, cells: closingCells(path, plan, timeZone) }))} />
+      <div className="h-4" />
       {segments.length === 0 ? null : (
         <FactsTable
           caption={`${nerve.name}, velocities`}
-          columns={[{ heading: 'Segment' }, { heading: 'Opening', isNumeric: true }, { heading: 'Last', isNumeric: true }, { heading: 'Conduction time', isNumeric: true }]}
+          columns={[{ heading: 'Segment' }, { heading: 'Opening', isNumeric: true }, { heading: 'Last', isNumeric: true }, { heading: 'Conduction time, change', isNumeric: true }]}
           rows={segments.map((one) => ({ key: `${one.channelId}-${one.proximalSiteId}`, cells: segmentCells(one, plan) }))}
         />
       )}

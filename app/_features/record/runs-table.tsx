@@ -20,7 +20,7 @@ export function RunsTable({ lines, timeZone }: { readonly lines: readonly RunLin
           <HeadCell>Channel</HeadCell>
           <HeadCell>Reading</HeadCell>
           <HeadCell isNumeric>% of baseline</HeadCell>
-          <HeadCell isNumeric>Onset</HeadCell>
+          <HeadCell isNumeric>Onset, change</HeadCell>
           <HeadCell>Remark</HeadCell>
         </tr>
       </thead>

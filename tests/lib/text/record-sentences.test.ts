@@ -50,7 +50,7 @@ describe('recordSentences', () => {
 
   it('recordSentences sums the blind time by cause, the longest first', () => {
     expect(of(blindScript(), 'blind')).toEqual([
-      'Some nerve at risk could not be seen for 41 min 34 s of 55 min of monitoring (76 %): not tested within the freshness limit 35 min 4 s, not tested since a risk step 2 min 4 s, muscle responses could not be judged 1 min 56 s, paused 1 min, back in set-up or baseline phase 1 min, not compared 30 s.',
+      'Some nerve at risk could not be seen for 41 min 34 s of 55 min of monitoring (76 %): not tested in time 35 min 4 s, not tested since a risk step 2 min 4 s, muscle responses could not be judged 1 min 56 s, paused 1 min, back in set-up or baseline phase 1 min, not compared 30 s.',
       'Freshness limit 5 min, custom.',
     ]);
   });
