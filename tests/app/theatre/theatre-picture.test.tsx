@@ -47,7 +47,7 @@ describe('TheatrePicture', () => {
   it('keeps the size of an open alert when the desk is missing, on every wall that has room for a fact', async () => {
     const sizes = new Set<number>();
     const factCounts = new Set<number>();
-    for (wallPx = 160; wallPx <= 480; wallPx += 5) {
+    for (wallPx = 160; wallPx <= 480; wallPx += 12) {
       const before = await picture(shown.view, null);
       if (before.facts === 0) continue;
       const after = await picture(shown.view, deskWords);
