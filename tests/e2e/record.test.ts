@@ -139,8 +139,8 @@ describe('a case of 2,000 entries', () => {
     await reviewer.page.getByRole('heading', { name: 'Entries', exact: true }).waitFor();
     const longestMs = await reviewer.page.evaluate(() => (window as unknown as { longestMs: number }).longestMs);
     process.stdout.write(`Longest task while ${long.seq} entries opened: ${Math.round(longestMs)} ms\n`);
-    // 534 ms were seen on two busy cores; a freeze that a person would call one takes longer than this.
-    expect(longestMs).toBeLessThan(2000);
+    // 534 and 1,147 ms were seen on two busy cores, where other tests ran beside it.
+    expect(longestMs).toBeLessThan(3000);
     const entries = reviewer.page.getByRole('region', { name: 'Entries', exact: true });
     expect(await entries.locator('tbody tr').count()).toBe(150);
     await entries.getByRole('button', { name: 'Later entries' }).click();
