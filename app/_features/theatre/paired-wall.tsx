@@ -26,7 +26,7 @@ export function PairedWall({ caseId, timeZone, settings }: PairedWallProps) {
   const shown = feed.state === null || feed.checkedAt === null ? null : { state: feed.state, checkedAt: feed.checkedAt };
   return (
     <>
-      {shown === null ? null : <LivePicture feed={feed} state={shown.state} checkedAt={shown.checkedAt} timeZone={timeZone} settings={settings} />}
+      {shown === null ? <main className="sr-only">Waiting for the case</main> : <LivePicture feed={feed} state={shown.state} checkedAt={shown.checkedAt} timeZone={timeZone} settings={settings} />}
       <NotLiveLayer caseId={caseId} className="relative z-10">
         {shown === null ? (
           <NotLivePicture place="Theatre screen" procedure="" reason={notLiveReason(feed.problem)} lastLive={null} lines={[]} settings={settings} />
