@@ -1,4 +1,7 @@
-/** Everything that anyone can ask of the product; what is not in this list cannot be asked. */
+/**
+ * Everything that anyone can ask of the product; what is not in this list cannot be asked.
+ * @source house rule: default deny
+ */
 export const actions = [
   'list-cases',
   'plan-case',

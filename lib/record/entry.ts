@@ -50,8 +50,14 @@ export interface ChainHead {
   readonly recordedAt?: string;
 }
 
-/** What an entry's `previousHash` says when nothing stands before it. */
+/**
+ * What an entry's `previousHash` says when nothing stands before it: 64 hexadecimal digits.
+ * @source house rule
+ */
 export const NO_HASH = '0'.repeat(64);
 
-/** Head of a case without entries. */
+/**
+ * Head of a case without entries: number 0.
+ * @source house rule
+ */
 export const EMPTY_HEAD: ChainHead = { seq: 0, hash: NO_HASH };

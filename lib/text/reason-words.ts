@@ -1,6 +1,9 @@
 import type { NotComparedReason, NoVelocityReason } from '@/lib/alert/judgement';
 
-/** Why a run is not compared, in the trade's words, to stand after a comma. */
+/**
+ * Why a run is not compared, in the trade's words, to stand after a comma.
+ * @source trade's words, common practice
+ */
 export const notComparedWords: { readonly [R in NotComparedReason]: string } = {
   'no-baseline': 'no baseline on this path',
   'not-timed-out': 'made before the time-out',
@@ -16,7 +19,10 @@ export const notComparedWords: { readonly [R in NotComparedReason]: string } = {
   'path-unknown': 'path not in the plan',
 };
 
-/** Why a segment has no velocity, in the trade's words. */
+/**
+ * Why a segment has no velocity, in the trade's words.
+ * @source trade's words, common practice
+ */
 export const noVelocityWords: { readonly [R in NoVelocityReason]: string } = {
   'partner-not-tested': 'neighbouring site not tested',
   'spans-risk-step': 'pair spans a step or the first change',
